@@ -1,0 +1,24 @@
+// Starts the editor on a copy of the samples and runs the bundled tests in its extension host.
+// Arguments: the folder of the bundled tests, the file for the tally.
+import { cpSync } from "node:fs";
+import { join } from "node:path";
+import { projectFolder } from "../editor/projectFolder.js";
+import { runTests } from "../editor/runTests.js";
+import { temporaryFolder } from "../editor/temporaryFolder.js";
+
+const [bundles, tallyFile] = process.argv.slice(2);
+if (bundles === undefined || tallyFile === undefined) throw new Error("wanted: folder of the bundles, tally file");
+
+const root = projectFolder();
+const workspace = temporaryFolder("workspace");
+try {
+  cpSync(process.env["RATEWRIGHT_SAMPLES"] ?? join(root, "samples"), workspace.path, { recursive: true });
+  process.exitCode = await runTests({
+    extensionDevelopmentPath: process.env["RATEWRIGHT_EXTENSION"] ?? root,
+    extensionTestsPath: join(bundles, "index.cjs"),
+    workspace: workspace.path,
+    extensionTestsEnv: { RATEWRIGHT_TALLY: tallyFile },
+  });
+} finally {
+  workspace.remove();
+}
