@@ -8,13 +8,14 @@ import { root } from "./install.mjs";
 export const bundleFolder = join(root, "node_modules", ".cache", "ratewright-tests");
 
 /**
- * Bundles the files into a folder of the given name, emptied before, and answers with its path.
- * `esm` for Node (`.mjs`), `cjs` for the editor's extension host (`.cjs`, flat, with `vscode` left to the editor).
+ * Bundles the files into a folder of the given name, emptied before, and answers with its path. `esm` for Node: `.mjs`,
+ * in folders as below the project's top. `cjs` for the editor's extension host: `.cjs`, in folders as below `base`.
  * @param {string} name
  * @param {readonly string[]} files
  * @param {"esm" | "cjs"} format
+ * @param {string} base
  */
-export async function bundleTests(name, files, format) {
+export async function bundleTests(name, files, format, base = root) {
   const folder = join(bundleFolder, name);
   rmSync(folder, { recursive: true, force: true });
   mkdirSync(folder, { recursive: true });
@@ -22,7 +23,8 @@ export async function bundleTests(name, files, format) {
     absWorkingDir: root,
     entryPoints: [...files],
     outdir: folder,
-    ...(format === "esm" ? { outbase: root, outExtension: { ".js": ".mjs" } } : { outExtension: { ".js": ".cjs" } }),
+    outbase: base,
+    outExtension: { ".js": format === "esm" ? ".mjs" : ".cjs" },
     bundle: true,
     platform: "node",
     format,

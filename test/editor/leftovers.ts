@@ -12,7 +12,10 @@ export function atExit(step: () => void): () => void {
     process.once("exit", () => {
       for (const leftover of [...leftovers].reverse()) leftover();
     });
-    for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"] as const) process.once(signal, () => process.exit(130));
+    for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"] as const) {
+      // Whoever else listens to the signal ends the process in an orderly way.
+      process.once(signal, () => process.listenerCount(signal) === 0 && process.exit(130));
+    }
   }
   leftovers.add(step);
   return () => leftovers.delete(step);

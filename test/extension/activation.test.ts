@@ -1,6 +1,6 @@
 import assert from "node:assert/strict";
 import { commands, extensions, languages, Uri, workspace } from "vscode";
-import { until } from "./until.js";
+import { until } from "../editor/until.js";
 
 describe("the extension", () => {
   it("starts when a description is opened, and knows it by its language", async () => {
