@@ -92,7 +92,7 @@ export function descend(
     const offset = relativeOffset(here, work, moving, region, p);
     const rounding = 1e-13 * here.sumOfSquares + 1e-15 * work.size * Math.sqrt(here.sumOfSquares);
     const floor = 4e-32 * work.size * work.size * work.used;
-    stale = offset > 0.5 * best.offset ? stale + 1 : 0;
+    stale = offset > 0.95 * best.offset ? stale + 1 : 0;
     // below the rounding of the sum of squares the offset decides which point is better
     if (offset < best.offset || here.sumOfSquares < best.sumOfSquares - rounding) {
       best.theta.set(here.theta);
@@ -126,7 +126,7 @@ export function descend(
     const length = stepLength(region, moving);
     let accepted: boolean;
     if (Math.abs(predicted) <= rounding) {
-      if (stale >= 3) return finish("converged");
+      if (stale >= 4) return finish("converged");
       accepted = after <= before + 100 * rounding;
       if (!accepted) radius = 0.25 * length;
     } else {

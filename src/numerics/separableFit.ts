@@ -2,7 +2,7 @@ import { type Descent, descend } from "./descent.js";
 import { evenlySpread, gridSearch } from "./gridSearch.js";
 import { independence, inverseOfSquare, scaledCondition } from "./householder.js";
 import type { LeastSquaresFit, LeastSquaresOptions, SeparableModel, StopReason } from "./separableModel.js";
-import { type Projection, project, projection } from "./variableProjection.js";
+import { type Projection, project, projection, standsAt } from "./variableProjection.js";
 
 /** A column of the Jacobian of which less than this share is its own is not determined by the observations. */
 const undetermined = 1e-12;
@@ -117,7 +117,8 @@ function describe(work: Projection, found: Descent, estimated: readonly boolean[
     else if (found.theta[m]! >= high) bound[q + m] = "high";
     return bound[q + m] === null;
   });
-  const finite = Number.isFinite(project(work, found.theta, columns));
+  const stands = standsAt(work, found.theta, columns);
+  const finite = stands || Number.isFinite(project(work, found.theta, columns));
   const free: number[] = [];
   for (let j = 0; j < q; j++) {
     if (model.linear[j]!.fixed !== null) continue;
@@ -186,15 +187,17 @@ function fill(work: Projection, fitted: Float64Array, residuals: Float64Array): 
   }
 }
 
+/** ∂fit/∂parameter, in the arrays of the projection, which ends here. */
 function jacobianColumn(work: Projection, index: number): Float64Array {
   const q = work.basis.length;
-  if (index < q) return finiteOnly(work.basis[index]!.slice());
-  const column = new Float64Array(work.n);
+  if (index < q) return finiteOnly(work.basis[index]!);
+  const sources = work.derivative[index - q]!;
+  const column = sources[0] ?? new Float64Array(work.n);
   for (let j = 0; j < q; j++) {
     const b = work.beta[j]!;
-    if (b === 0) continue;
-    const from = work.derivative[index - q]![j]!;
-    for (let i = 0; i < column.length; i++) column[i]! += b * from[i]!;
+    const from = sources[j]!;
+    if (j === 0) for (let i = 0; i < column.length; i++) column[i] = b === 0 ? 0 : b * from[i]!;
+    else if (b !== 0) for (let i = 0; i < column.length; i++) column[i]! += b * from[i]!;
   }
   return finiteOnly(column);
 }

@@ -57,6 +57,8 @@ export interface Projection {
   sumOfSquares: number;
   /** the part of it that no step in θ can take away */
   remainder: number;
+  /** θ of the last projection with a Jacobian, else NaN */
+  readonly theta: Float64Array;
   /** true where a linear column is (nearly) a combination of those before it; its coefficient is then 0 */
   deficient: boolean;
 }
@@ -110,6 +112,7 @@ export function projection(y: Float64Array, weights: Float64Array | null, model:
     projected: new Float64Array(p),
     sumOfSquares: 0,
     remainder: 0,
+    theta: new Float64Array(p).fill(Number.NaN),
     deficient: false,
   };
 }
@@ -122,6 +125,8 @@ export function projection(y: Float64Array, weights: Float64Array | null, model:
  */
 export function project(work: Projection, theta: Float64Array, estimated: readonly boolean[] | null): number {
   const { model, qr, n } = work;
+  if (estimated === null) work.theta.fill(Number.NaN);
+  else work.theta.set(theta);
   model.evaluate(theta, work.basis, estimated === null ? null : work.derivative);
   for (let j = 0; j < model.linear.length; j++) {
     const { fixed } = model.linear[j]!;
@@ -167,6 +172,17 @@ export function project(work: Projection, theta: Float64Array, estimated: readon
   work.remainder = tail(work.right, Math.min(count + kept, n), n);
   work.sumOfSquares = work.remainder + sum;
   return Number.isFinite(work.sumOfSquares) ? work.sumOfSquares : refuse(work);
+}
+
+/** True where the last projection was made at this θ with just these columns, so that its QR still stands. */
+export function standsAt(work: Projection, theta: Float64Array, estimated: readonly boolean[]): boolean {
+  if (!Number.isFinite(work.sumOfSquares)) return false;
+  let kept = 0;
+  for (let m = 0; m < estimated.length; m++) {
+    if (work.theta[m] !== theta[m]) return false;
+    if (estimated[m] && (kept >= work.nonlinearCount || work.nonlinearFree[kept++] !== m)) return false;
+  }
+  return kept === work.nonlinearCount;
 }
 
 function refuse(work: Projection): number {
