@@ -1,0 +1,177 @@
+import { type DataOptions, type DataRefusal, type Limits, refused } from "./dataOptions.js";
+import { type HeaderRows, type HeaderUnitReader, headerAbove, headerAt } from "./headerRows.js";
+import { cellsOf, isBlankLine, lineLook } from "./lineLook.js";
+import { type Block, collectBlocks } from "./numericBlocks.js";
+import { linesFrom, type TextLine } from "./textLines.js";
+
+/** How a delimited text is laid out: what stands between its cells, and where its header and its body are. */
+export interface TableLayout {
+  readonly kind: "layout";
+  readonly delimiter: string;
+  readonly decimalComma: boolean;
+  readonly header: HeaderRows | null;
+  /** columns of the body */
+  readonly width: number;
+  /** where the body begins: offset in the text, and the line, from 1 */
+  readonly bodyStart: number;
+  readonly bodyLine: number;
+  /** false where no row of numbers was found, so that only csv-parse can say what the rows are */
+  readonly numeric: boolean;
+}
+
+/**
+ * Finds out the layout. The table is the first block of lines that are rows of numbers under one delimiter; the header
+ * is the row above it, whatever stands before that (settings of an instrument) is passed over. What the options state
+ * is taken as it is. Refuses a text without any filled line and lines or rows beyond the limits.
+ */
+export function tableLayout(
+  text: string,
+  options: DataOptions,
+  limits: Limits,
+  readUnit: HeaderUnitReader,
+): TableLayout | DataRefusal | { readonly kind: "stopped" } {
+  const delimiters = options.delimiter === undefined ? usualDelimiters : [statedDelimiter(options.delimiter)];
+  const collected = collectBlocks(text, options, delimiters, limits);
+  if (collected.kind !== "blocks") return collected;
+  if (collected.firstLine === null) return refused("data-empty", {});
+  const tables = collected.blocks.map((blocks, index) => bestTable(text, blocks, delimiters[index] ?? ",", readUnit));
+  const best = tables.filter((table) => table !== null).reduce<Table | null>(better, null);
+  const found =
+    best === null || options.skip !== undefined
+      ? statedLayout(text, collected.firstLine, best, delimiters, readUnit)
+      : best;
+  const width = Math.max(found.header?.headers.length ?? 0, found.block?.width ?? 0, 1);
+  if (width > limits.columns) {
+    return refused("data-too-many-columns", { line: found.header?.line ?? found.start.number, limit: limits.columns });
+  }
+  const decimalComma = options.decimalComma ?? hasDecimalComma(text, found);
+  const { delimiter, header, start } = found;
+  const numeric = found.block !== null;
+  return {
+    kind: "layout",
+    delimiter,
+    decimalComma,
+    header,
+    width,
+    bodyStart: start.start,
+    bodyLine: start.number,
+    numeric,
+  };
+}
+
+const usualDelimiters = ["\t", ";", ",", " "];
+
+/** `tab` and `space` are understood as words, because neither can be seen in a description. */
+function statedDelimiter(delimiter: string): string {
+  if (/^(\\t|tab)$/i.test(delimiter)) return "\t";
+  return /^( +|spaces?|blanks?)$/i.test(delimiter) ? " " : delimiter;
+}
+
+interface Table {
+  readonly delimiter: string;
+  readonly header: HeaderRows | null;
+  readonly start: Pick<TextLine, "start" | "number">;
+  readonly block: Block | null;
+}
+
+/**
+ * The block that is the table: the longest, or an earlier one of the same width whose header fits where that of the
+ * longest does not (a line of words in the middle of the readings).
+ */
+function bestTable(
+  text: string,
+  blocks: readonly Block[],
+  delimiter: string,
+  readUnit: HeaderUnitReader,
+): Table | null {
+  const longest = blocks.reduce<Block | null>((best, block) => (best && best.rows >= block.rows ? best : block), null);
+  if (longest === null) return null;
+  const table = (block: Block): Table => ({
+    delimiter,
+    block,
+    header: headerAbove(text, block.before, delimiter, block.width, readUnit),
+    start: block.first,
+  });
+  const chosen = table(longest);
+  if (chosen.header !== null && headerFits(chosen)) return chosen;
+  const earlier = blocks.filter((block) => block.width === longest.width && block.first.start < longest.first.start);
+  return earlier.map(table).find((candidate) => candidate.header !== null && headerFits(candidate)) ?? chosen;
+}
+
+function headerFits(table: Table): boolean {
+  return table.header === null || table.header.headers.length === table.block?.width;
+}
+
+/** The likelier of two tables read with different delimiters; the earlier delimiter of the list where nothing decides. */
+function better(best: Table | null, other: Table | null): Table | null {
+  if (best === null || other === null) return best ?? other;
+  const a = merits(best);
+  const b = merits(other);
+  for (let index = 0; index < a.length; index++) {
+    const difference = (b[index] ?? 0) - (a[index] ?? 0);
+    if (difference !== 0) return difference > 0 ? other : best;
+  }
+  return best;
+}
+
+function merits(table: Table): readonly number[] {
+  const { block, header } = table;
+  const width = block?.width ?? 0;
+  const covers = header === null ? 1 : Number(header.headers.length >= width);
+  return [covers, Number(width > 1), block?.rows ?? 0, Number(headerFits(table)), width];
+}
+
+/** The layout with the header in the first filled line, for files that state it and for files without rows of numbers. */
+function statedLayout(
+  text: string,
+  first: TextLine,
+  best: Table | null,
+  delimiters: readonly string[],
+  readUnit: HeaderUnitReader,
+): Table {
+  const delimiter = best?.delimiter ?? steadyDelimiter(text, first, delimiters);
+  const line = text.slice(first.start, first.end);
+  if (best !== null && lineLook(line, delimiter, Number.MAX_SAFE_INTEGER).kind === "data") {
+    return { delimiter, header: null, start: first, block: best.block };
+  }
+  const lines = firstLines(text, first, 64);
+  const width = best?.block?.width ?? [...cellsOf(line, delimiter)].length;
+  const found = headerAt(text, lines, delimiter, width, readUnit);
+  const last = lines.at(-1) ?? first;
+  const start = lines[found?.next ?? 0] ?? { start: last.next, number: last.number + 1 };
+  return { delimiter, header: found?.rows ?? null, start, block: best?.block ?? null };
+}
+
+function firstLines(text: string, first: TextLine, count: number): TextLine[] {
+  const lines: TextLine[] = [];
+  for (const line of linesFrom(text, first.start, first.number)) {
+    lines.push(line);
+    if (lines.length === count) break;
+  }
+  return lines;
+}
+
+/** Without rows of numbers: the delimiter that cuts most of the first lines into as many cells as the first of them. */
+function steadyDelimiter(text: string, first: TextLine, delimiters: readonly string[]): string {
+  const lines = firstLines(text, first, 20).map((line) => text.slice(line.start, line.end));
+  let best = delimiters.includes(",") ? "," : (delimiters[0] ?? ",");
+  let most = 0;
+  for (const delimiter of delimiters) {
+    const counts = lines
+      .filter((line) => !isBlankLine(line, delimiter))
+      .map((line) => [...cellsOf(line, delimiter)].length);
+    const steady = (counts[0] ?? 0) < 2 ? 0 : counts.filter((count) => count === counts[0]).length;
+    if (steady > most) [best, most] = [delimiter, steady];
+  }
+  return best;
+}
+
+/** The mark that most cells of the block show; where none shows one, the first that the rest of the text does. */
+function hasDecimalComma(text: string, table: Table): boolean {
+  const { block, delimiter } = table;
+  if (block !== null && block.commas + block.points > 0) return block.commas > block.points;
+  if (delimiter === ",") return false;
+  const mark = /\d([.,])\d/g;
+  mark.lastIndex = table.start.start;
+  return mark.exec(text)?.[1] === ",";
+}
