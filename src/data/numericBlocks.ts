@@ -24,6 +24,8 @@ export type Collected =
       readonly blocks: readonly (readonly Block[])[];
       /** the first line with anything in it, null where there is none */
       readonly firstLine: TextLine | null;
+      /** whether the table was found before the end of the text, so that more text would change nothing */
+      readonly settled: boolean;
     }
   | { readonly kind: "stopped" }
   | DataRefusal;
@@ -47,6 +49,7 @@ export function collectBlocks(
   const tracks = delimiters.map((delimiter) => new BlockTrack(delimiter, limits.columns));
   let recent: TextLine[] = [];
   let firstLine: TextLine | null = null;
+  let settled = false;
   for (const line of linesFrom(text, 0, 1)) {
     if (line.end - line.start > limits.lineLength) {
       return refused("data-line-too-long", { line: line.number, limit: limits.lineLength });
@@ -57,12 +60,13 @@ export function collectBlocks(
     if (!isBlankLine(content, " ")) {
       firstLine ??= line;
       for (const track of tracks) track.take(content, line, recent);
-      if (tracks.some((track) => track.settled())) break;
+      settled = tracks.some((track) => track.settled());
+      if (settled) break;
     }
     recent.push(line);
     if (recent.length >= 2 * context) recent = recent.slice(-context);
   }
-  return { kind: "blocks", blocks: tracks.map((track) => track.finish()), firstLine };
+  return { kind: "blocks", blocks: tracks.map((track) => track.finish()), firstLine, settled };
 }
 
 /** The blocks of one delimiter so far, and the one that is growing. */

@@ -17,6 +17,8 @@ export interface TableLayout {
   readonly bodyLine: number;
   /** false where no row of numbers was found, so that only csv-parse can say what the rows are */
   readonly numeric: boolean;
+  /** whether the text up to here decided it, so that more text would change nothing but the decimal mark */
+  readonly settled: boolean;
 }
 
 /**
@@ -56,6 +58,7 @@ export function tableLayout(
     bodyStart: start.start,
     bodyLine: start.number,
     numeric,
+    settled: collected.settled,
   };
 }
 

@@ -1,0 +1,169 @@
+import type { Polling } from "../contract/polling.js";
+import type { Limits } from "./dataOptions.js";
+import { makeRoom, type RowStore, rowStore } from "./rowStore.js";
+
+/** What the byte loop needs to know of the layout. */
+export interface PlainLayout {
+  /** one character; a blank means any run of blanks */
+  readonly delimiter: string;
+  readonly decimalComma: boolean;
+  readonly width: number;
+  /** the line the body begins on, from 1 */
+  readonly bodyLine: number;
+}
+
+export type PlainReading =
+  | { readonly kind: "rows"; readonly store: RowStore }
+  /** something else than plain numbers: the body is for csv-parse */
+  | { readonly kind: "irregular" }
+  | { readonly kind: "stopped" };
+
+const tab = 9;
+const lineFeed = 10;
+const carriageReturn = 13;
+const blank = 32;
+const plus = 43;
+const minus = 45;
+const point = 46;
+const comma = 44;
+const zero = 48;
+const nine = 57;
+
+/** Powers of ten that a double holds exactly. */
+const exactPowers = [
+  1, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15, 1e16, 1e17, 1e18, 1e19, 1e20,
+  1e21, 1e22,
+];
+/** A mantissa up to here takes one more digit and stays below 2^53. */
+const roomForDigit = 900_719_925_474_098;
+
+/**
+ * The rows of a body that is nothing but numbers, `width` in every row, read byte by byte; blank lines and blanks
+ * around cells are allowed, and one separator at the end of a row. Anything else makes it "irregular", and so does a
+ * body beyond the limits: csv-parse then reads it from the start and says what it is. A test keeps the two equal.
+ *
+ * A number of at most 53 bits times or over an exact power of ten is one correctly rounded operation, hence the double
+ * that JavaScript reads from the same digits (W. D. Clinger, How to read floating point numbers accurately, 1990,
+ * section 3); any other is given to JavaScript as text.
+ */
+export function plainBody(
+  bytes: Uint8Array,
+  start: number,
+  layout: PlainLayout,
+  limits: Limits,
+  polling: Polling,
+): PlainReading {
+  const { width } = layout;
+  const size = bytes.length;
+  const separator = layout.delimiter.charCodeAt(0);
+  const byBlanks = separator === blank;
+  const decimal = layout.decimalComma ? comma : point;
+  if (layout.delimiter.length !== 1 || separator > 126 || separator === decimal) return irregular;
+  const store = rowStore(width, expectedRows(bytes, start));
+  let { values, lines } = store;
+  let line = layout.bodyLine;
+  let at = start;
+  while (at < size) {
+    const rowStart = at;
+    let byte = bytes[at]!;
+    while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
+    if (byte === lineFeed || byte === carriageReturn) {
+      at += byte === carriageReturn && bytes[at + 1] === lineFeed ? 2 : 1;
+      line++;
+      continue;
+    }
+    const row = store.rows;
+    if (row === lines.length) {
+      makeRoom(store);
+      values = store.values;
+      lines = store.lines;
+    }
+    for (let column = 0; column < width; column++) {
+      const cellStart = at;
+      const negative = byte === minus;
+      if (negative || byte === plus) byte = bytes[++at] ?? lineFeed;
+      let mantissa = 0;
+      let digits = 0;
+      let exponent = 0;
+      let exact = true;
+      while (byte >= zero && byte <= nine) {
+        if (mantissa > roomForDigit) exact = false;
+        mantissa = mantissa * 10 + (byte - zero);
+        digits++;
+        byte = bytes[++at] ?? lineFeed;
+      }
+      if (byte === decimal) {
+        byte = bytes[++at] ?? lineFeed;
+        while (byte >= zero && byte <= nine) {
+          if (mantissa > roomForDigit) exact = false;
+          mantissa = mantissa * 10 + (byte - zero);
+          digits++;
+          exponent--;
+          byte = bytes[++at] ?? lineFeed;
+        }
+      }
+      if (digits === 0) return irregular;
+      if (byte === 101 || byte === 69) {
+        byte = bytes[++at] ?? lineFeed;
+        const shrinks = byte === minus;
+        if (shrinks || byte === plus) byte = bytes[++at] ?? lineFeed;
+        if (byte < zero || byte > nine) return irregular;
+        let power = 0;
+        while (byte >= zero && byte <= nine) {
+          power = power > 99_999 ? power : power * 10 + (byte - zero);
+          byte = bytes[++at] ?? lineFeed;
+        }
+        exponent += shrinks ? -power : power;
+      }
+      let value = mantissa;
+      if (!exact || exponent > 22 || exponent < -22) value = spelledOut(bytes, cellStart, at, layout.decimalComma);
+      else {
+        if (exponent > 0) value *= exactPowers[exponent]!;
+        else if (exponent < 0) value /= exactPowers[-exponent]!;
+        if (negative) value = -value;
+      }
+      if (value === Number.POSITIVE_INFINITY || value === Number.NEGATIVE_INFINITY) return irregular;
+      values[column]![row] = value;
+      const cellEnd = at;
+      while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
+      if (column < width - 1) {
+        if (byBlanks) {
+          if (at === cellEnd) return irregular;
+        } else {
+          if (byte !== separator) return irregular;
+          byte = bytes[++at] ?? lineFeed;
+          while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
+        }
+      }
+    }
+    if (byte === separator && !byBlanks) {
+      byte = bytes[++at] ?? lineFeed;
+      while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
+    }
+    if (byte !== lineFeed && byte !== carriageReturn) return irregular;
+    if (at - rowStart > limits.lineLength) return irregular;
+    at += byte === carriageReturn && bytes[at + 1] === lineFeed ? 2 : 1;
+    lines[row] = line++;
+    store.rows = row + 1;
+    if (row >= limits.rows) return irregular;
+    if (row % 16_384 === 16_383 && polling.stopped?.()) return { kind: "stopped" };
+  }
+  return { kind: "rows", store };
+}
+
+const irregular = { kind: "irregular" } as const;
+
+/** The number as JavaScript reads its text. */
+function spelledOut(bytes: Uint8Array, start: number, end: number, decimalComma: boolean): number {
+  const text = String.fromCharCode(...bytes.subarray(start, end));
+  return Number(decimalComma ? text.replace(",", ".") : text);
+}
+
+/** Rows to make room for, from the mean length of the first lines, and a twentieth more. */
+function expectedRows(bytes: Uint8Array, start: number): number {
+  const sample = bytes.subarray(start, start + 65_536);
+  let ends = 0;
+  for (const byte of sample) if (byte === lineFeed || byte === carriageReturn) ends++;
+  if (sample.length < 65_536) return ends + 1;
+  return ((bytes.length - start) / sample.length) * ends * 1.05;
+}
