@@ -48,7 +48,7 @@ function layered(layer, { status, why }, tallyFile) {
   };
   if (!existsSync(tallyFile)) {
     const running = existsSync(`${tallyFile}.running`) ? readFileSync(`${tallyFile}.running`, "utf8") : "none yet";
-    fault(`It did not come to an end: ${why || "no reason known"}. Last test started: ${running}`);
+    fault(`It did not come to an end: ${why || "it ended without a tally"}. Last test started: ${running}`);
   } else if (tally.passed + tally.failed === 0) fault("It held no test.");
   else if (status !== 0 && tally.failed === 0) fault(`All its tests passed, but then: ${why}`);
   return tally;

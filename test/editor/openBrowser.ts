@@ -11,6 +11,10 @@ export async function openBrowser(): Promise<Browser> {
     executablePath: await browserExecutable(),
     args: ["--no-sandbox", "--disable-gpu"],
     headless: true,
+    // A signal ends this process, and its end the browser; the driver alone would end the browser and let tests go on.
+    handleSIGINT: false,
+    handleSIGTERM: false,
+    handleSIGHUP: false,
     timeout: startLimit,
   });
 }

@@ -1,6 +1,6 @@
 // Starts the editor on a copy of the samples and runs the bundled tests in its extension host.
 // Arguments: the folder of the bundled tests, the file for the tally.
-import { cpSync } from "node:fs";
+import { cpSync, existsSync } from "node:fs";
 import { join } from "node:path";
 import { projectFolder } from "../editor/projectFolder.js";
 import { runTests } from "../editor/runTests.js";
@@ -19,6 +19,8 @@ try {
     workspace: workspace.path,
     extensionTestsEnv: { RATEWRIGHT_TALLY: tallyFile },
   });
+  // An extension host that dies takes the exit code along: the editor may then say 0.
+  if (!existsSync(tallyFile)) throw new Error("the extension host ended before its tests did");
 } finally {
   workspace.remove();
 }
