@@ -41,7 +41,10 @@ function expReduced(high: number, low: number, k: number): number {
         t *
           (-0.0027777777777015593 +
             t * (6.613756321437934e-5 + t * (-1.6533902205465252e-6 + t * 4.1381367970572385e-8))));
-  return scaleByPower(1 - (low - (r * c) / (2 - c) - high), k);
+  // 1 + r with its rounding error, so that only the last addition rounds
+  const sum = 1 + r;
+  const rest = r - (sum - 1) + ((r * c) / (2 - c) + (high - r - low));
+  return scaleByPower(sum + rest, k);
 }
 
 /** e^x; 0 and +∞ beyond the range of a double. */

@@ -42,12 +42,13 @@ export function gridSearch(work: Projection, most: number, options: LeastSquares
   return minima.slice(0, most).map((index) => ({ theta: at(index), sumOfSquares: sums[index]! }));
 }
 
-/** The trial values inside the bounds; the nearest bound where none is. */
-function gridWithin(parameter: SeparableModel["nonlinear"][number]): number[] {
+/** The finite trial values inside the bounds; the nearest bound where none is. Never empty. */
+export function gridWithin(parameter: SeparableModel["nonlinear"][number]): number[] {
   const { low, high, grid } = parameter;
-  const inside = grid.filter((value) => value >= low && value <= high);
+  const trials = grid.filter(Number.isFinite);
+  const inside = trials.filter((value) => value >= low && value <= high);
   if (inside.length > 0) return inside;
-  const first = grid[0] ?? (Number.isFinite(low) ? low : Number.isFinite(high) ? high : 0);
+  const first = trials[0] ?? (Number.isFinite(low) ? low : Number.isFinite(high) ? high : 0);
   return [Math.min(Math.max(first, low), high)];
 }
 

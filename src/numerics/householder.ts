@@ -58,11 +58,14 @@ export function applyReflector(f: Factorisation, k: number, b: Float64Array): vo
   for (let i = k; i < n; i++) b[i]! -= s * v[i]!;
 }
 
+/** A column shorter than this counts as 0: the square of its length is no longer a double. */
+const negligible = 1e-150;
+
 /** Makes reflector k from rows k … n−1 of column k, to which reflectors 0 … k−1 were already applied. */
 export function makeReflector(f: Factorisation, k: number): void {
   const v = f.columns[k]!;
   const length = norm(v, k, f.rows);
-  if (length === 0) {
+  if (length < negligible) {
     f.diagonal[k] = 0;
     f.scale[k] = 0;
     return;

@@ -1,5 +1,5 @@
 import { type Descent, descend } from "./descent.js";
-import { evenlySpread, gridSearch } from "./gridSearch.js";
+import { evenlySpread, gridSearch, gridWithin } from "./gridSearch.js";
 import { independence, inverseOfSquare, scaledCondition } from "./householder.js";
 import type { LeastSquaresFit, LeastSquaresOptions, SeparableModel, StopReason } from "./separableModel.js";
 import { type Projection, project, projection, standsAt } from "./variableProjection.js";
@@ -58,7 +58,7 @@ function search(
     if (best?.end === "stopped") break;
   }
   if (best === null) {
-    const theta = Float64Array.from(model.nonlinear, ({ grid, low }) => grid[0] ?? low);
+    const theta = Float64Array.from(model.nonlinear, (parameter) => gridWithin(parameter)[0]!);
     const end = options.stopped?.() ? "stopped" : "limit";
     return { theta, sumOfSquares: Number.POSITIVE_INFINITY, offset: Number.POSITIVE_INFINITY, end, iterations };
   }
