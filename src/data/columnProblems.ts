@@ -17,23 +17,34 @@ export function cellProblems(columns: Columns, column: number, file: string, ori
     if (known === undefined) kinds.set(kind, { first: cell, count: 1 });
     else known.count++;
   }
-  return Array.from(kinds, ([kind, { first, count }]): Problem => {
+  return Array.from(kinds, ([kind, { first, count }]) => {
     const place = { file, line: columns.lines[first.row] ?? 1, header };
-    switch (kind) {
-      case "empty":
-        return problem("data-cell-empty", { ...place, count }, origin);
-      case "short":
-        return problem("data-row-short", { ...place, count }, origin);
-      case "thousands":
-        return problem("data-thousands-mark", { ...place, text: first.text }, origin);
-      case "other mark":
-        return columns.decimalComma
-          ? problem("data-decimal-point", { ...place, text: first.text }, origin)
-          : problem("data-decimal-comma", { ...place, text: first.text }, origin);
-      case "word":
-        return problem("data-cell-word", { ...place, text: first.text, count }, origin);
-    }
+    return inWords(kind, { ...place, text: first.text, count }, columns.decimalComma, origin);
   });
+}
+
+interface Place {
+  readonly file: string;
+  readonly line: number;
+  readonly header: string;
+  readonly text: string;
+  readonly count: number;
+}
+
+function inWords(kind: Kind, place: Place, decimalComma: boolean, origin: Origin): Problem {
+  const { text, count, ...where } = place;
+  switch (kind) {
+    case "empty":
+      return problem("data-cell-empty", { ...where, count }, origin);
+    case "short":
+      return problem("data-row-short", { ...where, count }, origin);
+    case "thousands":
+      return problem("data-thousands-mark", { ...where, text }, origin);
+    case "other mark":
+      return problem(decimalComma ? "data-decimal-point" : "data-decimal-comma", { ...where, text }, origin);
+    case "word":
+      return problem("data-cell-word", { ...where, text, count }, origin);
+  }
 }
 
 type Kind = "empty" | "short" | ReturnType<typeof wordKind>;

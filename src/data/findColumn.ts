@@ -1,4 +1,4 @@
-import { type Mend, type Origin, type Problem, problem, replacement } from "../contract/problem.js";
+import { type Origin, type Problem, problem, replacement } from "../contract/problem.js";
 import { failure, type Result, success } from "../contract/result.js";
 import { nearest } from "../quantity/nearest.js";
 import type { Columns } from "./columns.js";
@@ -36,11 +36,17 @@ function withRows(columns: Columns, index: number, file: string, origin: Origin)
 
 function missing(columns: Columns, wanted: string, file: string, line: number, origin: Origin): Problem {
   const headers = columns.columns.map((column) => column.header).filter((header) => header !== "");
-  const near = nearest(loose(wanted), headers.map(loose));
-  const likely = headers.find((header) => loose(header) === near);
-  const mend: Mend[] = likely === undefined || likely.includes('"') ? [] : [replacement(origin, `"${likely}"`)];
+  const mend = likely(wanted, headers).map((header) => replacement(origin, `"${header}"`));
   const args = { file, header: wanted, headers: listed(headers.map((header) => `“${header}”`)), line };
   return problem("data-column-missing", args, origin, mend);
+}
+
+/** Headers that may be meant: those a slip or two away, then those that go on where `wanted` ends (`t`, `t / s`). */
+function likely(wanted: string, headers: readonly string[]): string[] {
+  const plain = headers.filter((header) => !/["\n]/.test(header));
+  const near = nearest(loose(wanted), plain.map(loose));
+  const longer = plain.filter((header) => wanted !== "" && loose(header).startsWith(`${loose(wanted)} `));
+  return [...new Set([...plain.filter((header) => near.includes(loose(header))), ...longer])].slice(0, 3);
 }
 
 function indicesWhere(columns: Columns, holds: (header: string) => boolean): number[] {

@@ -4,6 +4,7 @@ import { type DataRefusal, type Limits, refused } from "./dataOptions.js";
 import { numberOf } from "./numberCell.js";
 import { addFault, makeRoom, type RowStore, rowStore } from "./rowStore.js";
 import type { TableLayout } from "./tableLayout.js";
+import { linesFrom } from "./textLines.js";
 
 export type BodyReading =
   | { readonly kind: "rows"; readonly store: RowStore }
@@ -75,14 +76,13 @@ function lineEndsIn(cells: readonly string[]): number {
   return count;
 }
 
-/** The first line after line `after`, both from 1, that holds a quote: where the record that never ends begins. */
+/** The first line after line `after`, both from 1, that holds a quote and is no comment: there the open record begins. */
 function quoteLineAfter(body: string, after: number): number {
-  let start = 0;
-  for (let passed = 0; passed < after; passed++) start = body.indexOf("\n", start) + 1;
-  let line = after + 1;
-  const quote = body.indexOf('"', start);
-  for (let at = body.indexOf("\n", start); at >= 0 && at < quote; at = body.indexOf("\n", at + 1)) line++;
-  return line;
+  for (const { number, start, end } of linesFrom(body, 0, 1)) {
+    const content = number > after ? body.slice(start, end) : "";
+    if (content.includes('"') && !/^\s*#/.test(content)) return number;
+  }
+  return after + 1;
 }
 
 /** The first line longer than `limit`, from 1; null where there is none. */

@@ -6,6 +6,8 @@ import { lookOf } from "./numberCell.js";
  */
 export interface LineLook {
   readonly kind: "data" | "mixed" | "text";
+  /** cells */
+  readonly count: number;
   /** cells, without empty ones at the end */
   readonly width: number;
   /** cells with a decimal comma and with a decimal point */
@@ -13,7 +15,7 @@ export interface LineLook {
   readonly points: number;
 }
 
-const textLine: LineLook = { kind: "text", width: 0, commas: 0, points: 0 };
+const textLine: LineLook = { kind: "text", count: 0, width: 0, commas: 0, points: 0 };
 
 /** Looks at a line; stops at the first sign of a text, and counts one with more than `maximumCells` as such. */
 export function lineLook(line: string, delimiter: string, maximumCells: number): LineLook {
@@ -36,7 +38,7 @@ export function lineLook(line: string, delimiter: string, maximumCells: number):
     if (cell !== "") width = count;
   }
   if (readings === 0) return textLine;
-  return { kind: words > 0 ? "mixed" : "data", width, commas, points };
+  return { kind: words > 0 ? "mixed" : "data", count, width, commas, points };
 }
 
 /**

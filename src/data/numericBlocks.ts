@@ -126,14 +126,18 @@ interface GrowingBlock {
   readonly looks: LineLook[];
 }
 
-/** The width that most rows of numbers alone have; the larger of two equally frequent. */
+/**
+ * The number of cells that most rows of numbers alone have, the larger of two equally frequent; without those at the
+ * end that are empty in all of these rows (a separator at the end of each row).
+ */
 function usualWidth(looks: readonly LineLook[]): number {
+  const rows = looks.filter((look) => look.kind === "data");
   const counts = new Map<number, number>();
-  for (const look of looks) if (look.kind === "data") counts.set(look.width, (counts.get(look.width) ?? 0) + 1);
-  let best = 1;
+  for (const { count } of rows) counts.set(count, (counts.get(count) ?? 0) + 1);
+  let usual = 1;
   let most = 0;
-  for (const [width, count] of counts) {
-    if (count > most || (count === most && width > best)) [best, most] = [width, count];
+  for (const [count, times] of counts) {
+    if (times > most || (times === most && count > usual)) [usual, most] = [count, times];
   }
-  return best;
+  return Math.max(1, ...rows.filter((look) => look.count === usual).map((look) => look.width));
 }

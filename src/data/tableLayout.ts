@@ -32,7 +32,7 @@ export function tableLayout(
   limits: Limits,
   readUnit: HeaderUnitReader,
 ): TableLayout | DataRefusal | { readonly kind: "stopped" } {
-  const delimiters = options.delimiter === undefined ? usualDelimiters : [statedDelimiter(options.delimiter)];
+  const delimiters = usableDelimiter(options.delimiter);
   const collected = collectBlocks(text, options, delimiters, limits);
   if (collected.kind !== "blocks") return collected;
   if (collected.firstLine === null) return refused("data-empty", {});
@@ -63,6 +63,11 @@ export function tableLayout(
 }
 
 const usualDelimiters = ["\t", ";", ",", " "];
+
+/** The stated delimiter alone, or the usual ones where none is stated that could stand between cells. */
+function usableDelimiter(stated: string | undefined): readonly string[] {
+  return stated === undefined || stated === "" || /["\r\n]/.test(stated) ? usualDelimiters : [statedDelimiter(stated)];
+}
 
 /** `tab` and `space` are understood as words, because neither can be seen in a description. */
 function statedDelimiter(delimiter: string): string {
