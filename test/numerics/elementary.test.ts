@@ -34,9 +34,10 @@ describe("sealed elementary functions", () => {
     }
   });
 
-  it("give the nearest double for powers and logarithms to base 10", () => {
+  it("give the nearest double for exponentials, powers and logarithms to base 10", () => {
     for (const [name, args, exact] of nearestDoubles) {
-      if (name === "pow" || name === "log10") assert.equal(functions[name]!(...args), exact, `${name}(${args})`);
+      if (!name.startsWith("log") || name === "log10")
+        assert.equal(functions[name]!(...args), exact, `${name}(${args})`);
     }
   });
 
@@ -73,7 +74,7 @@ describe("sealed elementary functions", () => {
       }
       digest = BigInt.asUintN(64, digest * 1099511628211n + order(sealed.pow(y, x / 10)));
     }
-    assert.equal(digest.toString(16), "cc674a0cbd45bcf9");
+    assert.equal(digest.toString(16), "57308c2e852bb42f");
   });
 
   it("are exact for integer powers and powers of ten", () => {
@@ -92,7 +93,8 @@ describe("sealed elementary functions", () => {
     const special = [0, -0, 1, -1, 0.5, 2, -2, 3, -3, 1e308, -1e308, 5e-324, Infinity, -Infinity, NaN];
     for (const x of special) {
       assert.equal(sealed.exp(x), Math.exp(x), `exp ${x}`);
-      assert.equal(sealed.expm1(x), Math.expm1(x), `expm1 ${x}`);
+      const [less, engineLess] = [sealed.expm1(x), Math.expm1(x)];
+      assert.ok(Object.is(less, engineLess) || unitsApart(less, engineLess) <= 1, `expm1 ${x}`);
       assert.equal(sealed.log1p(x), Math.log1p(x), `log1p ${x}`);
       assert.equal(sealed.log(x), Math.log(x), `log ${x}`);
       for (const y of special) {
