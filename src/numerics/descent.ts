@@ -90,7 +90,8 @@ export function descend(
     chooseMoving(here, model.nonlinear, map, moving);
     updateScaling(here, map, scaling, moving);
     const offset = relativeOffset(here, work, moving, region, p);
-    const rounding = 1e-13 * here.sumOfSquares + 1e-15 * work.size * Math.sqrt(here.sumOfSquares);
+    const rounding =
+      5e-15 * Math.sqrt(work.used) * here.sumOfSquares + 1e-15 * work.size * Math.sqrt(here.sumOfSquares);
     const floor = 4e-32 * work.size * work.size * work.used;
     stale = offset > 0.95 * best.offset ? stale + 1 : 0;
     // below the rounding of the sum of squares the offset decides which point is better
@@ -117,7 +118,7 @@ export function descend(
       trial[m] = to;
       if (to !== here.theta[m]) moved = true;
     }
-    if (!moved) return finish(offset <= 1e-5 ? "converged" : "limit");
+    if (!moved) return finish(stationary(offset));
     predicted = promised(here, moving, region, p === 1 ? curvature : 1);
 
     const before = here.sumOfSquares;
@@ -126,7 +127,7 @@ export function descend(
     const length = stepLength(region, moving);
     let accepted: boolean;
     if (Math.abs(predicted) <= rounding) {
-      if (stale >= 4) return finish("converged");
+      if (stale >= 4) return finish(stationary(best.offset));
       accepted = after <= before + 100 * rounding;
       if (!accepted) radius = 0.25 * length;
     } else {
@@ -140,9 +141,14 @@ export function descend(
       keep(here, work, trial);
     } else {
       curvature = 1;
-      if (radius <= 1e-16 * scaledSize(here, map, scaling)) return finish(offset <= 1e-5 ? "converged" : "limit");
+      if (radius <= 1e-16 * scaledSize(here, map, scaling)) return finish(stationary(offset));
     }
   }
+}
+
+/** Where no step makes the sum of squares fall any more, only a small offset is a minimum. */
+function stationary(offset: number): "converged" | "limit" {
+  return offset <= 1e-5 ? "converged" : "limit";
 }
 
 /** Leaves out the parameters on a bound that the descent direction would push further out. */
@@ -263,5 +269,5 @@ function secant(
   const slope = work.reduced[0]![0]!;
   const gradient = slope * work.projected[0]!;
   const ratio = -(gradient - gradientBefore) / (trial[m]! - here.theta[m]!) / (slope * slope);
-  return ratio > 0.2 && ratio < 5 ? ratio : 1;
+  return ratio > 0.02 && ratio < 50 ? ratio : 1;
 }

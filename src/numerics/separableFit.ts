@@ -132,7 +132,8 @@ function describe(work: Projection, found: Descent, estimated: readonly boolean[
   const freedom = work.used - free.length;
   let singular = !finite || work.deficient || freedom < 0;
   for (let k = 0; k < count && !singular; k++) singular = !(independence(work.qr, k) > undetermined);
-  for (let k = 0; k < work.nonlinearCount && !singular; k++) singular = without(work, work.linearCount + k, k, found);
+  for (let k = 0; k < work.nonlinearCount && !singular; k++)
+    singular = without(work, work.linearCount + k, k, found, freedom);
   const covariance = singular ? null : inverseOfSquare(work.qr, count);
   const condition = singular ? null : scaledCondition(work.qr, count);
   if (covariance === null) singular = true;
@@ -165,12 +166,18 @@ function describe(work: Projection, found: Descent, estimated: readonly boolean[
   };
 }
 
-/** True where a nonlinear parameter acts on the fit by no more than rounding, however far it is moved over its scale. */
-function without(work: Projection, column: number, k: number, found: Descent): boolean {
+/**
+ * True where a nonlinear parameter acts on the fit by no more than rounding, or by less than a millionth of the scatter,
+ * when it is moved over its whole scale: the observations then say nothing about it.
+ */
+function without(work: Projection, column: number, k: number, found: Descent, freedom: number): boolean {
   const m = work.nonlinearFree[k]!;
   let scale = Math.abs(found.theta[m]!);
-  for (const value of work.model.nonlinear[m]!.grid) scale = Math.max(scale, Math.abs(value));
-  return !(Math.abs(work.qr.diagonal[column]!) * scale > 1e-13 * work.size);
+  for (const value of work.model.nonlinear[m]!.grid)
+    if (Number.isFinite(value)) scale = Math.max(scale, Math.abs(value));
+  const effect = Math.abs(work.qr.diagonal[column]!) * scale;
+  if (scale === 0) return false;
+  return !(effect > 1e-13 * work.size && effect > 1e-6 * Math.sqrt(work.sumOfSquares / Math.max(1, freedom)));
 }
 
 function fill(work: Projection, fitted: Float64Array, residuals: Float64Array): void {

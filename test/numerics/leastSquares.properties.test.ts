@@ -35,6 +35,33 @@ describe("least squares: properties", () => {
     assert.ok(profile >= 367 && profile <= 393, `profile interval: ${profile} of ${repeats}`);
   });
 
+  it("never calls converged what a dense scan of k beats", () => {
+    const random = seededRandom(82);
+    let converged = 0;
+    for (let repeat = 0; repeat < 120; repeat++) {
+      const n = 4 + random.integer(30);
+      const t = times(n, n - 1);
+      const u = Math.exp(-8 + 8 * random.uniform());
+      const k = Math.exp(-4 + 8 * random.uniform()) / (n - 1);
+      const [a, b] = [5 * random.normal(), 5 * random.normal()];
+      const y = t.map((time) => a + (b - a) * (1 - Math.exp(-k * time)) + u * random.normal());
+      const weights = repeat % 3 === 0 ? t.map(() => Math.exp(random.normal())) : null;
+      const start = { fixed: repeat % 2 === 0 ? null : a, low: -Infinity, high: Infinity };
+      const model = firstOrder(t, { start, low: 1e-9, high: 100 });
+      const fit = fitLeastSquares(y, weights, model);
+      assert.notEqual(fit.stop, "limit");
+      if (fit.stop === "singular") continue;
+      converged++;
+      assert.ok(fit.offset < 1e-5);
+      for (let i = 0; i < 200; i++) {
+        const fixed = 1e-6 * 10 ** (i / 25);
+        const scan = fitLeastSquares(y, weights, firstOrder(t, { start, low: fixed, high: fixed }));
+        assert.ok(scan.chiSquare >= fit.chiSquare * (1 - 1e-6), `repeat ${repeat}: better at k = ${fixed}`);
+      }
+    }
+    assert.ok(converged > 100);
+  });
+
   it("follows the units of signal and time", () => {
     const scale = fc.integer({ min: -12, max: 12 }).map((power) => 10 ** power);
     fc.assert(
