@@ -2,7 +2,8 @@ import { mkdirSync } from "node:fs";
 import { join } from "node:path";
 import { projectFolder } from "../editor/projectFolder.js";
 import type { Session } from "./session.js";
-import { changeTheme, type ThemeKind, themes } from "./theme.js";
+import { changeTheme } from "./theme.js";
+import { type ThemeKind, themes } from "./themes.js";
 
 /** Takes a picture of the whole window to `artefacts/NAME.png` and answers with its path. */
 export async function takePicture({ page }: Session, name: string): Promise<string> {

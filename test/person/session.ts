@@ -9,6 +9,7 @@ import { openBrowser } from "../editor/openBrowser.js";
 import { projectFolder } from "../editor/projectFolder.js";
 import { temporaryFolder } from "../editor/temporaryFolder.js";
 import { withDeadline } from "../editor/withDeadline.js";
+import { type ThemeKind, themes } from "./themes.js";
 import { answerTrust } from "./trust.js";
 
 /** Time the editor may take until its files are listed, ms; installing it is part of it the first time. */
@@ -38,6 +39,8 @@ export interface SessionOptions {
   host?: "node" | "web";
   /** Whether the person says yes to "Do you trust the authors"; no means Restricted Mode. Yes unless told. */
   trust?: boolean;
+  /** Theme at the start; light unless told. */
+  theme?: ThemeKind;
   settings?: { [name: string]: unknown };
   /** Size of the window, px; 1280 by 800 unless told. */
   size?: { width: number; height: number };
@@ -61,7 +64,9 @@ export async function openSession(options: SessionOptions = {}): Promise<Session
   const root = projectFolder();
   const cleanup = createCleanup();
   const host = options.host ?? "node";
-  const always = host === "web" ? { ...calm, "remote.extensionKind": { "ratewright.ratewright": ["web"] } } : calm;
+  const theme = themes[options.theme ?? "light"];
+  const kind = host === "web" ? { "remote.extensionKind": { "ratewright.ratewright": ["web"] } } : {};
+  const always = { ...calm, ...kind, "workbench.colorTheme": theme.name };
   try {
     const copies = temporaryFolder("person");
     cleanup.add("removal of the copied samples", copies.remove);
@@ -84,6 +89,7 @@ export async function openSession(options: SessionOptions = {}): Promise<Session
     const extensionDevelopmentPath = options.extension ?? process.env["RATEWRIGHT_EXTENSION"] ?? root;
     await page.goto(editorAddress(server.port, { workspace, extensionDevelopmentPath }));
     await answerTrust(page, options.trust ?? true);
+    await page.locator(`.monaco-workbench.${theme.mark}`).waitFor({ state: "attached" });
     return {
       page,
       workspace,

@@ -1,14 +1,5 @@
 import type { Session } from "./session.js";
-
-/** The four kinds of themes, each with the editor's own theme of that kind and the class its page then carries. */
-export const themes = {
-  light: { name: "Default Light Modern", mark: "vs" },
-  dark: { name: "Default Dark Modern", mark: "vs-dark" },
-  "high-contrast": { name: "Default High Contrast", mark: "hc-black" },
-  "high-contrast-light": { name: "Default High Contrast Light", mark: "hc-light" },
-} as const;
-
-export type ThemeKind = keyof typeof themes;
+import { type ThemeKind, themes } from "./themes.js";
 
 /** Changes the theme by the setting and waits until the page has it. */
 export async function changeTheme(session: Session, kind: ThemeKind): Promise<void> {
