@@ -67,7 +67,7 @@ function readSide(text: string, plain: string, side: Span, isDeclared: (name: st
     let next: number;
     if (isFault(term)) {
       faults.push(term);
-      next = afterFault(plain, Math.max(at, term.span.end), side.end);
+      next = plain.charAt(at) === "+" ? at : afterFault(plain, Math.max(at, term.span.end), side.end);
     } else {
       terms.push(term);
       next = pastSpaces(plain, term.span.end, side.end);

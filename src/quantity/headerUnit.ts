@@ -18,6 +18,7 @@ export interface HeaderUnit {
  */
 export function parseHeaderUnit(header: string): HeaderUnit {
   const text = header.trim();
+  if (text.length > 300) return { name: text, unit: null, unread: null };
   const spaced = /^(.*?\S)(?:\s+\/\s*|\s*\/\s+)(\S.*)$/.exec(text);
   if (spaced !== null) return stated(spaced[1] ?? "", inBrackets(spaced[2] ?? ""));
   const bracketed = /^(.*?\S)\s*(\((?:[^()]|\([^()]*\))*\)|\[[^[\]]*\])$/.exec(text);

@@ -1,15 +1,15 @@
 /**
  * The words of `known` that `word` may have been meant to be, nearest first, at most `limit`: those that differ in
- * case only, then those one slip away (two for words of six letters and more); none where nothing is near.
+ * case only, or else those one slip away (two for words of six letters and more); none where nothing is near.
  */
 export function nearest(word: string, known: readonly string[], limit = 2): string[] {
   const allowed = word.length < 3 ? 1 : word.length < 6 ? 1.5 : 2.5;
-  return known
+  const near = known
     .map((candidate, index) => ({ candidate, index, away: slips(word, candidate) }))
     .filter(({ away, candidate }) => away <= allowed && away < candidate.length)
-    .sort((a, b) => a.away - b.away || a.index - b.index)
-    .slice(0, limit)
-    .map(({ candidate }) => candidate);
+    .sort((a, b) => a.away - b.away || a.index - b.index);
+  const caseOnly = near.filter(({ away }) => away < 1);
+  return (caseOnly.length > 0 ? caseOnly : near).slice(0, limit).map(({ candidate }) => candidate);
 }
 
 /** Letters added, left out, changed or swapped with the next; a change of case counts a quarter. */

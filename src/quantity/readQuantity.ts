@@ -65,7 +65,7 @@ function withUnit(text: string, head: Head, from: number, sourceName: string): R
   }
   const rest = text.slice(begin);
   const next = sign.exec(rest);
-  const by = /(?<![A-Za-z]) by +(mass|amount|volume) *$/.exec(next === null ? rest : rest.slice(0, next.index));
+  const by = / by +(mass|amount|volume) *$/.exec(next === null ? rest : rest.slice(0, next.index));
   const unitEnd = begin + (by?.index ?? next?.index ?? rest.length);
   const unitText = text.slice(begin, unitEnd);
   const read = unitText.trim() === "" ? { unit: noUnit } : readUnit(unitText);
