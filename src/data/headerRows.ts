@@ -1,6 +1,7 @@
 import type { Unit } from "../quantity/unit.js";
 import { literalCells, singleRecord } from "./csvRecords.js";
 import { isBlankLine, lineLook } from "./lineLook.js";
+import { lookOf } from "./numberCell.js";
 import type { TextLine } from "./textLines.js";
 
 /** Splits a header cell into the name and the unit it states. */
@@ -20,8 +21,9 @@ export interface HeaderRows {
 
 /**
  * The header above the body of a table: the last row before it, or the last but one where the last holds nothing but
- * units. `before` are the lines above the body, at most some dozens, in order. Null where there is none, or where a
- * single cell stands over a body of several columns (a title, not a header).
+ * units. `before` are the lines above the body, at most some dozens, in order. Rows that begin with a number are rows of
+ * the body whatever else they hold; `start` is the line of the first of them, null where there is none. `rows` is null
+ * where no header is found, or where a single cell stands over a body of several columns (a title, not a header).
  */
 export function headerAbove(
   text: string,
@@ -29,17 +31,27 @@ export function headerAbove(
   delimiter: string,
   width: number,
   readUnit: HeaderUnitReader,
-): HeaderRows | null {
-  const last = recordUpTo(text, before, before.length, delimiter, width);
-  if (last === null || (last.cells.length < 2 && width > 1)) return null;
+): { readonly rows: HeaderRows | null; readonly start: TextLine | null } {
+  let start: TextLine | null = null;
+  let last = recordUpTo(text, before, before.length, delimiter, width);
+  while (last !== null && last.cells.length >= Math.min(2, width) && beginsWithReading(last.cells)) {
+    start = before[last.first] ?? start;
+    last = recordUpTo(text, before, last.first, delimiter, width);
+  }
+  if (last === null || (last.cells.length < 2 && width > 1)) return { rows: null, start };
   const above = recordUpTo(text, before, last.first, delimiter, width);
   if (above?.adjacent && isUnitsUnder(above.cells, last.cells, delimiter, width, readUnit)) {
-    return { headers: above.cells, units: last.cells, line: lineNumber(before, above.first) };
+    return { rows: { headers: above.cells, units: last.cells, line: lineNumber(before, above.first) }, start };
   }
-  return { headers: last.cells, units: null, line: lineNumber(before, last.first) };
+  return { rows: { headers: last.cells, units: null, line: lineNumber(before, last.first) }, start };
 }
 
-/** The header row that begins with line `from` of `lines`, for files whose header line is stated. */
+function beginsWithReading(cells: readonly string[]): boolean {
+  const { kind } = lookOf(cells[0] ?? "");
+  return kind === "number" || kind === "time";
+}
+
+/** The header row that begins with the first of `lines`; `next` is the index of the line below it and its row of units. */
 export function headerAt(
   text: string,
   lines: readonly TextLine[],

@@ -1,8 +1,8 @@
 import type { Polling } from "../contract/polling.js";
+import { addRow } from "./addRow.js";
 import { eachRecord, type RecordsEnd } from "./csvRecords.js";
 import { type DataRefusal, type Limits, refused } from "./dataOptions.js";
-import { numberOf } from "./numberCell.js";
-import { addFault, makeRoom, type RowStore, rowStore } from "./rowStore.js";
+import { type RowStore, rowStore } from "./rowStore.js";
 import type { TableLayout } from "./tableLayout.js";
 import { linesFrom } from "./textLines.js";
 
@@ -47,24 +47,6 @@ function outcome(end: RecordsEnd, store: RowStore, body: string, line: (inBody: 
     case "stray quote":
       return refused("data-quote-stray", { line: line(end.line) });
   }
-}
-
-function addRow(store: RowStore, cells: readonly string[], decimalComma: boolean, line: number): void {
-  makeRoom(store);
-  const { width, rows, values } = store;
-  let count = cells.length;
-  while (count > width && cells[count - 1] === "") count--;
-  for (let column = 0; column < width; column++) {
-    const cell = cells[column];
-    const value = cell === undefined ? null : numberOf(cell, decimalComma);
-    values[column]![rows] = value ?? Number.NaN;
-    if (value === null && cell !== undefined)
-      addFault(store, cell.trim() === "" ? "empty" : "word", column, cell.trim());
-  }
-  if (count < width) addFault(store, "short", count, "");
-  if (count > width) addFault(store, "long", width, cells[width] ?? "");
-  store.lines[rows] = line;
-  store.rows++;
 }
 
 /** Line ends inside quoted cells: a record with them begins that many lines above the one it ends on. */

@@ -1,12 +1,10 @@
 import type { Polling } from "../contract/polling.js";
 import type { Limits } from "./dataOptions.js";
+import { addOddRow, type OddRowLayout } from "./oddRow.js";
 import { makeRoom, type RowStore, rowStore } from "./rowStore.js";
 
 /** What the byte loop needs to know of the layout. */
-export interface PlainLayout {
-  /** one character; a blank means any run of blanks */
-  readonly delimiter: string;
-  readonly decimalComma: boolean;
+export interface PlainLayout extends OddRowLayout {
   readonly width: number;
   /** the line the body begins on, from 1 */
   readonly bodyLine: number;
@@ -14,7 +12,7 @@ export interface PlainLayout {
 
 export type PlainReading =
   | { readonly kind: "rows"; readonly store: RowStore }
-  /** something else than plain numbers: the body is for csv-parse */
+  /** quotes, another encoding, beyond a limit: the body is for csv-parse */
   | { readonly kind: "irregular" }
   | { readonly kind: "stopped" };
 
@@ -38,9 +36,10 @@ const exactPowers = [
 const roomForDigit = 900_719_925_474_098;
 
 /**
- * The rows of a body that is nothing but numbers, `width` in every row, read byte by byte; blank lines and blanks
- * around cells are allowed, and one separator at the end of a row. Anything else makes it "irregular", and so does a
- * body beyond the limits: csv-parse then reads it from the start and says what it is. A test keeps the two equal.
+ * The rows of a body of numbers, `width` in every row, read byte by byte; blank lines and blanks around cells are
+ * allowed, and one separator at the end of a row. A line of another kind is taken by itself as long as it has no quotes
+ * (see `addOddRow`). Anything else makes the body "irregular", and so does one beyond the limits: csv-parse then reads
+ * it from the start and says what it is. A test keeps the two equal.
  *
  * A number of at most 53 bits times or over an exact power of ten is one correctly rounded operation, hence the double
  * that JavaScript reads from the same digits (W. D. Clinger, How to read floating point numbers accurately, 1990,
@@ -78,6 +77,7 @@ export function plainBody(
       values = store.values;
       lines = store.lines;
     }
+    let regular = true;
     for (let column = 0; column < width; column++) {
       const cellStart = at;
       const negative = byte === minus;
@@ -102,12 +102,18 @@ export function plainBody(
           byte = bytes[++at] ?? lineFeed;
         }
       }
-      if (digits === 0) return irregular;
+      if (digits === 0) {
+        regular = false;
+        break;
+      }
       if (byte === 101 || byte === 69) {
         byte = bytes[++at] ?? lineFeed;
         const shrinks = byte === minus;
         if (shrinks || byte === plus) byte = bytes[++at] ?? lineFeed;
-        if (byte < zero || byte > nine) return irregular;
+        if (byte < zero || byte > nine) {
+          regular = false;
+          break;
+        }
         let power = 0;
         while (byte >= zero && byte <= nine) {
           power = power > 99_999 ? power : power * 10 + (byte - zero);
@@ -122,36 +128,56 @@ export function plainBody(
         else if (exponent < 0) value /= exactPowers[-exponent]!;
         if (negative) value = -value;
       }
-      if (value === Number.POSITIVE_INFINITY || value === Number.NEGATIVE_INFINITY) return irregular;
+      if (value === Number.POSITIVE_INFINITY || value === Number.NEGATIVE_INFINITY) {
+        regular = false;
+        break;
+      }
       values[column]![row] = value;
       const cellEnd = at;
       while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
       if (column < width - 1) {
         if (byBlanks) {
-          if (at === cellEnd) return irregular;
+          if (at === cellEnd) {
+            regular = false;
+            break;
+          }
         } else {
-          if (byte !== separator) return irregular;
+          if (byte !== separator) {
+            regular = false;
+            break;
+          }
           byte = bytes[++at] ?? lineFeed;
           while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
         }
       }
     }
-    if (byte === separator && !byBlanks) {
+    if (regular && byte === separator && !byBlanks) {
       byte = bytes[++at] ?? lineFeed;
       while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
     }
-    if (byte !== lineFeed && byte !== carriageReturn) return irregular;
-    if (at - rowStart > limits.lineLength) return irregular;
+    if (regular && (byte === lineFeed || byte === carriageReturn)) {
+      lines[row] = line;
+      store.rows = row + 1;
+    } else {
+      at = lineEnd(bytes, rowStart);
+      if (!addOddRow(store, bytes.subarray(rowStart, at), layout, line)) return irregular;
+      byte = bytes[at] ?? lineFeed;
+    }
+    if (at - rowStart > limits.lineLength || store.rows > limits.rows) return irregular;
     at += byte === carriageReturn && bytes[at + 1] === lineFeed ? 2 : 1;
-    lines[row] = line++;
-    store.rows = row + 1;
-    if (row >= limits.rows) return irregular;
-    if (row % 16_384 === 16_383 && polling.stopped?.()) return { kind: "stopped" };
+    line++;
+    if (line % 16_384 === 0 && polling.stopped?.()) return { kind: "stopped" };
   }
   return { kind: "rows", store };
 }
 
 const irregular = { kind: "irregular" } as const;
+
+function lineEnd(bytes: Uint8Array, start: number): number {
+  let at = start;
+  while (at < bytes.length && bytes[at] !== lineFeed && bytes[at] !== carriageReturn) at++;
+  return at;
+}
 
 /** The number as JavaScript reads its text. */
 function spelledOut(bytes: Uint8Array, start: number, end: number, decimalComma: boolean): number {

@@ -17,6 +17,8 @@ export interface TableLayout {
   readonly bodyLine: number;
   /** false where no row of numbers was found, so that only csv-parse can say what the rows are */
   readonly numeric: boolean;
+  /** whether the decimal mark is stated, shown by the first rows, or cannot be a comma */
+  readonly markCertain: boolean;
   /** whether the text up to here decided it, so that more text would change nothing but the decimal mark */
   readonly settled: boolean;
 }
@@ -38,14 +40,19 @@ export function tableLayout(
   if (collected.firstLine === null) return refused("data-empty", {});
   const tables = collected.blocks.map((blocks, index) => bestTable(text, blocks, delimiters[index] ?? ",", readUnit));
   const best = tables.filter((table) => table !== null).reduce<Table | null>(better, null);
+  const stated = options.skip !== undefined;
   const found =
-    best === null || options.skip !== undefined
-      ? statedLayout(text, collected.firstLine, best, delimiters, readUnit)
-      : best;
+    best === null
+      ? wordLayout(text, collected.firstLine, delimiters, stated, readUnit)
+      : stated
+        ? statedLayout(text, collected.firstLine, best, readUnit)
+        : best;
   const width = Math.max(found.header?.headers.length ?? 0, found.block?.width ?? 0, 1);
   if (width > limits.columns) {
     return refused("data-too-many-columns", { line: found.header?.line ?? found.start.number, limit: limits.columns });
   }
+  const marks = found.block === null ? 0 : found.block.commas + found.block.points;
+  const markCertain = options.decimalComma !== undefined || marks > 0 || found.delimiter === ",";
   const decimalComma = options.decimalComma ?? hasDecimalComma(text, found);
   const { delimiter, header, start } = found;
   const numeric = found.block !== null;
@@ -58,6 +65,7 @@ export function tableLayout(
     bodyStart: start.start,
     bodyLine: start.number,
     numeric,
+    markCertain,
     settled: collected.settled,
   };
 }
@@ -94,12 +102,10 @@ function bestTable(
 ): Table | null {
   const longest = blocks.reduce<Block | null>((best, block) => (best && best.rows >= block.rows ? best : block), null);
   if (longest === null) return null;
-  const table = (block: Block): Table => ({
-    delimiter,
-    block,
-    header: headerAbove(text, block.before, delimiter, block.width, readUnit),
-    start: block.first,
-  });
+  const table = (block: Block): Table => {
+    const { rows, start } = headerAbove(text, block.before, delimiter, block.width, readUnit);
+    return { delimiter, block, header: rows, start: start ?? block.first };
+  };
   const chosen = table(longest);
   if (chosen.header !== null && headerFits(chosen)) return chosen;
   const earlier = blocks.filter((block) => block.width === longest.width && block.first.start < longest.first.start);
@@ -129,25 +135,59 @@ function merits(table: Table): readonly number[] {
   return [covers, Number(width > 1), block?.rows ?? 0, Number(headerFits(table)), width];
 }
 
-/** The layout with the header in the first filled line, for files that state it and for files without rows of numbers. */
-function statedLayout(
+/** The layout with the header in the first filled line, for files that state how many lines stand before it. */
+function statedLayout(text: string, first: TextLine, best: Table, readUnit: HeaderUnitReader): Table {
+  const { delimiter, block } = best;
+  const line = text.slice(first.start, first.end);
+  if (lineLook(line, delimiter, Number.MAX_SAFE_INTEGER).kind === "data") {
+    return { delimiter, header: null, start: first, block };
+  }
+  return headedAt(text, first, delimiter, block, readUnit);
+}
+
+/**
+ * The layout of a file without a row of numbers alone (names in the first column, words in every row): the delimiter
+ * that cuts most of the first lines into equally many cells, the header in the first of these lines.
+ */
+function wordLayout(
   text: string,
   first: TextLine,
-  best: Table | null,
   delimiters: readonly string[],
+  stated: boolean,
   readUnit: HeaderUnitReader,
 ): Table {
-  const delimiter = best?.delimiter ?? steadyDelimiter(text, first, delimiters);
-  const line = text.slice(first.start, first.end);
-  if (best !== null && lineLook(line, delimiter, Number.MAX_SAFE_INTEGER).kind === "data") {
-    return { delimiter, header: null, start: first, block: best.block };
+  const lines = firstLines(text, first, 200);
+  let chosen = { delimiter: delimiters.includes(",") ? "," : (delimiters[0] ?? ","), header: first, steady: 0 };
+  for (const delimiter of delimiters) {
+    const rows = lines.filter((line) => !isBlankLine(text.slice(line.start, line.end), delimiter));
+    const counts = rows.map((line) => [...cellsOf(text.slice(line.start, line.end), delimiter)].length);
+    const usual = mostFrequent(counts.filter((count) => count > 1));
+    const steady = counts.filter((count) => count === usual).length;
+    const header = rows[counts.indexOf(usual)];
+    if (steady > chosen.steady && header !== undefined) chosen = { delimiter, header, steady };
   }
+  return headedAt(text, stated ? first : chosen.header, chosen.delimiter, null, readUnit);
+}
+
+function mostFrequent(counts: readonly number[]): number {
+  const times = (count: number): number => counts.filter((other) => other === count).length;
+  return counts.reduce((best, count) => (times(count) > times(best) ? count : best), counts[0] ?? 0);
+}
+
+/** The table whose header is the row that begins with line `first`. */
+function headedAt(
+  text: string,
+  first: TextLine,
+  delimiter: string,
+  block: Block | null,
+  readUnit: HeaderUnitReader,
+): Table {
   const lines = firstLines(text, first, 64);
-  const width = best?.block?.width ?? [...cellsOf(line, delimiter)].length;
+  const width = block?.width ?? [...cellsOf(text.slice(first.start, first.end), delimiter)].length;
   const found = headerAt(text, lines, delimiter, width, readUnit);
   const last = lines.at(-1) ?? first;
   const start = lines[found?.next ?? 0] ?? { start: last.next, number: last.number + 1 };
-  return { delimiter, header: found?.rows ?? null, start, block: best?.block ?? null };
+  return { delimiter, header: found?.rows ?? null, start, block };
 }
 
 function firstLines(text: string, first: TextLine, count: number): TextLine[] {
@@ -157,21 +197,6 @@ function firstLines(text: string, first: TextLine, count: number): TextLine[] {
     if (lines.length === count) break;
   }
   return lines;
-}
-
-/** Without rows of numbers: the delimiter that cuts most of the first lines into as many cells as the first of them. */
-function steadyDelimiter(text: string, first: TextLine, delimiters: readonly string[]): string {
-  const lines = firstLines(text, first, 20).map((line) => text.slice(line.start, line.end));
-  let best = delimiters.includes(",") ? "," : (delimiters[0] ?? ",");
-  let most = 0;
-  for (const delimiter of delimiters) {
-    const counts = lines
-      .filter((line) => !isBlankLine(line, delimiter))
-      .map((line) => [...cellsOf(line, delimiter)].length);
-    const steady = (counts[0] ?? 0) < 2 ? 0 : counts.filter((count) => count === counts[0]).length;
-    if (steady > most) [best, most] = [delimiter, steady];
-  }
-  return best;
 }
 
 /** The mark that most cells of the block show; where none shows one, the first that the rest of the text does. */

@@ -131,7 +131,7 @@ describe("bad data files: what is said of cells and rows", () => {
       "warning: run.csv, line 3: “bubble” under V is not a number. The point is left out.",
     ]);
     assert.deepEqual(said("t,V\n0,NaN\n1,2\n2,-inf\n"), [
-      "warning: run.csv, line 2: “NaN” under V is not a number, nor are 1 other. These points are left out.",
+      "warning: run.csv, line 2: “NaN” under V is not a number, nor is one other. These points are left out.",
     ]);
   });
 
@@ -146,7 +146,7 @@ describe("bad data files: what is said of cells and rows", () => {
 
   it("a long row", () => {
     assert.deepEqual(said("t,V\n0,1\n1,2,5\n2,3\n"), [
-      "warning: run.csv, line 3: more cells than the 2 columns; the first too many is “5”. Look for a separator inside a number or a text.",
+      "warning: run.csv, line 3: the row has more cells than the 2 columns; the first too many is “5”. Look for a separator inside a number or a text.",
     ]);
   });
 

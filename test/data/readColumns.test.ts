@@ -167,6 +167,24 @@ describe("reading a delimited file: cells that are no number", () => {
     assert.deepEqual([table.rows, table.headerLine, table.columns.length], [0, 1, 2]);
   });
 
+  it("reads cells over several lines, and the header above rows that begin with a number", () => {
+    const table = columnsOf('a,b\n1,"ha \n""ha"" \nha"\n3,4\n');
+    assert.deepEqual(
+      [table.columns.map((column) => column.header), [...table.lines], table.faults],
+      [["a", "b"], [2, 5], [{ kind: "word", row: 0, column: 1, text: 'ha \n"ha" \nha' }]],
+    );
+    assert.deepEqual(tableOf("t,V\n0,bubble\n1,\n2,3\n"), { t: [0, 1, 2], V: [null, null, 3] });
+  });
+
+  it("reads rows that begin with a name, below a title", () => {
+    assert.deepEqual(tableOf("Rinse water\nrun;t / s;V / mL\nA1;0;1,5\nA2;10;2,5\n"), {
+      run: [null, null],
+      "t / s": [0, 10],
+      "V / mL": [1.5, 2.5],
+    });
+    assert.deepEqual(tableOf("run;t\nA1;1,5\nA2;2,5\n", { skip: 0 }), { run: [null, null], t: [1.5, 2.5] });
+  });
+
   it("reads a table of words as words", () => {
     const table = columnsOf("run,salt\nA,KI\nB,NaI\n");
     assert.deepEqual(Object.keys(tableOf("run,salt\nA,KI\nB,NaI\n")), ["run", "salt"]);

@@ -119,7 +119,7 @@ export const dataMessages = {
     ({ file, line, header, count }) =>
       count === 1
         ? `${file}, line ${line}: the cell of ${header} is empty. The point is left out.`
-        : `${file}, line ${line}: the cell of ${header} is empty, and so are ${others(count)}. These points are left out.`,
+        : `${file}, line ${line}: the cell of ${header} is empty, and so ${others(count)}. These points are left out.`,
   ),
   "data-cell-word": message<{ file: string; line: number; header: string; text: string; count: number }>(
     "warning",
@@ -127,7 +127,7 @@ export const dataMessages = {
     ({ file, line, header, text, count }) =>
       count === 1
         ? `${file}, line ${line}: “${text}” under ${header} is not a number. The point is left out.`
-        : `${file}, line ${line}: “${text}” under ${header} is not a number, nor are ${others(count)}. These points are left out.`,
+        : `${file}, line ${line}: “${text}” under ${header} is not a number, nor ${others(count)}. These points are left out.`,
   ),
   "data-thousands-mark": message<{ file: string; line: number; header: string; text: string }>(
     "warning",
@@ -141,13 +141,13 @@ export const dataMessages = {
     ({ file, line, header, count }) =>
       count === 1
         ? `${file}, line ${line}: the row ends before ${header}. The point is left out.`
-        : `${file}, line ${line}: the row ends before ${header}, and so do ${others(count)}. These points are left out.`,
+        : `${file}, line ${line}: the row ends before ${header}, and so ${count === 2 ? "does one other" : `do ${count - 1} others`}. These points are left out.`,
   ),
   "data-row-long": message<{ file: string; line: number; text: string; columns: number; count: number }>(
     "warning",
     "Rows have more cells than the file has columns: a comma inside a number or a text without quotes is the usual cause.",
     ({ file, line, text, columns, count }) =>
-      `${file}, line ${line}${count === 1 ? "" : ` and ${others(count)}`}: more cells than the ${columns} columns; the first too many is “${text}”. Look for a separator inside a number or a text.`,
+      `${file}, line ${line}: the row has more cells than the ${columns} columns${count === 1 ? "" : `, and so ${count === 2 ? "has one other" : `have ${count - 1} others`}`}; the first too many is “${text}”. Look for a separator inside a number or a text.`,
   ),
   "data-time-backwards": message<{ file: string; line: number; header: string; before: string; after: string }>(
     "error",
@@ -218,5 +218,5 @@ export const dataMessages = {
 } as const;
 
 function others(count: number): string {
-  return count === 2 ? "1 other" : `${count - 1} others`;
+  return count === 2 ? "is one other" : `are ${count - 1} others`;
 }
