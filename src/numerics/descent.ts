@@ -269,5 +269,8 @@ function secant(
   const slope = work.reduced[0]![0]!;
   const gradient = slope * work.projected[0]!;
   const ratio = -(gradient - gradientBefore) / (trial[m]! - here.theta[m]!) / (slope * slope);
-  return ratio > 0.02 && ratio < 50 ? ratio : 1;
+  // far from the minimum a secant may point anywhere: there it may correct Gauss–Newton, not replace it
+  const near = length * length * work.used < 0.1 * work.sumOfSquares;
+  const most = near ? 50 : 4;
+  return ratio * most > 1 && ratio < most ? ratio : 1;
 }

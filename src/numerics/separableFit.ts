@@ -48,12 +48,13 @@ function search(
   let best: Descent | null = null;
   let iterations = 0;
   for (const start of starts) {
-    // a single given start may lie in the wrong valley for one damping: all are tried; after a search only on failure
+    // a single given start may lie in the wrong valley for one damping: all are tried; after a search
+    // only on failure, or where the first step may have been too long and ended on a bound
     for (const damping of searched ? [1, 0.01, 100] : [100, 1, 0.1, 0.01]) {
       const found = descend(work, start, estimated, damping, options);
       iterations += found.iterations;
       if (best === null || better(found, best)) best = found;
-      if (found.end === "stopped" || (searched && found.end === "converged")) break;
+      if (found.end === "stopped" || (searched && found.end === "converged" && !onBound(model, found.theta))) break;
     }
     if (best?.end === "stopped") break;
   }
@@ -63,6 +64,11 @@ function search(
     return { theta, sumOfSquares: Number.POSITIVE_INFINITY, offset: Number.POSITIVE_INFINITY, end, iterations };
   }
   return { ...best, iterations };
+}
+
+/** True where a nonlinear parameter that is estimated sits on a bound. */
+function onBound(model: SeparableModel, theta: Float64Array): boolean {
+  return model.nonlinear.some(({ low, high }, m) => low < high && (theta[m]! <= low || theta[m]! >= high));
 }
 
 /** A stopped descent wins, so that it is reported; then the lower sum; at (nearly) equal sums the converged one. */
@@ -142,11 +148,10 @@ function describe(work: Projection, found: Descent, estimated: readonly boolean[
   const residuals = new Float64Array(n);
   if (finite) fill(work, fitted, residuals);
   const jacobian: Float64Array[] = finite ? free.map((index) => jacobianColumn(work, index)) : [];
-  const onBound = bound.slice(q).some((side) => side !== null);
   let stop: StopReason = found.end;
   if (stop !== "stopped") {
     if (singular) stop = "singular";
-    else if (stop === "converged" && onBound) stop = "bound";
+    else if (stop === "converged" && onBound(model, found.theta)) stop = "bound";
   }
   return {
     stop,

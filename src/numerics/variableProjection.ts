@@ -157,19 +157,23 @@ export function project(work: Projection, theta: Float64Array, estimated: readon
     applyReflector(qr, count + k, work.right);
   }
   let sum = 0;
+  let idle = 0;
   for (let k = 0; k < kept; k++) {
     const column = work.reduced[k]!;
     const source = qr.columns[count + k]!;
     column.fill(0);
     for (let i = 0; i < k; i++) column[i] = source[count + i]!;
     column[k] = qr.diagonal[count + k]!;
-    // a last column of zeros takes nothing from the residual
-    const z = k === kept - 1 && column[k] === 0 ? 0 : work.right[count + k]!;
+    // a last column of zeros takes nothing from the residual: its part stays in the remainder
+    const reaches = k < kept - 1 || column[k] !== 0;
+    const part = work.right[count + k]!;
+    const z = reaches ? part : 0;
+    if (!reaches) idle = part * part;
     work.projected[k] = z;
     sum += z * z;
     if (!Number.isFinite(column[k]!)) return refuse(work);
   }
-  work.remainder = tail(work.right, Math.min(count + kept, n), n);
+  work.remainder = tail(work.right, Math.min(count + kept, n), n) + idle;
   work.sumOfSquares = work.remainder + sum;
   return Number.isFinite(work.sumOfSquares) ? work.sumOfSquares : refuse(work);
 }
