@@ -10,8 +10,8 @@ import type { Formula } from "./formula.js";
 /**
  * Molar mass, kg/mol (shown in g/mol): the sum of abridged standard atomic weights 2021, rounded once; the mass of
  * electrons of ions is left out. One common source per element: the printed uncertainty is a tolerance, so u = a/√3 (A.
- * Possolo et al., Pure Appl. Chem. 90 (2018) 395-424, from memory), the same for all atoms of an element. Null where an element has no standard
- * atomic weight, or nothing has a mass.
+ * Possolo et al., Pure Appl. Chem. 90 (2018) 395-424, from memory), the same for all atoms of an element. Null where an
+ * element has no standard atomic weight, or nothing has a mass.
  */
 export function molarMass(formula: Formula): Quantity | null {
   let total: Fraction = zero;

@@ -103,7 +103,7 @@ function nothing(text: string, at: number, depth: number): Fault {
   if (depth > 0) return fault("formula-bracket", { bracket: text.charAt(at - 1) }, { start: at - 1, end: at });
   const word = /^[^\s+]*/.exec(text.slice(at))?.[0] ?? "";
   const end = at + word.length;
-  return fault("formula-expected", { text: word === "" ? "nothing" : `“${word.slice(0, 30)}”` }, { start: at, end });
+  return fault("formula-expected", { text: word === "" ? "" : `“${word.slice(0, 30)}”` }, { start: at, end });
 }
 
 /** The charge that stands at `at`, 0 where none does. */

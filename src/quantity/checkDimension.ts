@@ -38,7 +38,9 @@ export function checkDimension(unit: Unit | null, expected: Expected, span: Span
   );
 }
 
-/** The slips of hand that have one sensible mend: `F` for °F, `S` for s, `MIN` and the like are unknown units anyway. */
+/**
+ * The slips of hand that have one sensible mend: `F` for °F, `S` for s, `MIN` and the like are unknown units anyway.
+ */
 function spelledOtherwise(unit: Unit, wanted: readonly Kind[], span: Span) {
   if (wanted.includes(kinds.temperature) && unit.text === "F") return [replacement(span, "°F")];
   if (wanted.includes(kinds.time) && unit.text === "S") return [replacement(span, "s")];

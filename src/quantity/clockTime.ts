@@ -16,8 +16,8 @@ const seconds = { d: 86400, h: 3600, min: 60, s: 1 } as const;
 type Part = keyof typeof seconds;
 
 /**
- * A time at the start of `text` written as `00:01:30` (hours, minutes, seconds) or in parts, `1 min 30 s`,
- * `2 h 5 min`; null where neither stands there. Refuses minutes and seconds from 60 on in the first form, and parts that do not go
+ * A time at the start of `text` written as `00:01:30` (hours, minutes, seconds) or in parts, `1 min 30 s`, `2 h 5 min`;
+ * null where neither stands there. Refuses minutes and seconds from 60 on in the first form, and parts that do not go
  * from the larger unit to the smaller.
  */
 export function readClockTime(text: string): ClockTime | Fault | null {

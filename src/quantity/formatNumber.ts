@@ -3,10 +3,10 @@ const lowest = -3;
 const highest = 5;
 
 /**
- * A number as a person reads it. With `u` (one standard uncertainty, same unit) it is rounded to two significant digits of
- * it and written concisely: `5.502(73)e-4`, `0.1000(20)`, `1.30(12)e3`. Without, up to six significant digits, trailing
- * zeros dropped. The exponent form is taken below 1e-3, from 1e5 on, and where the digits of `u` would have to be
- * padded with zeros. Where `u` is smaller than the twentieth digit it is written out, `1 +/- 1.0e-30`; what is not
+ * A number as a person reads it. With `u` (one standard uncertainty, same unit) it is rounded to two significant digits
+ * of it and written concisely: `5.502(73)e-4`, `0.1000(20)`, `1.30(12)e3`. Without, up to six significant digits,
+ * trailing zeros dropped. The exponent form is taken below 1e-3, from 1e5 on, and where the digits of `u` would have to
+ * be padded with zeros. Where `u` is smaller than the twentieth digit it is written out, `1 +/- 1.0e-30`; what is not
  * finite is "not computed". Reads back, through `readQuantity`, to the digits shown.
  */
 export function formatNumber(value: number, u: number | null): string {

@@ -60,9 +60,14 @@ export const kinds = {
 
 export type KindName = keyof typeof kinds;
 
-/** The kind a dimension is called by in messages; null where it has no common name. */
+/**
+ * The kind a dimension is called by in messages; null where it has no common name. The dimension taken from a row of
+ * `kinds` is called by that row, so that a density is not called a mass concentration.
+ */
 export function kindOf(dimension: Dimension): Kind | null {
-  return Object.values<Kind>(kinds).find((entry) => sameDimension(entry.dimension, dimension)) ?? null;
+  const all = Object.values<Kind>(kinds);
+  const own = all.find((entry) => entry.dimension === dimension);
+  return own ?? all.find((entry) => sameDimension(entry.dimension, dimension)) ?? null;
 }
 
 /** Whether a unit is of a kind, as `isKind(unit, "time")`. */

@@ -6,6 +6,7 @@ const spaces = /[\u00a0\u2000-\u200a\u202f\u205f\u3000\t]/g;
  * minus and dash as `-`, every space as a plain one, every raised dot as `·`. Positions stay those of the original.
  */
 export function plainText(text: string): string {
+  if (/^[\x20-\x7e]*$/.test(text)) return text;
   return text
     .replace(spaces, " ")
     .replace(/[\u00b5\u03bc]/g, "u")

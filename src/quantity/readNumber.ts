@@ -16,9 +16,9 @@ const exponentPart = /^[eE]([-+]?\d+)|^ ?(?:[×xX*·]) ?10(?:\^ ?\(?([-+]?\d+)\)
 const tenAlone = /^ *([-+]?)10(?:\^ ?\(?([-+]?\d+)\)?|([⁺⁻]?[⁰¹²³⁴-⁹]+))/;
 
 /**
- * The longest number at the start of `text` (spaces before it are passed over): `0.100(2)`, `12.5e-3`,
- * `12.5×10^-3`, `12.5×10⁻³`, `1.0(1)e-3`, `10^-3`. Digits in brackets count in the last places of the number
- * (JCGM 100:2008, 7.2.2); with a decimal point they are the uncertainty itself. Refuses a comma between digits and what overflows.
+ * The longest number at the start of `text` (spaces before it are passed over): `0.100(2)`, `12.5e-3`, `12.5×10^-3`,
+ * `12.5×10⁻³`, `1.0(1)e-3`, `10^-3`. Digits in brackets count in the last places of the number (JCGM 100:2008, 7.2.2);
+ * with a decimal point they are the uncertainty itself. Refuses a comma between digits and what overflows.
  */
 export function readNumber(text: string): ReadNumber | Fault {
   const sameLength = plainText(text.replace(/[\u2009\u202f]/g, "_")).replace(/_/g, "\u2009");
@@ -60,7 +60,7 @@ function finished(text: string, written: string, uncertain: string | null, end: 
 function notANumber(text: string): Fault {
   const start = text.length - text.trimStart().length;
   const word = /^\S*/.exec(text.slice(start))?.[0] ?? "";
-  const shown = word === "" ? "nothing" : `“${word.length > 30 ? `${word.slice(0, 30)}…` : word}”`;
+  const shown = word === "" ? "" : `“${word.length > 30 ? `${word.slice(0, 30)}…` : word}”`;
   return fault("number-expected", { text: shown }, { start, end: start + word.length });
 }
 

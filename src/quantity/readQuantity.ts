@@ -25,9 +25,23 @@ const sign = /±|\+ ?\/ ?-|\+-(?=[ .\d])|(?<![A-Za-z])within(?![A-Za-z])/;
  * The quantity that the whole of `text` writes: `0.0500 +/- 0.0005 mol/L`, `(25.0 ± 0.1) °C`, `0.100 mol/L ± 2 %`,
  * `50.00 mL within 0.05 mL`, `1 min 30 s`, `00:01:30`, `30 % by mass`. Value and uncertainty are SI; each stated
  * uncertainty is one common source called `sourceName`. A tolerance ±a counts as a/√3 (JCGM 100:2008, 4.3.7); a per
- * cent one is relative, unless the value is itself in per cent. A missing unit is allowed here: `checkDimension` asks for it.
+ * cent one is relative, unless the value is itself in per cent. A missing unit is allowed here: `checkDimension` asks
+ * for it.
  */
 export function readQuantity(text: string, sourceName = ""): ReadQuantity | Fault {
+  const key = `${sourceName}\n${text}`;
+  const found = remembered.get(key);
+  if (found !== undefined) return found;
+  const answer = readWhole(text, sourceName);
+  if (remembered.size > 4000) remembered.clear();
+  remembered.set(key, answer);
+  return answer;
+}
+
+/** Answers by source and text: a description is read again at every keystroke, and most of its lines are as before. */
+const remembered = new Map<string, ReadQuantity | Fault>();
+
+function readWhole(text: string, sourceName: string): ReadQuantity | Fault {
   const plain = plainText(text);
   const lead = /^ *\((?=[^()]*(?:±|\+ ?\/ ?-))/.exec(plain)?.[0].length ?? 0;
   if (lead > 0) return bracketed(plain, lead, sourceName);

@@ -13,7 +13,7 @@ function judged(text: string) {
 
 describe("balance", () => {
   /**
-   * Equations of any general chemistry course book (common practice); each answer can be checked by counting, and is
+   * Equations of any general chemistry textbook (common practice); each answer can be checked by counting, and is
    * read again below and found balanced.
    */
   const balanced: [skeleton: string, answer: string][] = [

@@ -62,3 +62,11 @@ describe("checkDimension", () => {
     }
   });
 });
+
+describe("kindOf", () => {
+  it("calls a row's own dimension by the row, another equal one by the first", () => {
+    assert.equal(kindOf(kinds.density.dimension)?.name, "density");
+    assert.equal(kindOf([-3, 1, 0, 0, 0, 0, 0])?.name, "mass concentration");
+    assert.equal(kindOf([9, 0, 0, 0, 0, 0, 0]), null);
+  });
+});

@@ -73,7 +73,7 @@ describe("readQuantity", () => {
   });
 
   const refused: [text: string, words: string, span: [number, number], mend: string | null][] = [
-    ["", "A number is expected here, such as 0.100 or 1.2e-3; nothing is not one.", [0, 0], null],
+    ["", "A number is expected here, such as 0.100 or 1.2e-3.", [0, 0], null],
     ["fast", "A number is expected here, such as 0.100 or 1.2e-3; “fast” is not one.", [0, 4], null],
     [
       "0.100 ± mol/L",

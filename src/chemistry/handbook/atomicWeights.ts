@@ -1,8 +1,8 @@
 /**
- * The elements: English name (IUPAC) and abridged standard atomic weight with its uncertainty, both as printed. Source: T. Prohaska et
- * al., Standard atomic weights of the elements 2021 (IUPAC Technical Report), Pure Appl. Chem. 94 (2022) 573-600,
- * doi 10.1515/pac-2019-0603, table of abridged values; the uncertainty of Be is taken as 0.0001. Null: the element has
- * no standard atomic weight.
+ * The elements: English name (IUPAC) and abridged standard atomic weight with its uncertainty, both as printed. Source:
+ * T. Prohaska et al., Standard atomic weights of the elements 2021 (IUPAC Technical Report), Pure Appl. Chem. 94 (2022)
+ * 573-600, doi 10.1515/pac-2019-0603, table of abridged values; the uncertainty of Be is taken as 0.0001. Null: the
+ * element has no standard atomic weight.
  */
 export const elements: Readonly<Record<string, ElementRow>> = {
   H: ["hydrogen", "1.0080", "0.0002"],
@@ -129,8 +129,8 @@ export const elements: Readonly<Record<string, ElementRow>> = {
 export type ElementRow = readonly [name: string, weight: string | null, uncertainty: string | null];
 
 /**
- * Deuterium and tritium, written D and T: atomic masses in u with their uncertainty. Source: Atomic Mass Evaluation 2020,
- * M. Wang et al., Chinese Phys. C 45 (2021) 030003 (figures from memory, cut to eight digits).
+ * Deuterium and tritium, written D and T: atomic masses in u with their uncertainty. Source: Atomic Mass Evaluation
+ * 2020, M. Wang et al., Chinese Phys. C 45 (2021) 030003 (figures from memory, cut to eight digits).
  */
 export const isotopes: Readonly<Record<string, ElementRow>> = {
   D: ["deuterium", "2.0141018", "0.0000001"],

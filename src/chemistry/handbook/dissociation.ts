@@ -10,8 +10,9 @@ export interface Ion {
 
 /**
  * The ions that a common strong acid, strong base or soluble salt gives in water, by the normal form of its formula
- * (`KI`, `(NH4)2SO4`, `CuSO4.5H2O`; `CH3COONa` too); null where the handbook does not know it as one. Sulfuric acid gives
- * H^+ and HSO4^-. Common practice (the solubility rules and the list of strong acids of any general chemistry textbook).
+ * (`KI`, `(NH4)2SO4`, `CuSO4.5H2O`; `CH3COONa` too); null where the handbook does not know it as one. Sulfuric acid
+ * gives H^+ and HSO4^-. Common practice (the solubility rules and the list of strong acids of any general chemistry
+ * textbook).
  */
 export function ionsOf(formula: string): readonly Ion[] | null {
   const anhydrous = formula.replace(/\.\d*H2O$/, "");

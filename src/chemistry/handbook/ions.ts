@@ -10,7 +10,9 @@ function row(body: string, charge: number, name: string): IonRow {
   return { body, charge, name };
 }
 
-/** Cations of common salts. Common practice; names after the IUPAC Red Book 2005, tables IR-4.1 and IX (from memory). */
+/**
+ * Cations of common salts. Common practice; names after the IUPAC Red Book 2005, tables IR-4.1 and IX (from memory).
+ */
 export const cations: readonly IonRow[] = [
   row("H", 1, "hydrogen ion"),
   row("Li", 1, "lithium ion"),

@@ -5,7 +5,8 @@ export const chemistryMessages = {
   "formula-expected": message(
     "error",
     "A formula or the name of a declared species stands here.",
-    ({ text }: { text: string }) => `A species is expected here, such as H2O2 or SO4^2-; ${text} is not one.`,
+    ({ text }: { text: string }) =>
+      `A species is expected here, such as H2O2 or SO4^2-${text === "" ? "" : `; ${text} is not one`}.`,
   ),
   "species-unknown": message(
     "error",
@@ -19,7 +20,7 @@ export const chemistryMessages = {
     "error",
     "Every bracket of a formula is closed by one of its own kind and holds something.",
     ({ bracket }: { bracket: string }) =>
-      `The bracket ${bracket} of this formula has no partner, or nothing between them.`,
+      `The bracket ${bracket} of this formula is not closed by its partner, or holds nothing.`,
   ),
   "formula-count": message(
     "error",

@@ -5,7 +5,8 @@ export const quantityMessages = {
   "number-expected": message(
     "error",
     "A number stands here: digits with a decimal point, an exponent and an uncertainty where there are any.",
-    ({ text }: { text: string }) => `A number is expected here, such as 0.100 or 1.2e-3; ${text} is not one.`,
+    ({ text }: { text: string }) =>
+      `A number is expected here, such as 0.100 or 1.2e-3${text === "" ? "" : `; ${text} is not one`}.`,
   ),
   "number-comma": message(
     "error",
