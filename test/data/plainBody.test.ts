@@ -73,7 +73,9 @@ function sameByBothWays(file: string, options: DataOptions = {}): boolean {
   return true;
 }
 
-describe("the byte loop equals csv-parse", () => {
+describe("the byte loop equals csv-parse", function () {
+  this.timeout(20_000);
+
   it("on 600 files of numbers", () => {
     let taken = 0;
     for (let seed = 1; seed <= 600; seed++) if (sameByBothWays(randomFile(seed * 7919, 1_000_000))) taken++;
