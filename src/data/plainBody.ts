@@ -41,9 +41,9 @@ const roomForDigit = 900_719_925_474_098;
  * (see `addOddRow`). Anything else makes the body "irregular", and so does one beyond the limits: csv-parse then reads
  * it from the start and says what it is. A test keeps the two equal.
  *
- * A number of at most 53 bits times or over an exact power of ten is one correctly rounded operation, hence the double
- * that JavaScript reads from the same digits (W. D. Clinger, How to read floating point numbers accurately, 1990,
- * section 3); any other is given to JavaScript as text.
+ * A number of at most 53 bits times or over a power of ten that a double holds exactly is one operation, which IEEE 754
+ * (5.4.1) rounds correctly: hence the double that JavaScript reads from the same digits. Any other is given to
+ * JavaScript as text.
  */
 export function plainBody(
   bytes: Uint8Array,

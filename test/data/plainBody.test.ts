@@ -4,7 +4,7 @@ import { readAnyTable, readPlainTable } from "../../src/data/readTable.js";
 import { parseHeaderUnit } from "../../src/quantity/headerUnit.js";
 import { bytesOf, columnsOf } from "./reading.js";
 
-/** Whole numbers below `below`, the same in every run (Park and Miller's minimal standard generator, 1988). */
+/** Whole numbers below `below`, the same in every run (multiplicative, 48271 modulo 2^31 − 1). */
 function seeded(seed: number): (below: number) => number {
   let state = seed;
   return (below) => {
