@@ -81,34 +81,48 @@ function better(a: Descent, b: Descent): boolean {
   return a.offset < b.offset;
 }
 
-/** Starts from a fit to an evenly thinned sample: one, or two where two minima are nearly as good. */
+/**
+ * Starts from a fit to an evenly thinned sample: one, or more where several minima are nearly as good. With very many
+ * observations each is then refined on samples ten times as large, because a step on all of them costs more than that.
+ */
 function thinnedStarts(
   work: Projection,
   weights: Float64Array | null,
   estimated: readonly boolean[],
   options: LeastSquaresOptions,
 ): Float64Array[] {
-  const { model, n } = work;
-  if (model.thinned === undefined || n < many || work.used < many) return [];
-  const indices = evenlySpread(n, sample);
-  const thinY = Float64Array.from(indices, (i) => work.y[i]!);
-  const root = work.root;
-  const thinWeights =
-    root === null ? null : Float64Array.from(indices, (i) => (root[i] === 0 ? 0 : weights === null ? 1 : weights[i]!));
-  const thin = projection(thinY, thinWeights, model.thinned(indices));
-  if (thin.used < 2 * (model.linear.length + model.nonlinear.length) + 2) return [];
+  if (work.n < many || work.used < many) return [];
+  const rough = { ...options, tolerance: 1e-3 };
+  const thin = thinned(work, weights, sample);
+  if (thin === null) return [];
   const ends = gridSearch(thin, 3, options)
-    .map((start) => descend(thin, start.theta, estimated, 1, { ...options, tolerance: 1e-3 }))
+    .map((start) => descend(thin, start.theta, estimated, 1, rough))
     .filter((end) => end.end === "converged")
     .sort((a, b) => a.sumOfSquares - b.sumOfSquares);
-  const starts: Float64Array[] = [];
+  let starts: Float64Array[] = [];
   for (const end of ends) {
     const distinct = starts.every((other) =>
       other.some((value, m) => Math.abs(value - end.theta[m]!) > 1e-3 * Math.abs(value)),
     );
     if (distinct && end.sumOfSquares <= 1.5 * ends[0]!.sumOfSquares) starts.push(end.theta);
   }
+  for (let count = 10 * sample; 10 * count <= work.n; count *= 10) {
+    const finer = thinned(work, weights, count);
+    if (finer !== null) starts = starts.map((start) => descend(finer, start, estimated, 1, rough).theta);
+  }
   return starts;
+}
+
+/** The problem on `count` evenly spread observations; null where the model cannot be thinned or too few take part. */
+function thinned(work: Projection, weights: Float64Array | null, count: number): Projection | null {
+  const { model, root, y, n } = work;
+  if (model.thinned === undefined) return null;
+  const indices = evenlySpread(n, count);
+  const thinY = Float64Array.from(indices, (i) => y[i]!);
+  const thinWeights =
+    root === null ? null : Float64Array.from(indices, (i) => (root[i] === 0 ? 0 : (weights?.[i] ?? 1)));
+  const thin = projection(thinY, thinWeights, model.thinned(indices));
+  return thin.used < 2 * (model.linear.length + model.nonlinear.length) + 2 ? null : thin;
 }
 
 /** Turns the point found into the result, with the covariance from the QR of the full Jacobian there. */
