@@ -1,0 +1,107 @@
+import type { Run as RunFinding } from "../contract/findings.js";
+import { monitors } from "../monitor/monitors.js";
+import { noUnit } from "../quantity/unitOf.js";
+import type { Follow, Run } from "../study/run.js";
+import { cautionsOf } from "./cautions.js";
+import { followCurves } from "./curves.js";
+import type { EndContext } from "./endPoints.js";
+import { fitsOf } from "./fits.js";
+import { type Notes, note } from "./notes.js";
+import { ratesOf } from "./rates.js";
+import { type ReadSignal, readSignal } from "./readSignal.js";
+import type { RunInput } from "./runInput.js";
+import { resultUnits, shown, shownQuantity } from "./shown.js";
+import { sourcesOf } from "./sources.js";
+import { type Stoichiometry, standardUncertainty, stoichiometry } from "./stoichiometry.js";
+
+/** Everything one run says, as findings. What is wrong with its readings goes into the notes. */
+export function analyseRun(run: Run, input: RunInput, notes: Notes): RunFinding {
+  const amounts = stoichiometry(run);
+  const finding: RunFinding = {
+    id: run.id,
+    place: input.place(run.origin),
+    problems: [],
+    name: run.name,
+    title: run.title,
+    equation: run.reaction?.text ?? "",
+    conditions: conditionsOf(run),
+    taken: takenOf(run, amounts),
+    follow: [],
+    rates: [],
+    fits: [],
+    comparisons: [],
+    suitability: [],
+    cautions: cautionsOf(run, amounts),
+  };
+  for (const follow of run.follow) {
+    const read = input.columns === null ? null : readSignal(run, follow, input.columns, notes);
+    const context = read === null ? null : contextOf(run, follow, read, amounts, notes);
+    finding.follow.push(followFinding(follow, read, context, input));
+    // Without a word to the contrary rates and fits are those of the first signal.
+    if (run.follow[0] !== follow) continue;
+    const fits = fitsOf(run, follow, context, input, notes);
+    const change = fits.find((fit) => fit.change !== null)?.change ?? null;
+    finding.fits.push(...fits.map((fit) => fit.finding));
+    finding.rates.push(...ratesOf(run, context, change, input, notes));
+  }
+  return finding;
+}
+
+function conditionsOf(run: Run): RunFinding["conditions"] {
+  const conditions: RunFinding["conditions"] = {};
+  if (run.volume !== null) conditions["volume"] = shownQuantity(run.volume.value);
+  if (run.temperature !== null) conditions["temperature"] = shownQuantity(run.temperature.value);
+  return conditions;
+}
+
+function takenOf(run: Run, amounts: Stoichiometry): RunFinding["taken"] {
+  const { concentration } = resultUnits(run, noUnit, noUnit);
+  return run.taken.map((taken) => {
+    const initial = amounts.initial.get(taken.species.key);
+    return {
+      species: taken.species.key,
+      given: shownQuantity(taken.given),
+      concentration: initial === undefined ? null : shown(initial.value, standardUncertainty(initial), concentration),
+      limiting: amounts.limiting === taken.species.key,
+    };
+  });
+}
+
+function contextOf(
+  run: Run,
+  follow: Follow,
+  read: ReadSignal,
+  amounts: Stoichiometry,
+  notes: Notes,
+): EndContext | null {
+  const monitor = monitors.get(follow.monitor);
+  const number = run.reaction?.numbers.get(follow.species.key) ?? 0;
+  // A reaction that is broken, or that does not change the species, has been said to be so on its line.
+  if (monitor === undefined || number === 0) return null;
+  const relation = monitor.relate(run, follow, read.signal);
+  if (!relation.ok) {
+    note(notes, follow.id, relation.problem);
+    return null;
+  }
+  return { run, follow, signal: read.signal, relation: relation.value, stoichiometry: amounts };
+}
+
+function followFinding(
+  follow: Follow,
+  read: ReadSignal | null,
+  context: EndContext | null,
+  input: RunInput,
+): RunFinding["follow"][number] {
+  return {
+    id: follow.id,
+    place: input.place(follow.origin),
+    problems: [],
+    species: follow.species.key,
+    monitor: follow.monitor,
+    column: follow.column,
+    points: read?.points ?? 0,
+    used: context === null ? 0 : context.signal.time.length,
+    sources: context === null ? [] : sourcesOf(context),
+    ...(input.curves && context !== null ? followCurves(context) : {}),
+  };
+}

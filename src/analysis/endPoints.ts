@@ -1,0 +1,111 @@
+import type { Problem } from "../contract/problem.js";
+import { problem } from "../contract/problem.js";
+import type { Relation } from "../monitor/monitor.js";
+import type { Signal } from "../monitor/signal.js";
+import { sameDimension } from "../quantity/dimension.js";
+import { combined } from "../quantity/quantity.js";
+import type { EndPoint, Follow, Run } from "../study/run.js";
+import { exact, plusTimes, type Stoichiometry, standardUncertainty, type Uncertain } from "./stoichiometry.js";
+
+/** The signal at time zero or at infinity, as a fit takes it; SI. */
+export type ResolvedEnd =
+  | { readonly kind: "free"; readonly low: number; readonly high: number }
+  | { readonly kind: "fixed"; readonly value: Uncertain };
+
+export interface EndContext {
+  readonly run: Run;
+  readonly follow: Follow;
+  readonly signal: Signal;
+  readonly relation: Relation;
+  readonly stoichiometry: Stoichiometry;
+}
+
+/** The start: free unless said; fixed at its stated value, else at what was taken. */
+export function resolveStart(context: EndContext, wish: EndPoint): ResolvedEnd | Problem {
+  if (wish.kind !== "fixed") return { kind: "free", low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
+  if (wish.value !== null) return statedEnd(context, "start", wish);
+  const { follow, stoichiometry } = context;
+  const initial = stoichiometry.initial.get(follow.species.key);
+  if (initial !== undefined) return { kind: "fixed", value: signalOf(context, initial) };
+  return unknownEnd(context, "start", wish.origin, `nothing is stated of ${follow.species.key}`);
+}
+
+/**
+ * The infinity: fixed at its stated value, else by stoichiometry; by stoichiometry too where nothing is said and the
+ * followed species is the reactant that runs out of a reaction that does not go back; else free, within what
+ * stoichiometry allows where that is known (three standard uncertainties wider).
+ */
+export function resolveInfinity(context: EndContext, wish: EndPoint): ResolvedEnd | Problem {
+  const { run, follow, stoichiometry } = context;
+  const exhausted = stoichiometry.limiting === follow.species.key && run.reaction?.reversible === false;
+  if (wish.kind === "fixed") {
+    if (wish.value !== null) return statedEnd(context, "infinity", wish);
+    if (run.reaction?.reversible === true) {
+      return unknownEnd(context, "infinity", wish.origin, "the reaction goes back, so it does not come to a full end");
+    }
+    if (exhausted) return { kind: "fixed", value: signalOf(context, exact(0)) };
+    const end = endConcentration(context);
+    if (end !== null) return { kind: "fixed", value: signalOf(context, end) };
+    const missing = stoichiometry.missing.map((key) => `nothing is stated of ${key}`).join(", ");
+    return unknownEnd(context, "infinity", wish.origin, missing);
+  }
+  if (wish.kind === "default" && exhausted) return { kind: "fixed", value: signalOf(context, exact(0)) };
+  return { kind: "free", ...boundsOfInfinity(context, exhausted) };
+}
+
+/** Concentration of the followed species when the limiting reactant is used up. */
+function endConcentration({ run, follow, stoichiometry }: EndContext): Uncertain | null {
+  const initial = stoichiometry.initial.get(follow.species.key);
+  const number = run.reaction?.numbers.get(follow.species.key);
+  if (initial === undefined || number === undefined || stoichiometry.greatestExtent === null) return null;
+  return plusTimes(initial, number, stoichiometry.greatestExtent);
+}
+
+function boundsOfInfinity(context: EndContext, exhausted: boolean): { low: number; high: number } {
+  const { run, follow } = context;
+  const none = { low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
+  const end = exhausted ? exact(0) : endConcentration(context);
+  const number = run.reaction?.numbers.get(follow.species.key) ?? 0;
+  if (end === null || number === 0) return none;
+  const limit = signalOf(context, end);
+  const slack = 3 * (standardUncertainty(limit) ?? 0) + 3 * commonSize(context.signal);
+  const rises = number * context.relation.slope > 0;
+  return rises ? { ...none, high: limit.value + slack } : { ...none, low: limit.value - slack };
+}
+
+/** Greatest shift that the common causes give any reading. */
+function commonSize(signal: Signal): number {
+  return signal.common.reduce((sum, { shift }) => sum + shift.reduce((most, s) => Math.max(most, Math.abs(s)), 0), 0);
+}
+
+function signalOf({ relation }: EndContext, concentration: Uncertain): Uncertain {
+  return plusTimes(exact(relation.zero), relation.slope, concentration);
+}
+
+function statedEnd(
+  { follow, signal }: EndContext,
+  end: "start" | "infinity",
+  wish: EndPoint & { kind: "fixed" },
+): ResolvedEnd | Problem {
+  const quantity = wish.value;
+  if (quantity === null) return { kind: "fixed", value: exact(0) };
+  if (!sameDimension(quantity.unit.dimension, signal.unit.dimension)) {
+    const args = { end, unit: quantity.unit.text, column: follow.column, columnUnit: signal.unit.text };
+    return problem("fit-end-wrong-unit", args, wish.origin);
+  }
+  const u = combined(quantity.sources);
+  return { kind: "fixed", value: { value: quantity.value, causes: new Map(u === null ? [] : [[`${end} stated`, u]]) } };
+}
+
+function unknownEnd(
+  { follow }: EndContext,
+  end: "start" | "infinity",
+  origin: Problem["origin"],
+  missing: string,
+): Problem {
+  return problem("fit-end-unknown", { end, species: follow.species.key, missing }, origin);
+}
+
+export function isProblem(end: ResolvedEnd | Problem): end is Problem {
+  return "code" in end;
+}

@@ -1,0 +1,135 @@
+import type { Problem } from "../contract/problem.js";
+import { firstOrderModel } from "../law/firstOrder.js";
+import { fitLeastSquares, type LeastSquaresFit, type SeparableModel, sensitivities } from "../numerics/leastSquares.js";
+import type { FitWish } from "../study/run.js";
+import { type EndContext, isProblem, type ResolvedEnd, resolveInfinity, resolveStart } from "./endPoints.js";
+import { type FitData, refuseAfter, refuseBefore } from "./fitRefusals.js";
+import type { Refusal } from "./fitResult.js";
+
+/** A first-order fit that came out, SI; parameters in the order start, infinity, k′. */
+export interface FirstOrderFit {
+  readonly fit: LeastSquaresFit;
+  readonly model: SeparableModel;
+  readonly start: ResolvedEnd;
+  readonly infinity: ResolvedEnd;
+  readonly used: UsedReadings;
+  /** shift of start, infinity and k′ when a common cause is off by one standard uncertainty, by cause */
+  readonly common: ReadonlyMap<string, readonly [number, number, number]>;
+}
+
+/** The readings inside the window of a fit, SI. */
+export interface UsedReadings {
+  readonly time: Float64Array;
+  readonly value: Float64Array;
+  /** 1/u², null: all alike */
+  readonly weights: Float64Array | null;
+  /** index of each in the signal */
+  readonly indices: readonly number[];
+}
+
+/** Fits order 1 to the signal of a follow line. A refusal is a result; a problem means that a line has to be mended. */
+export function fitFirstOrder(
+  context: EndContext,
+  wish: FitWish,
+  stopped: () => boolean,
+): FirstOrderFit | { refused: Refusal; used: UsedReadings } | { problem: Problem; used: UsedReadings } {
+  const used = usedReadings(context, wish);
+  const start = resolveStart(context, wish.start);
+  const infinity = resolveInfinity(context, wish.infinity);
+  if (isProblem(start)) return { problem: start, used };
+  if (isProblem(infinity)) return { problem: infinity, used };
+  const number = context.run.reaction?.numbers.get(context.follow.species.key) ?? 0;
+  const data: FitData = {
+    ...used,
+    wanted: 1 + (start.kind === "free" ? 1 : 0) + (infinity.kind === "free" ? 1 : 0),
+    fixedStart: start.kind === "fixed" ? start.value.value : null,
+    species: context.follow.species.key,
+    direction: Math.sign(number * context.relation.slope),
+  };
+  const before = refuseBefore(data);
+  if (before !== null) return { refused: before, used };
+  const model = firstOrderModel(used.time, parameterOf("start", start), parameterOf("infinity", infinity));
+  const fit = fitLeastSquares(used.value, used.weights, model, { stopped });
+  const after = refuseAfter(data, fit, fit.values[0] ?? 0, fit.values[1] ?? 0);
+  if (after !== null) return { refused: after, used };
+  return { fit, model, start, infinity, used, common: commonShifts(context, used, model, fit, start, infinity) };
+}
+
+function usedReadings({ signal }: EndContext, wish: FitWish): UsedReadings {
+  const from = wish.window?.from.value ?? Number.NEGATIVE_INFINITY;
+  const to = wish.window?.to.value ?? Number.POSITIVE_INFINITY;
+  // A window that ends on a reading includes it, however its time was rounded on the way to SI.
+  const slack =
+    1e-9 * Math.max(Math.abs(to === Number.POSITIVE_INFINITY ? 0 : to), Math.abs(wish.window?.from.value ?? 0));
+  const indices: number[] = [];
+  signal.time.forEach((t, i) => {
+    if (t >= from - slack && t <= to + slack) indices.push(i);
+  });
+  const pick = (of: Float64Array): Float64Array => Float64Array.from(indices, (i) => of[i] as number);
+  const random = signal.random === null ? null : pick(signal.random);
+  return {
+    time: pick(signal.time),
+    value: pick(signal.value),
+    weights: random === null ? null : random.map((u) => 1 / (u * u)),
+    indices,
+  };
+}
+
+function parameterOf(name: string, end: ResolvedEnd) {
+  if (end.kind === "fixed") {
+    return { name, fixed: end.value.value, low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
+  }
+  return { name, fixed: null, low: end.low, high: end.high };
+}
+
+/**
+ * What each common cause does to the parameters (JCGM 100:2008, 5.1): causes of the readings shift the observations;
+ * causes of a fixed end shift what is left for the others, and the end itself.
+ */
+function commonShifts(
+  { signal }: EndContext,
+  used: UsedReadings,
+  model: SeparableModel,
+  fit: LeastSquaresFit,
+  start: ResolvedEnd,
+  infinity: ResolvedEnd,
+): ReadonlyMap<string, readonly [number, number, number]> {
+  const n = used.time.length;
+  const observed = new Map<string, Float64Array>();
+  const own = new Map<string, [number, number, number]>();
+  const shiftOf = (name: string): Float64Array => {
+    const known = observed.get(name) ?? new Float64Array(n);
+    observed.set(name, known);
+    return known;
+  };
+  for (const { name, shift } of signal.common) {
+    const total = shiftOf(name);
+    used.indices.forEach((index, i) => {
+      total[i] = (total[i] as number) + (shift[index] as number);
+    });
+  }
+  const basis = [new Float64Array(n), new Float64Array(n)];
+  model.evaluate(Float64Array.of(fit.values[2] ?? 0), basis, null);
+  [start, infinity].forEach((end, which) => {
+    if (end.kind !== "fixed") return;
+    for (const [name, size] of end.value.causes) {
+      const total = shiftOf(name);
+      const column = basis[which] as Float64Array;
+      for (let i = 0; i < n; i++) total[i] = (total[i] as number) - size * (column[i] as number);
+      const direct = own.get(name) ?? [0, 0, 0];
+      direct[which] = (direct[which] ?? 0) + size;
+      own.set(name, direct);
+    }
+  });
+  const names = [...observed.keys()];
+  const moved = sensitivities(fit, used.weights, [...observed.values()]);
+  return new Map(
+    names.map((name, which) => {
+      const shifts: [number, number, number] = [...(own.get(name) ?? ([0, 0, 0] as const))];
+      fit.free.forEach((parameter, place) => {
+        shifts[parameter] = (shifts[parameter] ?? 0) + (moved[which]?.[place] ?? 0);
+      });
+      return [name, shifts] as const;
+    }),
+  );
+}

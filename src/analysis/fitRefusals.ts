@@ -1,0 +1,121 @@
+import { fTail } from "../numerics/distributions.js";
+import type { LeastSquaresFit } from "../numerics/leastSquares.js";
+import { type Refusal, refusal } from "./fitResult.js";
+
+/** What the checks of a first-order fit look at; readings SI. */
+export interface FitData {
+  readonly time: Float64Array;
+  readonly value: Float64Array;
+  readonly weights: Float64Array | null;
+  /** parameters to be estimated */
+  readonly wanted: number;
+  /** the fixed start, null where it is free */
+  readonly fixedStart: number | null;
+  readonly species: string;
+  /** +1 where the signal must rise as the reaction goes, −1 where it must fall, 0 where that is not known */
+  readonly direction: number;
+}
+
+/** Why readings cannot carry a fit at all, seen before it is tried; null where they may. */
+export function refuseBefore({ time, value, wanted }: FitData): Refusal | null {
+  const different = new Set(time).size;
+  const need = wanted + 1;
+  if (value.length < need || different < wanted) {
+    const count = value.length === 1 ? "one reading" : `${value.length} readings at ${different} different times`;
+    const remedy = `Use ${need} readings or more: widen the window, or read more often.`;
+    return refusal("refused", `${count} cannot determine ${wanted} parameters and their scatter`, remedy);
+  }
+  if (value.every((reading) => reading === value[0])) {
+    return refusal(
+      "refused",
+      "all readings are the same, so nothing is seen to react",
+      "Check the column and the window, or follow a signal that the reaction moves.",
+    );
+  }
+  return null;
+}
+
+/** Why the outcome of a fit is no rate constant; null where it is one. `start` and `infinity` are the fitted ends. */
+export function refuseAfter(data: FitData, fit: LeastSquaresFit, start: number, infinity: number): Refusal | null {
+  const flat = refuseFlat(data, fit);
+  if (flat !== null) return flat;
+  const change = infinity - start;
+  if (data.direction !== 0 && change * data.direction < 0) {
+    const went = change > 0 ? "rises" : "falls";
+    const should = data.direction > 0 ? "forms" : "uses up";
+    return refusal(
+      "refused",
+      `the signal ${went}, but the reaction ${should} ${data.species}`,
+      "Check the column, what is followed and how the reaction is written.",
+    );
+  }
+  if (fit.stop === "limit" || fit.stop === "stopped") {
+    return refusal("limit", "the fit did not converge", "Narrow the window, or fix the start or the infinity.");
+  }
+  const ofRate = fit.bound[2];
+  if (ofRate === "low") {
+    return refusal(
+      "bound",
+      "the readings do not bend as a first-order approach does, so k cannot be told from the infinity",
+      "Follow the reaction longer, state the infinity, or try another order.",
+    );
+  }
+  if (ofRate === "high") {
+    return refusal(
+      "bound",
+      "the reaction is over before the second reading",
+      "Read earlier and more often, or slow the reaction down.",
+    );
+  }
+  if (fit.stop === "singular" || fit.covariance === null) {
+    return refusal(
+      "singular",
+      "the readings do not tell the parameters apart",
+      "Follow the reaction longer, read earlier, or fix the start or the infinity.",
+    );
+  }
+  return null;
+}
+
+/** A number whose standard uncertainty is as large as itself is none. */
+export function refuseUndetermined(k: number, uRandom: number | null): Refusal | null {
+  if (uRandom === null || uRandom < k) return null;
+  return refusal(
+    "refused",
+    "the standard uncertainty of k is as large as k itself",
+    "Follow the reaction longer or with less scatter, or state the infinity.",
+  );
+}
+
+/**
+ * F test of the law against no change at all, at 1 %: readings that a constant describes as well show no reaction. The
+ * constant is the fixed start where there is one, else the weighted mean.
+ */
+function refuseFlat({ value, weights, fixedStart, wanted }: FitData, fit: LeastSquaresFit): Refusal | null {
+  let weight = 0;
+  let sum = 0;
+  for (let i = 0; i < value.length; i++) {
+    const w = weights?.[i] ?? 1;
+    weight += w;
+    sum += w * (value[i] as number);
+  }
+  const level = fixedStart ?? sum / weight;
+  let flat = 0;
+  for (let i = 0; i < value.length; i++) {
+    const off = (value[i] as number) - level;
+    flat += (weights?.[i] ?? 1) * off * off;
+  }
+  const more = wanted - (fixedStart === null ? 1 : 0);
+  const left = value.length - wanted;
+  if (more < 1 || left < 1) return null;
+  const gain = flat - fit.chiSquare;
+  const exactly = fit.chiSquare <= 1e-24 * flat;
+  if (exactly && gain > 0) return null;
+  const f = gain / more / (fit.chiSquare / left);
+  if (gain > 0 && (fTail(f, more, left) ?? 1) < 0.01) return null;
+  return refusal(
+    "refused",
+    "the readings change no more than they scatter, so no reaction is seen",
+    "Check the column and the window, follow the reaction longer, or follow a signal that it moves more.",
+  );
+}

@@ -1,0 +1,161 @@
+import { problem } from "../contract/problem.js";
+import type { Columns } from "../data/columns.js";
+import type { CommonCause, Signal } from "../monitor/signal.js";
+import { fromSI, intervalToSI, toSI } from "../quantity/conversion.js";
+import { sameDimension } from "../quantity/dimension.js";
+import { formatQuantity } from "../quantity/formatNumber.js";
+import { isKind, kinds } from "../quantity/kinds.js";
+import type { Quantity } from "../quantity/quantity.js";
+import type { Unit } from "../quantity/unit.js";
+import type { Fact } from "../study/fact.js";
+import type { ColumnFact, Follow, Run } from "../study/run.js";
+import { checkCells } from "./checkCells.js";
+import { dataOrigin, type FoundColumn, findColumns } from "./findColumns.js";
+import { type Notes, note } from "./notes.js";
+
+/** Signal of one follow line, and how many rows its file has. */
+export interface ReadSignal {
+  readonly signal: Signal;
+  readonly points: number;
+}
+
+/**
+ * The usable readings of a follow line: those rows in which time and signal are both numbers, down to where time runs
+ * backwards. Null where there is no signal to speak of; why is in the notes.
+ */
+export function readSignal(run: Run, follow: Follow, file: Columns, notes: Notes): ReadSignal | null {
+  const found = findColumns(run, file, notes);
+  const readings = found.find(({ fact }) => fact.name === follow.column);
+  if (readings === undefined || run.data === null) return null;
+  const time = timeColumn(run, found, follow, notes);
+  if (time === null) return null;
+  if (readings.unit === null) {
+    const args = { column: follow.column, kind: follow.monitor, samples: kinds.concentration.samples };
+    note(notes, follow.id, problem("column-lacks-unit", args, dataOrigin(run, readings.fact)));
+    return null;
+  }
+  if (!checkCells(run, follow, file, [time, readings], notes)) return null;
+  const rows = usableRows(run, follow, file, time, readings, notes);
+  const value = Float64Array.from(rows, (row) => toSI(readings.values[row] ?? 0, readings.unit as Unit));
+  const signal: Signal = {
+    time: Float64Array.from(rows, (row) => toSI(time.values[row] ?? 0, time.unit as Unit)),
+    value,
+    random: randomOf(follow, readings, value, notes),
+    common: commonOf(follow, readings, value, notes),
+    timeUnit: time.unit as Unit,
+    unit: readings.unit,
+    rows,
+  };
+  return { signal, points: file.rows };
+}
+
+/** The column whose unit is a time; of several the first, with an information. */
+function timeColumn(run: Run, found: readonly FoundColumn[], follow: Follow, notes: Notes): FoundColumn | null {
+  const times = found.filter(({ fact, unit }) => fact.name !== follow.column && unit !== null && isKind(unit, "time"));
+  const [first, second] = times;
+  if (first === undefined) {
+    // A column that could not be found or read has said so already, and may be the time.
+    const declared = run.data?.columns.length ?? 0;
+    if (found.length === declared) {
+      note(notes, run.id, problem("run-lacks-time", { run: run.name, file: run.data?.path ?? "" }, run.origin));
+    }
+    return null;
+  }
+  if (second !== undefined) {
+    const args = { run: run.name, column: first.fact.name, others: second.fact.name };
+    note(notes, run.id, problem("run-times", args, dataOrigin(run, second.fact)));
+  }
+  return first;
+}
+
+function usableRows(
+  run: Run,
+  follow: Follow,
+  file: Columns,
+  time: FoundColumn,
+  readings: FoundColumn,
+  notes: Notes,
+): Uint32Array {
+  const rows: number[] = [];
+  let before = Number.NEGATIVE_INFINITY;
+  let twice = 0;
+  let firstTwice = -1;
+  for (let row = 0; row < file.rows; row++) {
+    const t = time.values[row] as number;
+    if (Number.isNaN(t)) continue;
+    if (t < before) {
+      const unit = time.unit?.text ?? "";
+      const args = {
+        file: run.data?.path ?? "",
+        line: file.lines[row] ?? 0,
+        header: time.header,
+        before: formatQuantity(before, null, unit),
+        after: formatQuantity(t, null, unit),
+      };
+      note(notes, follow.id, problem("data-time-backwards", args, dataOrigin(run, time.fact)));
+      break;
+    }
+    if (t === before && rows.length > 0) {
+      twice++;
+      if (firstTwice < 0) firstTwice = row;
+    }
+    before = t;
+    if (!Number.isNaN(readings.values[row] as number)) rows.push(row);
+  }
+  if (twice > 0) {
+    const args = {
+      file: run.data?.path ?? "",
+      line: file.lines[firstTwice] ?? 0,
+      header: time.header,
+      time: formatQuantity(time.values[firstTwice] as number, null, time.unit?.text ?? ""),
+      count: twice,
+    };
+    note(notes, follow.id, problem("data-time-twice", args, dataOrigin(run, time.fact)));
+  }
+  return Uint32Array.from(rows);
+}
+
+/** Random standard uncertainty of each reading; null where none is stated or it cannot serve as a weight. */
+function randomOf(follow: Follow, readings: FoundColumn, value: Float64Array, notes: Notes): Float64Array | null {
+  const { random } = readings.fact;
+  if (random === null || random.value.value === 0) return null;
+  const size = sizeOf(follow, readings.fact, readings.unit as Unit, random, notes);
+  if (size === null) return null;
+  if (size.kind === "offset") return new Float64Array(value.length).fill(size.u);
+  if (value.some((reading) => reading === 0)) {
+    note(notes, follow.id, problem("uncertainty-of-zero", { column: follow.column }, random.origin));
+    return null;
+  }
+  return value.map((reading) => Math.abs(reading) * size.u);
+}
+
+function commonOf(follow: Follow, readings: FoundColumn, value: Float64Array, notes: Notes): CommonCause[] {
+  const { common } = readings.fact;
+  if (common === null || common.value.value === 0) return [];
+  const size = sizeOf(follow, readings.fact, readings.unit as Unit, common, notes);
+  if (size === null) return [];
+  const column = readings.fact.name;
+  if (size.kind === "offset") {
+    return [{ name: `offset of ${column}`, shift: new Float64Array(value.length).fill(size.u) }];
+  }
+  return [{ name: `scale of ${column}`, shift: value.map((reading) => reading * size.u) }];
+}
+
+type Size = { readonly kind: "offset" | "share"; readonly u: number };
+
+/** An uncertainty line of a column: in the column's unit an offset (SI), in per cent a share of the reading. */
+function sizeOf(
+  follow: Follow,
+  column: ColumnFact,
+  unit: Unit,
+  { value, origin }: Fact<Quantity>,
+  notes: Notes,
+): Size | null {
+  if (value.unit.text !== "" && isKind(value.unit, "number")) return { kind: "share", u: value.value };
+  if (sameDimension(value.unit.dimension, unit.dimension)) {
+    return { kind: "offset", u: intervalToSI(fromSI(value.value, value.unit), value.unit) };
+  }
+  const args = { unit: value.unit.text, column: column.name, columnUnit: unit.text };
+  note(notes, follow.id, problem("uncertainty-wrong-unit", args, origin));
+  return null;
+}

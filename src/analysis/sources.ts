@@ -1,0 +1,18 @@
+import type { Run } from "../contract/findings.js";
+import type { EndContext } from "./endPoints.js";
+import { shownQuantity } from "./shown.js";
+
+type FollowSource = Run["follow"][number]["sources"][number];
+
+/** What the uncertainty of a signal is made of, as the description states it. */
+export function sourcesOf({ run, follow, signal }: EndContext): FollowSource[] {
+  const fact = run.data?.columns.find(({ name }) => name === follow.column);
+  const sources: FollowSource[] = [];
+  if (fact?.random && signal.random !== null) {
+    sources.push({ name: `readings of ${follow.column}`, kind: "random", u: shownQuantity(fact.random.value) });
+  }
+  for (const { name } of signal.common) {
+    if (fact?.common) sources.push({ name, kind: "common", u: shownQuantity(fact.common.value) });
+  }
+  return sources;
+}

@@ -1,0 +1,6 @@
+import type { Command } from "./command.js";
+import { check } from "./commands/check.js";
+import { report } from "./commands/report.js";
+
+/** Every command, in the order of the help. */
+export const commands: readonly Command[] = [check, report];

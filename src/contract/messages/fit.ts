@@ -1,0 +1,116 @@
+import { message } from "../message.js";
+
+/** Problems that only the readings can show: signals, rates and fits. */
+export const fitMessages = {
+  "run-lacks-time": message<{ run: string; file: string }>(
+    "error",
+    "No column of a run is a time.",
+    ({ run, file }) =>
+      `Run ${run} has no column of time in ${file}. Declare it with its unit, for example: column t "time / s" s`,
+  ),
+  "run-times": message<{ run: string; column: string; others: string }>(
+    "information",
+    "Several columns of a run are times; the first counts.",
+    ({ run, column, others }) => `Run ${run} counts time by column ${column}; ${others} is a time too and is not used.`,
+  ),
+  "column-lacks-unit": message<{ column: string; kind: string; samples: string }>(
+    "error",
+    "A column has no unit, neither in the header nor on its line.",
+    ({ column, kind, samples }) =>
+      `Column ${column} states no unit, neither in the header nor here; ${kind} needs one (${samples}).`,
+  ),
+  "signal-wrong-unit": message<{ column: string; unit: string; unitKind: string; monitor: string; samples: string }>(
+    "error",
+    "The column that is followed is of another kind than the signal it stands for.",
+    ({ column, unit, unitKind, monitor, samples }) =>
+      `Column ${column} is in ${unit}, ${unitKind}; ${monitor} needs another (${samples}). Follow another column, or correct its unit.`,
+  ),
+  "signal-needs-formula": message<{ column: string; unit: string; species: string }>(
+    "error",
+    "A mass concentration stands for an amount concentration, but the molar mass is not known.",
+    ({ column, unit, species }) =>
+      `Column ${column} is in ${unit}, mass per volume; without the formula of ${species} no concentration follows. Declare it: species ${species} is C4H8O2 (say).`,
+  ),
+  "uncertainty-wrong-unit": message<{ unit: string; column: string; columnUnit: string }>(
+    "error",
+    "The uncertainty of a column is in a unit of another kind than the column.",
+    ({ unit, column, columnUnit }) =>
+      `The uncertainty is in ${unit}, the readings of column ${column} are in ${columnUnit}. Give it in ${columnUnit}, or in %.`,
+  ),
+  "column-not-numbers": message<{ file: string; column: string; bad: number; rows: number }>(
+    "error",
+    "Most cells of a used column are not numbers, so nothing of it is used.",
+    ({ file, column, bad, rows }) =>
+      `${bad} of ${rows} cells of column ${column} in ${file} are not numbers, so none of it is used. Name the right column, or mend the file.`,
+  ),
+  "uncertainty-of-zero": message<{ column: string }>(
+    "warning",
+    "A relative uncertainty gives a reading of zero no uncertainty, so readings cannot be weighed by it.",
+    ({ column }) =>
+      `In per cent, a reading of zero in column ${column} would be exact, so the readings are weighed alike. State the uncertainty in the unit of the column.`,
+  ),
+  "rate-outside-readings": message<{ time: string; from: string; to: string }>(
+    "error",
+    "A rate is wanted at a time at which nothing was read.",
+    ({ time, from, to }) =>
+      `There is no reading at ${time}: the readings go from ${from} to ${to}. Choose a time between.`,
+  ),
+  "rate-few-readings": message<{ count: number; need: number }>(
+    "warning",
+    "Too few readings for a slope.",
+    ({ count, need }) =>
+      `${count} usable readings are too few for this rate; it takes ${need} at different times. Read more often.`,
+  ),
+  "rate-initial-late": message<{ share: string }>(
+    "warning",
+    "The readings that an initial rate has to use cover so much of the reaction that the rate comes out low.",
+    ({ share }) =>
+      `The first readings cover ${share} of the reaction, so the initial rate may be low by several per cent. Read more often at the beginning.`,
+  ),
+  "fit-refused": message<{ fit: string; reason: string; remedy: string }>(
+    "warning",
+    "The readings cannot give what a fit asks for; no number comes out that looks as if they could.",
+    ({ fit, reason, remedy }) => `${fit} gives no rate constant: ${reason}. ${remedy}`,
+  ),
+  "fit-few-half-lives": message<{ halfLives: string; percent: string }>(
+    "warning",
+    "With a free infinity the readings must follow the reaction for some three half-lives.",
+    ({ halfLives, percent }) =>
+      `The readings follow the reaction for ${halfLives} half-lives only, so k and the free infinity can hardly be told apart (u(k) is ${percent}). Follow it longer, or state the infinity.`,
+  ),
+  "fit-very-few-half-lives": message<{ halfLives: string; percent: string }>(
+    "warning",
+    "With a free infinity and under two half-lives, the rate constant is hardly determined.",
+    ({ halfLives, percent }) =>
+      `Do not rely on this k alone: the readings follow the reaction for ${halfLives} half-lives, under two, and the infinity is free (u(k) is ${percent}). Follow it to three half-lives or more, or state the infinity.`,
+  ),
+  "fit-infinity-at-bound": message<{ limit: string }>(
+    "warning",
+    "A free infinity ran into what stoichiometry allows.",
+    ({ limit }) =>
+      `The free infinity ran to ${limit}, the furthest that what was taken allows, and was held there. Check what was taken, the unit of the column and the window.`,
+  ),
+  "fit-residuals-run": message<{ p: string }>(
+    "warning",
+    "The residuals keep their sign for too long: the curve does not follow the readings.",
+    ({ p }) =>
+      `The residuals change sign too seldom for chance (runs test, p = ${p}): the law does not follow the readings, or they drift. The stated uncertainty of k is then too small.`,
+  ),
+  "fit-end-unknown": message<{ end: string; species: string; missing: string }>(
+    "error",
+    "A start or infinity is fixed by what was taken, but that does not follow.",
+    ({ end, species, missing }) =>
+      `The ${end} of ${species} does not follow from what was taken: ${missing}. State its value, or write: ${end} free`,
+  ),
+  "fit-end-wrong-unit": message<{ end: string; unit: string; column: string; columnUnit: string }>(
+    "error",
+    "A fixed start or infinity is in a unit of another kind than the signal.",
+    ({ end, unit, column, columnUnit }) =>
+      `The ${end} is in ${unit === "" ? "no unit" : unit}, the readings of column ${column} are in ${columnUnit}. Give it in ${columnUnit}.`,
+  ),
+  "not-computed-yet": message<{ what: string }>(
+    "information",
+    "A part of a description that is read and kept but that nothing computes yet.",
+    ({ what }) => `${what} is understood and kept; not computed yet.`,
+  ),
+} as const;

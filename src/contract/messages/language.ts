@@ -1,0 +1,199 @@
+import { message } from "../message.js";
+
+export const languageMessages = {
+  "word-unknown": message(
+    "error",
+    "A line begins with a word the language does not have there.",
+    ({ word, allowed }: { word: string; allowed: string }) =>
+      `“${word}” begins no line here. A line here begins with ${allowed}.`,
+  ),
+  "keyword-capitals": message(
+    "error",
+    "Keywords of the language are written in small letters.",
+    ({ word }: { word: string }) => `Keywords are written small: ${word}.`,
+  ),
+  "line-incomplete": message(
+    "error",
+    "A line ends before everything it needs is there.",
+    ({ before, wanted, example }: { before: string; wanted: string; example: string }) =>
+      `After “${before}” ${wanted} is missing. For example: ${example}`,
+  ),
+  "line-unexpected": message(
+    "error",
+    "Something stands on a line where something else was expected.",
+    ({ found, before, wanted }: { found: string; before: string; wanted: string }) =>
+      `“${found}” is not understood after “${before}”; ${wanted} is expected there.`,
+  ),
+  "line-left-over": message(
+    "error",
+    "A line goes on where it should end.",
+    ({ found, example }: { found: string; example: string }) =>
+      `The line should end before “${found}”. One line holds one fact, for example: ${example}`,
+  ),
+  "line-break-missing": message(
+    "error",
+    "Two facts stand on one line.",
+    ({ word }: { word: string }) => `Start a new line before “${word}”.`,
+  ),
+  "line-misplaced": message(
+    "error",
+    "A line stands where nothing takes it.",
+    ({ head, owner }: { head: string; owner: string }) =>
+      `“${head}” belongs below a ${owner} line, and none is open here. Move it there.`,
+  ),
+  "line-twice": message(
+    "error",
+    "A fact is stated twice in one place.",
+    ({ what, line }: { what: string; line: number }) =>
+      `${what} is stated twice here; it already stands on line ${line}. Keep one of the two.`,
+  ),
+  "string-open": message(
+    "error",
+    "A quotation mark is not closed on its line.",
+    (_: Record<string, never>) => "The quotation mark is not closed. Text in quotes ends on the line where it begins.",
+  ),
+  "name-malformed": message(
+    "error",
+    "A name holds a character that names cannot have, or is one of the language's connecting words.",
+    ({ name, what }: { name: string; what: string }) =>
+      `“${name}” cannot be the name of a ${what}. Names are made of letters, digits, _, - and ′, and are none of the words in, from, as, at, to, of, is, by, like, using, and, with, after, within.`,
+  ),
+  "name-twice": message(
+    "error",
+    "A name is declared twice.",
+    ({ what, name, line }: { what: string; name: string; line: number }) =>
+      `There is already a ${what} ${name}, on line ${line}. Give this one another name.`,
+  ),
+  "name-unknown": message(
+    "error",
+    "A line refers to a name that nothing declares.",
+    ({ what, name, known }: { what: string; name: string; known: string }) =>
+      `There is no ${what} ${name} here${known}.`,
+  ),
+  "date-malformed": message(
+    "error",
+    "Dates are written year first.",
+    ({ found }: { found: string }) => `“${found}” is not a date. Dates are written year-month-day, as in 2026-11-03.`,
+  ),
+  "version-unknown": message(
+    "error",
+    "The description asks for a version of the language that this program does not know.",
+    ({ version }: { version: string }) =>
+      `This program reads version 1 of the language, not ${version}. Write: ratewright 1`,
+  ),
+  "version-not-first": message(
+    "error",
+    "The version of the language stands on the first line or nowhere.",
+    (_: Record<string, never>) => "“ratewright 1” is the first line of a description. Move it to the top.",
+  ),
+  "number-below-zero": message(
+    "error",
+    "A quantity is negative, or zero, that cannot be.",
+    ({ what, limit }: { what: string; limit: string }) => `${what} must be ${limit}.`,
+  ),
+  "order-in-words": message(
+    "error",
+    "The order of a reaction is given as a number, and in one species.",
+    ({ example }: { example: string }) => `Give the order as a number and say in what: ${example}.`,
+  ),
+  "like-itself": message(
+    "error",
+    "A run starts like itself.",
+    ({ run }: { run: string }) => `Run ${run} cannot start like itself. Name a run above it.`,
+  ),
+  "like-later": message(
+    "error",
+    "A run starts like one that stands below it.",
+    ({ run, like }: { run: string; like: string }) =>
+      `Run ${like} stands below run ${run}; a run can only start like one above it. Move run ${like} up.`,
+  ),
+  "run-lacks-data": message(
+    "error",
+    "A run follows a column but names no data file.",
+    ({ run }: { run: string }) =>
+      `Run ${run} has no data line, so there is no column to follow. Add: data "data/${run}.csv"`,
+  ),
+  "run-lacks-follow": message(
+    "error",
+    "A rate or a fit is wanted of a run that follows nothing.",
+    ({ run, example }: { run: string; example: string }) =>
+      `Run ${run} does not say what was followed, so no rate can come out. Add: ${example}`,
+  ),
+  "run-lacks-reaction": message(
+    "error",
+    "A run follows a species but no reaction is given.",
+    ({ run }: { run: string }) =>
+      `Run ${run} has no reaction to follow. Write one above the first run, for example: reaction 2 H2O2 -> 2 H2O + O2`,
+  ),
+  "run-lacks-volume": message(
+    "error",
+    "An amount or a mass was taken, but without the volume no concentration follows from it.",
+    ({ run, species }: { run: string; species: string }) =>
+      `Run ${run} gives ${species} as an amount or a mass, but not the volume it was made up to. Add a line: volume 50.00 mL`,
+  ),
+  "run-lacks-temperature": message(
+    "information",
+    "A rate constant is wanted of a run whose temperature is not stated.",
+    ({ run }: { run: string }) =>
+      `Run ${run} states no temperature; a rate constant belongs to one. Add a line: temperature 25.0 °C`,
+  ),
+  "run-wants-nothing": message(
+    "information",
+    "A run follows a signal but asks for no rate and no fit.",
+    ({ run }: { run: string }) =>
+      `Nothing is wanted of run ${run} yet. Add a line such as: rate initial, or: fit order 1 in A`,
+  ),
+  "taken-needs-formula": message(
+    "error",
+    "A mass stands for an amount, but the molar mass is not known.",
+    ({ species }: { species: string }) =>
+      `The amount of ${species} does not follow from its mass without its formula. Declare it (species ${species} is C4H8O2, say), or give an amount or a concentration.`,
+  ),
+  "taken-takes-no-part": message(
+    "information",
+    "Something was put in that does not stand in the reaction and has no role.",
+    ({ species }: { species: string }) =>
+      `${species} takes no part in the reaction as it is written. Say what it is there for: as catalyst, as inert or as buffer.`,
+  ),
+  "formula-left-over": message(
+    "error",
+    "Something follows a species without a space.",
+    ({ formula, rest }: { formula: string; rest: string }) =>
+      `“${rest}” behind ${formula} is not part of a formula. Put a space between, or correct the formula.`,
+  ),
+  "balance-unchecked": message(
+    "information",
+    "The balance of a reaction is checked only where every species has a formula.",
+    ({ species }: { species: string }) =>
+      `The balance is not checked, since no formula is known of ${species}. Give it on its species line: species dye is C25H30N3Cl, say.`,
+  ),
+  "follow-not-in-reaction": message(
+    "error",
+    "The species that is followed does not stand in the reaction.",
+    ({ species, there }: { species: string; there: string }) =>
+      `${species} takes no part in the reaction, so its concentration tells nothing about it. Follow one of ${there}.`,
+  ),
+  "follow-blind": message(
+    "error",
+    "The species that is followed comes out of the reaction as it went in.",
+    ({ species }: { species: string }) =>
+      `The reaction neither uses up nor forms ${species} on balance: its concentration cannot show the reaction. Follow another species.`,
+  ),
+  "fit-not-in-reaction": message(
+    "error",
+    "A rate law is wanted in a species that the reaction does not use up.",
+    ({ species, there }: { species: string; there: string }) =>
+      `The reaction does not use up ${species}, so no order in it can be fitted to this run. Fit the order in ${there}.`,
+  ),
+  "fit-not-computed": message(
+    "information",
+    "A rate law is written that is not computed yet.",
+    ({ law }: { law: string }) => `“${law}” is understood and kept; not computed yet. Order 1 is.`,
+  ),
+  "span-empty": message(
+    "error",
+    "A time span ends before it begins.",
+    ({ from, to }: { from: string; to: string }) =>
+      `The span from ${from} to ${to} is empty: the later time comes second.`,
+  ),
+} as const;

@@ -1,0 +1,4 @@
+import { version as packageVersion } from "../../package.json";
+
+/** Version of the program, as findings and records state it. */
+export const version: string = packageVersion;

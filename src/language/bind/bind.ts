@@ -1,0 +1,128 @@
+import { readSpecies } from "../../chemistry/readSpecies.js";
+import { type Problem, problem, replacement } from "../../contract/problem.js";
+import { nearest } from "../../quantity/nearest.js";
+import { isFault } from "../../quantity/shifted.js";
+import type { Reaction } from "../../study/reaction.js";
+import type { RunSource, Study } from "../../study/study.js";
+import { isBroken, numberOf, originOf, textOf } from "../fields.js";
+import type { Parsed } from "../parse.js";
+import type { Statement } from "../syntax.js";
+import { type Binding, type NameUse, report } from "./binding.js";
+import { bindReactions } from "./bindReaction.js";
+import { bindRun } from "./bindRun.js";
+import { checkRun } from "./checkRun.js";
+import { declareSpecies } from "./declareSpecies.js";
+import { checkRepeats, type KeyOf, mergeLines } from "./effectiveLines.js";
+
+/** What a description means, and everything the text alone can tell is wrong with it, in the order of the text. */
+export interface Bound {
+  readonly parsed: Parsed;
+  readonly study: Study;
+  readonly problems: readonly Problem[];
+  readonly uses: readonly NameUse[];
+}
+
+/** Gives a parsed description its meaning. Never fails: what means nothing is left out and said. */
+export function bind(parsed: Parsed): Bound {
+  const { uri, statements } = parsed;
+  const withHead = (head: string): Statement[] => statements.filter(({ line }) => line.row?.head === head);
+  const problems = new Map<string, Problem>();
+  const uses: NameUse[] = [];
+  const declared = declareSpecies(uri, problems, uses, withHead("species"));
+  const gathering: Binding = { uri, problems, uses, declared, salvaged: new Set<string>() };
+  const { reactions, salvaged } = bindReactions(gathering, withHead("reaction"));
+  const binding: Binding = { ...gathering, salvaged };
+  const keyOf = speciesKeys(binding);
+  checkVersion(binding, parsed);
+  checkRepeats(binding, parsed.index, statements, keyOf);
+  const runs = bindRuns(binding, parsed, reactions, keyOf);
+  const study: Study = { uri, reactions, species: [...declared.values()], runs };
+  const all = [...parsed.problems, ...problems.values()];
+  all.sort((a, b) => a.origin.start - b.origin.start || a.origin.end - b.origin.end);
+  return { parsed, study, problems: all, uses };
+}
+
+function bindRuns(binding: Binding, parsed: Parsed, reactions: readonly Reaction[], keyOf: KeyOf): RunSource[] {
+  const defaults: Statement[] = [];
+  const effective = new Map<string, readonly Statement[]>();
+  const runs: RunSource[] = [];
+  const headers = parsed.statements.filter(({ line }) => line.row?.head === "run");
+  const reactionWritten = parsed.statements.some(({ line }) => line.row?.head === "reaction");
+  for (const statement of parsed.statements) {
+    const { row } = statement.line;
+    if (row?.opens !== "run") {
+      if (row?.owners.includes("run")) defaults.push(statement);
+      continue;
+    }
+    const name = textOf(statement, "run");
+    if (name !== null) declareRun(binding, statement, name);
+    const base = inheritedLines(binding, statement, headers, effective) ?? defaults;
+    const lines = mergeLines(base, statement.children, keyOf);
+    if (name === null || isBroken(statement) || effective.has(name)) continue;
+    effective.set(name, lines);
+    const run = bindRun(binding, statement, lines, reactions);
+    checkRun(binding, run, lines, reactionWritten);
+    runs.push({ kind: "run", run });
+  }
+  return runs;
+}
+
+function declareRun(binding: Binding, statement: Statement, name: string): void {
+  const origin = originOf(binding.uri, statement, "run");
+  binding.uses.push({ kind: "run", name, run: null, declares: true, origin });
+}
+
+/** The lines of the run a header starts from; null where it names none, or none that stands above it. */
+function inheritedLines(
+  binding: Binding,
+  header: Statement,
+  headers: readonly Statement[],
+  effective: ReadonlyMap<string, readonly Statement[]>,
+): readonly Statement[] | null {
+  const like = textOf(header, "like");
+  if (like === null || isBroken(header)) return null;
+  const origin = originOf(binding.uri, header, "like");
+  binding.uses.push({ kind: "run", name: like, run: null, declares: false, origin });
+  const lines = effective.get(like);
+  if (lines !== undefined) return lines;
+  const run = textOf(header, "run") ?? "";
+  const names = headers.flatMap((candidate) => textOf(candidate, "run") ?? []);
+  if (like === run) report(binding, problem("like-itself", { run }, origin));
+  else if (headers.some((other) => textOf(other, "run") === like && other.offset > header.offset)) {
+    report(binding, problem("like-later", { run, like }, origin));
+  } else if (!names.includes(like)) {
+    const others = names.filter((name) => name !== run);
+    const known = others.length === 0 ? "" : `; there are ${others.slice(0, 6).join(", ")}`;
+    const mend = nearest(like, others).map((near) => replacement(origin, near));
+    report(binding, problem("name-unknown", { what: "run", name: like, known }, origin, mend));
+  }
+  return null;
+}
+
+function checkVersion(binding: Binding, parsed: Parsed): void {
+  const first = parsed.statements[0];
+  for (const statement of parsed.statements) {
+    if (statement.line.row?.head !== "ratewright" || isBroken(statement)) continue;
+    const version = numberOf(statement, "version");
+    const origin = originOf(binding.uri, statement, "version");
+    if (version !== 1) {
+      report(binding, problem("version-unknown", { version: String(version) }, origin, [replacement(origin, "1")]));
+    }
+    if (statement !== first) report(binding, problem("version-not-first", {}, originOf(binding.uri, statement)));
+  }
+}
+
+/** Keys by which lines are told apart: species by what they are, everything else by its text. */
+function speciesKeys(binding: Binding): KeyOf {
+  const known = new Map<string, string>();
+  return (statement, field) => {
+    const text = textOf(statement, field);
+    if (text === null || field !== "species") return text;
+    const before = known.get(text);
+    if (before !== undefined) return before;
+    const reading = binding.declared.has(text) ? null : readSpecies(text);
+    const key = reading === null || isFault(reading) ? text : reading.key;
+    known.set(text, key);
+    return key;
+  };
+}

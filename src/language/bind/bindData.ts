@@ -1,0 +1,63 @@
+import type { Quantity } from "../../quantity/quantity.js";
+import type { Fact } from "../../study/fact.js";
+import type { ColumnFact, DataFile } from "../../study/run.js";
+import { isBroken, numberOf, originOf, quantityOf, textOf, unitOf } from "../fields.js";
+import type { Statement } from "../syntax.js";
+import type { Binding } from "./binding.js";
+
+/** The `data` line of a run with its columns. */
+export function bindData(binding: Binding, run: string, statement: Statement): DataFile | null {
+  const path = textOf(statement, "path");
+  if (path === null || isBroken(statement)) return null;
+  const columns = statement.children.filter((child) => child.line.row?.head === "column");
+  const skip = statement.children.find((child) => child.line.row?.head === "skip" && !isBroken(child));
+  return {
+    path,
+    pathOrigin: originOf(binding.uri, statement, "path"),
+    columns: columns.flatMap((column) => bindColumn(binding, run, column)),
+    delimiter: childText(statement, "delimiter", "delimiter"),
+    decimalComma: decimalComma(childText(statement, "decimal", "mark")),
+    skip: skip === undefined ? null : numberOf(skip, "lines"),
+    encoding: childText(statement, "encoding", "encoding"),
+    origin: originOf(binding.uri, statement),
+  };
+}
+
+function childText(statement: Statement, head: string, label: string): string | null {
+  const child = statement.children.find((candidate) => candidate.line.row?.head === head && !isBroken(candidate));
+  return child === undefined ? null : textOf(child, label);
+}
+
+function decimalComma(mark: string | null): boolean | null {
+  return mark === null ? null : mark === "comma";
+}
+
+function bindColumn(binding: Binding, run: string, statement: Statement): ColumnFact[] {
+  const { uri } = binding;
+  const name = textOf(statement, "column");
+  if (name === null) return [];
+  binding.uses.push({ kind: "column", name, run, declares: true, origin: originOf(uri, statement, "column") });
+  const number = numberOf(statement, "number");
+  const header = textOf(statement, "header");
+  if (isBroken(statement) || (number === null && header === null)) return [];
+  const unit = unitOf(statement, "unit");
+  return [
+    {
+      name,
+      by: {
+        value: number === null ? { header: header ?? "" } : { number },
+        origin: originOf(uri, statement, number === null ? "header" : "number"),
+      },
+      unit: unit === null ? null : { value: unit, origin: originOf(uri, statement, "unit") },
+      random: uncertainty(uri, statement, "random"),
+      common: uncertainty(uri, statement, "common"),
+      origin: originOf(uri, statement),
+    },
+  ];
+}
+
+function uncertainty(uri: string, column: Statement, head: "random" | "common"): Fact<Quantity> | null {
+  const statement = column.children.find((child) => child.line.row?.head === head && !isBroken(child));
+  const value = statement === undefined ? null : quantityOf(statement, "uncertainty");
+  return statement === undefined || value === null ? null : { value, origin: originOf(uri, statement) };
+}

@@ -1,0 +1,89 @@
+import { type Balance, balance } from "../../chemistry/balance.js";
+import { balanceFault } from "../../chemistry/balanceFault.js";
+import { type Equation, equationText, stoichiometricNumbers } from "../../chemistry/equation.js";
+import type { Formula } from "../../chemistry/formula.js";
+import { readEquation } from "../../chemistry/readEquation.js";
+import { problem } from "../../contract/problem.js";
+import type { Reaction } from "../../study/reaction.js";
+import { fieldOf, isBroken, originOf, textOf } from "../fields.js";
+import type { Statement } from "../syntax.js";
+import { type Binding, report, reportIn } from "./binding.js";
+
+/** The reactions of a file, and the species on their lines that could be read though the line is broken. */
+export function bindReactions(
+  binding: Binding,
+  lines: readonly Statement[],
+): { reactions: Reaction[]; salvaged: ReadonlySet<string> } {
+  const salvaged = new Set<string>();
+  const reactions = lines.flatMap((statement): Reaction[] => {
+    const field = fieldOf(statement, "equation");
+    if (field === null || isBroken(statement)) return [];
+    const reading = readEquation(field.text, (name) => binding.declared.has(name));
+    const origin = originOf(binding.uri, statement, "equation");
+    const name = textOf(statement, "reaction");
+    if (reading.equation === null) {
+      for (const fault of reading.faults) reportIn(binding, statement, field.span.start, fault);
+      for (const key of reading.species) salvaged.add(key);
+      return [{ ...nothing, name, text: field.text, origin }];
+    }
+    useNames(binding, statement, field.span.start, reading.equation);
+    checkBalance(binding, statement, field.text, field.span.start, reading.equation);
+    return [reactionOf(reading.equation, name, origin)];
+  });
+  return { reactions, salvaged };
+}
+
+/** A reaction of which nothing is known. */
+const nothing = {
+  reactants: [],
+  products: [],
+  numbers: new Map(),
+  states: new Map(),
+  reversible: false,
+  whole: false,
+} as const;
+
+function reactionOf(equation: Equation, name: string | null, origin: Reaction["origin"]): Reaction {
+  const keys = (terms: Equation["left"]): string[] => [...new Set(terms.map(({ species }) => species))];
+  return {
+    name,
+    text: equationText(equation),
+    reactants: keys(equation.left),
+    products: keys(equation.right),
+    numbers: stoichiometricNumbers(equation),
+    states: new Map(
+      [...equation.left, ...equation.right].flatMap(({ species, state }) => (state === null ? [] : [[species, state]])),
+    ),
+    reversible: equation.arrow === "<=>",
+    whole: true,
+    origin,
+  };
+}
+
+function useNames(binding: Binding, statement: Statement, at: number, equation: Equation): void {
+  for (const { species, speciesSpan } of [...equation.left, ...equation.right]) {
+    if (!binding.declared.has(species)) continue;
+    const start = statement.offset + at + speciesSpan.start;
+    const origin = { uri: binding.uri, start, end: statement.offset + at + speciesSpan.end };
+    binding.uses.push({ kind: "species", name: species, run: null, declares: false, origin });
+  }
+}
+
+/** Balances looked up before, by the equation's text and the formulas behind its names: they are not cheap. */
+const balanced = new Map<string, Balance>();
+
+function checkBalance(binding: Binding, statement: Statement, text: string, at: number, equation: Equation): void {
+  const formulaOf = (key: string): Formula | null => binding.declared.get(key)?.formula ?? null;
+  const names = [...equation.left, ...equation.right].map(({ species }) => formulaOf(species)?.text ?? "");
+  const key = `${text} | ${names.join(" ")}`;
+  const result = balanced.get(key) ?? balance(equation, formulaOf);
+  if (balanced.size > 1_000) balanced.clear();
+  balanced.set(key, result);
+  if (result.kind === "unchecked") {
+    const species = result.species.join(", ");
+    report(binding, problem("balance-unchecked", { species }, originOf(binding.uri, statement, "equation")));
+    return;
+  }
+  const found = balanceFault(equation, result, text);
+  if (found !== null) reportIn(binding, statement, at, found);
+}

@@ -1,0 +1,32 @@
+import { type Fault, fault, type Span } from "../contract/problem.js";
+import { checkDimension } from "../quantity/checkDimension.js";
+import type { Quantity } from "../quantity/quantity.js";
+import { type KindOfQuantity, type QuantityKind, quantityKinds } from "./quantityKinds.js";
+
+/** A quantity as it was read, with where its number and its unit stand in the text. */
+export interface WrittenQuantity {
+  readonly quantity: Quantity;
+  readonly number: Span;
+  readonly unit: Span | null;
+}
+
+/** Null where a quantity is what its line wants, else the fault: dimension first, then sign. */
+export function checkQuantity(written: WrittenQuantity, text: string, kind: QuantityKind): Fault | null {
+  const { name, dimensions, atLeast }: KindOfQuantity = quantityKinds[kind];
+  const { quantity } = written;
+  if (dimensions !== null) {
+    const span = written.unit ?? written.number;
+    const shown = written.unit === null ? undefined : text.slice(written.unit.start, written.unit.end);
+    const wrong = checkDimension(written.unit === null ? null : quantity.unit, { name, dimensions }, span, shown);
+    if (wrong !== null) return wrong;
+  }
+  const span = { start: 0, end: text.length };
+  if (atLeast === "zero" && quantity.value < 0) {
+    const limit = kind === "temperature" ? "above absolute zero" : "zero or more";
+    return fault("number-below-zero", { what: name, limit }, span);
+  }
+  if (atLeast === "above zero" && quantity.value <= 0) {
+    return fault("number-below-zero", { what: name, limit: "more than zero" }, span);
+  }
+  return null;
+}

@@ -1,0 +1,101 @@
+import { type Fault, fault, type Problem, placed, replacement } from "../contract/problem.js";
+import { nearest } from "../quantity/nearest.js";
+import { describeHeads } from "./describeHeads.js";
+import { type LineIndex, lineIndex } from "./lineIndex.js";
+import { parseLine } from "./parseLine.js";
+import type { Part } from "./shape.js";
+import { headsBelow, type Owner, type StatementRow, statementByHead } from "./statements.js";
+import type { LineStatement, Statement } from "./syntax.js";
+
+/** A description as it is written: its lines, each below the header it belongs to, and what is wrong with them. */
+export interface Parsed {
+  readonly uri: string;
+  readonly text: string;
+  readonly index: LineIndex;
+  /** lines directly in the file, in order; what stands above the first run holds for every run */
+  readonly statements: readonly Statement[];
+  readonly problems: readonly Problem[];
+  /** what could come next at the end of the text */
+  readonly wantedAtEnd: readonly Part[];
+}
+
+interface Open {
+  readonly owner: Owner;
+  readonly children: Statement[];
+}
+
+interface State {
+  readonly uri: string;
+  readonly problems: Problem[];
+  readonly open: Open[];
+  runSeen: boolean;
+}
+
+/** Parses a whole text. Never fails: it returns a tree and problems. Spans are UTF-16 units from the text's start. */
+export function parse(uri: string, text: string): Parsed {
+  const index = lineIndex(text);
+  const file: Open = { owner: "file", children: [] };
+  const state: State = { uri, problems: [], open: [file], runSeen: false };
+  let wantedAtEnd: readonly Part[] = [];
+  index.starts.forEach((offset, number) => {
+    const next = index.starts[number + 1] ?? text.length;
+    const line = withoutBreak(text, offset, next);
+    const parsed = parseLine(line);
+    wantedAtEnd = parsed.wanted;
+    if (parsed.fault !== null) state.problems.push(placed(parsed.fault, uri, offset));
+    for (const statement of parsed.statements) attach(state, statement, offset);
+  });
+  return { uri, text, index, statements: file.children, problems: state.problems, wantedAtEnd };
+}
+
+function withoutBreak(text: string, start: number, next: number): string {
+  let end = next;
+  while (end > start && (text.charCodeAt(end - 1) === 0x0a || text.charCodeAt(end - 1) === 0x0d)) end--;
+  return text.slice(start, end);
+}
+
+/** Puts a statement below the nearest open header that lists it. */
+function attach(state: State, line: LineStatement, offset: number): void {
+  const known = line.row === null ? guess(state, line, offset) : line;
+  if (known === null || known.row === null) return;
+  const { row } = known;
+  const depth = state.open.findLastIndex((candidate) => takes(state, candidate.owner, row));
+  const owner = state.open[depth];
+  if (owner === undefined) {
+    if (known.fault === null) state.problems.push(placed(misplaced(row, known), state.uri, offset));
+    return;
+  }
+  const statement: Statement = { line: known, offset, owner: owner.owner, children: [] };
+  owner.children.push(statement);
+  state.open.length = depth + 1;
+  if (row.opens !== undefined) state.open.push({ owner: row.opens, children: statement.children });
+  if (row.opens === "run") state.runSeen = true;
+}
+
+/** A run's lines stand directly in the file only above the first run: there they hold for every run. */
+function takes(state: State, owner: Owner, row: StatementRow): boolean {
+  if (!row.owners.includes(owner)) return false;
+  return owner !== "file" || !state.runSeen || !row.owners.includes("run");
+}
+
+function misplaced(row: StatementRow, line: LineStatement): Fault {
+  const owners = row.owners.filter((owner) => owner !== "file");
+  return fault("line-misplaced", { head: row.head, owner: owners.join(" or ") }, line.head);
+}
+
+/**
+ * A first word that is not known: says so, offers the nearest one allowed here, and takes the line for that one so
+ * that the lines below it do not slide below a wrong header.
+ */
+function guess(state: State, line: LineStatement, offset: number): LineStatement | null {
+  const allowed = [...new Set(state.open.toReversed().flatMap((open) => headsBelow(open.owner)))].filter((head) => {
+    const row = statementByHead.get(head);
+    return row !== undefined && state.open.some((open) => takes(state, open.owner, row));
+  });
+  const near = nearest(line.head.text, allowed)[0] ?? null;
+  const mend = near === null ? [] : [replacement(line.head, near)];
+  const unknown = fault("word-unknown", { word: line.head.text, allowed: describeHeads(allowed) }, line.head, mend);
+  state.problems.push(placed(unknown, state.uri, offset));
+  const row = near === null ? undefined : statementByHead.get(near);
+  return row === undefined ? null : { ...line, row, fault: unknown };
+}

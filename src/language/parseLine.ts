@@ -1,0 +1,114 @@
+import { type Fault, fault, replacement, type Span } from "../contract/problem.js";
+import { lexLine, type Token } from "./lexer.js";
+import { type Cursor, fail, readParts } from "./readParts.js";
+import { type StatementRow, statementByHead } from "./statements.js";
+import type { LineStatement, ParsedLine } from "./syntax.js";
+
+/** Lines read before, by their text: an edit re-reads only the lines it touched. */
+const readBefore = new Map<string, ParsedLine>();
+const mostKept = 50_000;
+
+/** Reads one line by itself (without its line break). Never fails: what is wrong with it is in `fault`. */
+export function parseLine(text: string): ParsedLine {
+  const known = readBefore.get(text);
+  if (known !== undefined) return known;
+  if (readBefore.size >= mostKept) readBefore.clear();
+  const parsed = readLine(text);
+  readBefore.set(text, parsed);
+  return parsed;
+}
+
+function readLine(text: string): ParsedLine {
+  const tokens = lexLine(text).filter((token) => token.kind !== "comment");
+  const statements: LineStatement[] = [];
+  let cursor: Cursor | null = null;
+  let at = 0;
+  while (at < tokens.length) {
+    const first = tokens[at] as Token;
+    cursor = { text, tokens, at: at + 1, fields: new Map(), fault: null, wanted: [], before: first.text };
+    const row = rowOf(first, cursor);
+    if (row === null) {
+      statements.push(statement(null, first, cursor, tokens.length));
+      break;
+    }
+    readParts(cursor, row.parts, row);
+    const end = cursor.fault === null ? cursor.at : endAfterFault(cursor);
+    const next = tokens[end];
+    if (cursor.fault === null && next !== undefined && !beginsLine(next)) leftOver(cursor, next, row);
+    if (cursor.fault !== null && row.slips !== undefined) cursor.fault = slip(cursor, row, first) ?? cursor.fault;
+    const last = cursor.fault === null ? end : endAfterFault(cursor);
+    statements.push(statement(row, first, cursor, last));
+    at = last;
+  }
+  return { statements, fault: lineFault(text, statements), wanted: cursor?.wanted ?? [] };
+}
+
+function rowOf(first: Token, cursor: Cursor): StatementRow | null {
+  if (first.kind !== "word") return null;
+  const row = statementByHead.get(first.text);
+  if (row !== undefined) return row;
+  const small = statementByHead.get(first.text.toLowerCase());
+  if (small === undefined) return null;
+  cursor.fault = fault("keyword-capitals", { word: small.head }, first, [replacement(first, small.head)]);
+  return small;
+}
+
+/** The first fault of the line speaks for it; where there is none, a missing line break. */
+function lineFault(text: string, statements: readonly LineStatement[]): Fault | null {
+  const broken = statements.find((candidate) => candidate.fault !== null);
+  if (broken?.fault) return broken.fault;
+  const second = statements[1];
+  if (second === undefined) return null;
+  const gap = { start: text.slice(0, second.head.start).trimEnd().length, end: second.head.start };
+  return fault("line-break-missing", { word: second.head.text }, second.head, [
+    { text: `a new line before “${second.head.text}”`, edits: [{ ...gap, text: "\n" }] },
+  ]);
+}
+
+function leftOver(cursor: Cursor, next: Token, row: StatementRow): void {
+  const wanted = cursor.wanted.length > 0;
+  if (wanted) fail(cursor, next, row);
+  if (cursor.fault !== null) return;
+  const last = cursor.tokens[cursor.tokens.length - 1] as Token;
+  const span: Span = { start: next.start, end: last.end };
+  cursor.fault = fault(
+    "line-left-over",
+    { found: cursor.text.slice(span.start, span.end), example: row.example },
+    span,
+    [{ text: "", edits: [{ start: (cursor.tokens[cursor.at - 1] as Token).end, end: last.end, text: "" }] }],
+  );
+}
+
+function slip(cursor: Cursor, row: StatementRow, first: Token): Fault | null {
+  const rest = cursor.text.slice(first.end).trim();
+  const found = row.slips?.find((candidate) => candidate.pattern.test(rest));
+  const last = cursor.tokens[cursor.tokens.length - 1];
+  if (found === undefined || last === undefined) return null;
+  return found.say({ start: first.end + leadingSpace(cursor.text.slice(first.end)), end: last.end });
+}
+
+function leadingSpace(text: string): number {
+  return text.length - text.trimStart().length;
+}
+
+/** After a fault the rest of the line is passed over, down to a word that begins a line of its own. */
+function endAfterFault(cursor: Cursor): number {
+  let at = Math.max(cursor.at, 1);
+  while (at < cursor.tokens.length && !beginsLine(cursor.tokens[at] as Token)) at++;
+  return at;
+}
+
+function beginsLine(token: Token): boolean {
+  return token.kind === "word" && statementByHead.has(token.text);
+}
+
+function statement(row: StatementRow | null, first: Token, cursor: Cursor, end: number): LineStatement {
+  const last = cursor.tokens[end - 1] ?? first;
+  return {
+    row,
+    head: { text: first.text, start: first.start, end: first.end },
+    fields: cursor.fields,
+    span: { start: first.start, end: last.end },
+    fault: cursor.fault,
+  };
+}

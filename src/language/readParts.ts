@@ -1,0 +1,273 @@
+import { type Fault, fault, replacement, type Span } from "../contract/problem.js";
+import { nearest } from "../quantity/nearest.js";
+import { readNumber } from "../quantity/readNumber.js";
+import { readQuantity } from "../quantity/readQuantity.js";
+import { readUnit } from "../quantity/readUnit.js";
+import { isFault, shifted } from "../quantity/shifted.js";
+import { checkQuantity } from "./checkQuantity.js";
+import { describeParts, firstWords } from "./describePart.js";
+import type { Token } from "./lexer.js";
+import type { Part } from "./shape.js";
+import { type StatementRow, statementByHead } from "./statements.js";
+import type { Field } from "./syntax.js";
+
+/** Where the reading of a line stands. */
+export interface Cursor {
+  readonly text: string;
+  readonly tokens: readonly Token[];
+  at: number;
+  readonly fields: Map<string, Field>;
+  fault: Fault | null;
+  /** parts that could come at `at` but were not there */
+  wanted: Part[];
+  /** the words read last, for messages */
+  before: string;
+}
+
+/** Reads the parts one after the other; stops at the first that does not fit and leaves the fault in the cursor. */
+export function readParts(cursor: Cursor, parts: readonly Part[], row: StatementRow): void {
+  for (const part of parts) {
+    if (cursor.fault !== null) return;
+    readPart(cursor, part, row);
+  }
+}
+
+function readPart(cursor: Cursor, part: Part, row: StatementRow): void {
+  if (part.part === "optional") {
+    if (begins(cursor, part.parts)) readParts(cursor, part.parts, row);
+    else if (part.parts[0] !== undefined) cursor.wanted.push(part.parts[0]);
+    return;
+  }
+  if (part.part === "either") {
+    const option = part.options.find((candidate) => begins(cursor, candidate));
+    if (option !== undefined) readParts(cursor, option, row);
+    else wantedButFound(cursor, part.options.map((candidate) => candidate[0]).filter(isPart), row);
+    return;
+  }
+  if (!begins(cursor, [part])) {
+    wantedButFound(cursor, [part], row);
+    return;
+  }
+  cursor.wanted = [];
+  const from = cursor.at;
+  readLeaf(cursor, part);
+  if (cursor.at > from) cursor.before = textOf(cursor, from, cursor.at);
+}
+
+function isPart(part: Part | undefined): part is Part {
+  return part !== undefined;
+}
+
+/** Whether what stands at the cursor can be the beginning of these parts. Looks one word ahead, two for `NAME is`. */
+function begins(cursor: Cursor, parts: readonly Part[]): boolean {
+  const [first, second] = parts;
+  if (first === undefined || !fits(cursor, first, cursor.at)) return false;
+  if (first.part === "name" && second?.part === "keyword") return fits(cursor, second, cursor.at + 1);
+  return true;
+}
+
+function fits(cursor: Cursor, part: Part, at: number): boolean {
+  const token = cursor.tokens[at];
+  if (token === undefined) return false;
+  switch (part.part) {
+    case "keyword":
+      return token.kind === "word" && token.text === part.word;
+    case "words":
+      return part.phrase.split(" ").every((word, index) => cursor.tokens[at + index]?.text === word);
+    case "string":
+      return token.kind === "string";
+    case "equation":
+      return token.kind !== "string";
+    case "integer":
+      return token.kind === "word" && /^\d+$/.test(token.text);
+    case "optional":
+      return begins(cursor, part.parts);
+    case "either":
+      return part.options.some((option) => begins(cursor, option));
+    default:
+      return token.kind === "word";
+  }
+}
+
+function readLeaf(cursor: Cursor, part: Part): void {
+  const token = cursor.tokens[cursor.at] as Token;
+  switch (part.part) {
+    case "keyword":
+      cursor.at++;
+      return;
+    case "words":
+      cursor.at += part.phrase.split(" ").length;
+      keep(cursor, part.label, { kind: "text", text: part.phrase, span: spanOf(cursor, token) });
+      return;
+    case "name":
+      cursor.at++;
+      readName(cursor, part.label, part.of, token);
+      return;
+    case "string":
+      cursor.at++;
+      if (token.open) cursor.fault = fault("string-open", {}, token, [closeQuote(token)]);
+      keep(cursor, part.label, { kind: "text", text: token.text, span: token });
+      return;
+    case "date":
+      cursor.at++;
+      if (!isDate(token.text)) cursor.fault = fault("date-malformed", { found: token.text }, token);
+      keep(cursor, part.label, { kind: "text", text: token.text, span: token });
+      return;
+    case "integer":
+      cursor.at++;
+      keep(cursor, part.label, { kind: "number", value: Number(token.text), text: token.text, span: token });
+      return;
+    case "number":
+      cursor.at++;
+      readPlainNumber(cursor, part.label, token, part);
+      return;
+    case "equation":
+      cursor.at = cursor.tokens.length;
+      keep(cursor, part.label, { kind: "text", ...slice(cursor, token, cursor.at) });
+      return;
+    case "unit":
+      readUnitWords(cursor, part.label, token);
+      return;
+    case "quantity":
+      readQuantityWords(cursor, part, token);
+      return;
+    default:
+      cursor.at++;
+      keep(cursor, (part as { label: string }).label, { kind: "text", text: token.text, span: token });
+  }
+}
+
+const connectives = new Set(
+  "in from as at to of is by like using and with after within reads purity density giving".split(" "),
+);
+
+function readName(cursor: Cursor, label: string, what: string, token: Token): void {
+  if (connectives.has(token.text) || !/^[\p{L}\p{N}_\-′']+$/u.test(token.text)) {
+    cursor.fault = fault("name-malformed", { name: token.text, what }, token);
+  }
+  keep(cursor, label, { kind: "text", text: token.text, span: token });
+}
+
+function readPlainNumber(cursor: Cursor, label: string, token: Token, part: Part): void {
+  const number = readNumber(token.text);
+  if (isFault(number)) {
+    if (/^[\d.,+−-]/.test(token.text)) cursor.fault = shifted(number, token.start);
+    else wantedButFound(cursor, [part], null, token);
+  } else if (number.end < token.text.length) {
+    wantedButFound(cursor, [part], null, token);
+  } else {
+    keep(cursor, label, { kind: "number", value: number.value, text: token.text, span: token });
+  }
+}
+
+function readUnitWords(cursor: Cursor, label: string, token: Token): void {
+  const end = endOfWords(cursor, cursor.at);
+  const written = slice(cursor, token, end);
+  const reading = readUnit(written.text);
+  cursor.at = end;
+  if (isFault(reading)) cursor.fault = shifted(reading, token.start);
+  else keep(cursor, label, { kind: "unit", unit: reading.unit, ...written });
+}
+
+function readQuantityWords(cursor: Cursor, part: Part & { part: "quantity" }, token: Token): void {
+  if (!/^[\d.+−-]/.test(token.text)) {
+    wantedButFound(cursor, [part], null, token);
+    return;
+  }
+  const end = endOfWords(cursor, cursor.at);
+  const written = slice(cursor, token, end);
+  const reading = readQuantity(written.text, part.label);
+  cursor.at = end;
+  if (isFault(reading)) {
+    cursor.fault = shifted(reading, token.start);
+    return;
+  }
+  const wrong = checkQuantity(reading, written.text, part.kind);
+  if (wrong !== null) cursor.fault = shifted(wrong, token.start);
+  const unitSpan = reading.unit === null ? null : moved(reading.unit, token.start);
+  keep(cursor, part.label, { kind: "quantity", quantity: reading.quantity, unitSpan, ...written });
+}
+
+/** Words that end a quantity or a unit. `within` does not: it belongs to the quantity. */
+const stopWords = new Set("and to at in of by as density purity giving using reads because from".split(" "));
+
+/** The index behind the words of a quantity or unit that begins at `from`. Inside brackets no word ends it. */
+function endOfWords(cursor: Cursor, from: number): number {
+  let depth = 0;
+  let at = from;
+  for (; at < cursor.tokens.length; at++) {
+    const token = cursor.tokens[at] as Token;
+    const partOfIt = token.kind === "word" || (token.kind === "operator" && token.text === "±");
+    if (!partOfIt) break;
+    if (at > from && depth === 0 && (stopWords.has(token.text) || statementByHead.has(token.text))) break;
+    for (const letter of token.text) depth += letter === "(" ? 1 : letter === ")" ? -1 : 0;
+  }
+  return at;
+}
+
+function wantedButFound(cursor: Cursor, parts: readonly Part[], row: StatementRow | null, found?: Token): void {
+  const token = found ?? cursor.tokens[cursor.at];
+  const all = found === undefined ? [...cursor.wanted, ...parts] : parts;
+  cursor.wanted = [...all];
+  const wanted = describeParts(all);
+  if (token === undefined) {
+    const last = cursor.tokens[cursor.tokens.length - 1] as Token;
+    const example = row?.example ?? statementByHead.get(cursor.tokens[0]?.text ?? "")?.example ?? "";
+    cursor.fault = fault("line-incomplete", { before: cursor.before, wanted, example }, last);
+    return;
+  }
+  const near = token.kind === "word" ? (nearest(token.text, firstWords(all))[0] ?? null) : null;
+  const mend = near === null ? [] : [replacement(token, near)];
+  cursor.fault = fault("line-unexpected", { found: token.text, before: cursor.before, wanted }, token, mend);
+}
+
+/** Says of a word that is left over what could have stood in its place. */
+export function fail(cursor: Cursor, next: Token, row: StatementRow): void {
+  if (nearest(next.text, firstWords(cursor.wanted)).length > 0) wantedButFound(cursor, [], row, undefined);
+}
+
+function keep(cursor: Cursor, label: string, field: Field): void {
+  cursor.fields.set(label, field);
+}
+
+function slice(cursor: Cursor, first: Token, end: number): { text: string; span: Span } {
+  const last = cursor.tokens[end - 1] ?? first;
+  return { text: cursor.text.slice(first.start, last.end), span: { start: first.start, end: last.end } };
+}
+
+function spanOf(cursor: Cursor, first: Token): Span {
+  return { start: first.start, end: (cursor.tokens[cursor.at - 1] ?? first).end };
+}
+
+function textOf(cursor: Cursor, from: number, to: number): string {
+  return slice(cursor, cursor.tokens[from] as Token, to).text;
+}
+
+function moved(span: Span, offset: number): Span {
+  return { start: span.start + offset, end: span.end + offset };
+}
+
+function closeQuote(token: Token) {
+  const end = token.start + 1 + token.text.trimEnd().length;
+  return { text: `"${token.text.trimEnd()}"`, edits: [{ start: end, end: token.end, text: '"' }] };
+}
+
+function isDate(text: string): boolean {
+  if (!/^\d{4}-\d{2}-\d{2}$/.test(text)) return false;
+  const [year, month, day] = text.split("-").map(Number) as [number, number, number];
+  const days = [
+    31,
+    (year % 4 === 0 && year % 100 !== 0) || year % 400 === 0 ? 29 : 28,
+    31,
+    30,
+    31,
+    30,
+    31,
+    31,
+    30,
+    31,
+    30,
+    31,
+  ];
+  return month >= 1 && month <= 12 && day >= 1 && day <= (days[month - 1] ?? 0);
+}

@@ -1,0 +1,44 @@
+import type { Description } from "../contract/findings.js";
+import { type Bound, bind } from "../language/bind/bind.js";
+import { parse } from "../language/parse.js";
+import { type ColumnStore, columnStore } from "./columnStore.js";
+import { describe } from "./describe.js";
+import type { DataFileState } from "./fileContent.js";
+
+/** All that the findings of a description follow from. Plain data, so that it can go to a worker. */
+export interface Job {
+  readonly uri: string;
+  readonly text: string;
+  readonly path: string;
+  /** the data files by their path as written */
+  readonly files: ReadonlyMap<string, DataFileState>;
+  readonly sizeLimit: number;
+  readonly curves: boolean;
+}
+
+/** Works out findings: here, or in a worker. Null when it was told to stop. */
+export interface Computer {
+  compute(job: Job, signal: AbortSignal): Promise<Description | null>;
+}
+
+/** Works in the same thread and gives way by `breathe`. */
+export function inlineComputer(breathe: () => Promise<void>, store: ColumnStore = columnStore()): Computer {
+  return {
+    async compute(job, signal) {
+      const stopped = (): boolean => signal.aborted;
+      const bound: Bound = bind(parse(job.uri, job.text));
+      const { path, files, sizeLimit, curves } = job;
+      const description = await describe(bound, { path, files, store, sizeLimit, curves, stopped, breathe });
+      return signal.aborted ? null : description;
+    },
+  };
+}
+
+/** Bytes of all data files of a job: what decides whether it is worth a worker. */
+export function sizeOfJob({ files }: Job): number {
+  let size = 0;
+  for (const state of files.values()) {
+    if ("outcome" in state && state.outcome.kind === "bytes") size += state.outcome.bytes.length;
+  }
+  return size;
+}
