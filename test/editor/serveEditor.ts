@@ -3,7 +3,7 @@ import type { AddressInfo } from "node:net";
 import { createCleanup } from "./cleanup.js";
 import { editorAddress } from "./editorAddress.js";
 import { startEditorServer } from "./editorServer.js";
-import { projectFolder } from "./projectFolder.js";
+import { stageExtension } from "./stageExtension.js";
 
 /** Serves the editor with the project's extension on a folder, prints its address, and goes on until Ctrl-C. */
 export async function serveEditor(workspace: string): Promise<void> {
@@ -16,7 +16,9 @@ export async function serveEditor(workspace: string): Promise<void> {
     const settings = { "workbench.startupEditor": "none", "chat.commandCenter.enabled": false };
     const editor = await startEditorServer({ settings, say });
     cleanup.add("end of the editor's server", editor.stop);
-    const page = editorAddress(editor.port, { workspace, extensionDevelopmentPath: projectFolder() });
+    const extension = stageExtension();
+    cleanup.add("removal of the copied extension", extension.remove);
+    const page = editorAddress(editor.port, { workspace, extensionDevelopmentPath: extension.path });
     // The editor's own address carries folder and extension and is too long for a terminal: a short one leads to it.
     const door = createServer((_, answer) => answer.writeHead(302, { location: page }).end());
     await new Promise<void>((done) => door.listen(0, "127.0.0.1", done));

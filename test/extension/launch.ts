@@ -4,17 +4,18 @@ import { cpSync, existsSync } from "node:fs";
 import { join } from "node:path";
 import { projectFolder } from "../editor/projectFolder.js";
 import { runTests } from "../editor/runTests.js";
+import { stageExtension } from "../editor/stageExtension.js";
 import { temporaryFolder } from "../editor/temporaryFolder.js";
 
 const [bundles, tallyFile] = process.argv.slice(2);
 if (bundles === undefined || tallyFile === undefined) throw new Error("wanted: folder of the bundles, tally file");
 
-const root = projectFolder();
+const extension = stageExtension();
 const workspace = temporaryFolder("workspace");
 try {
-  cpSync(process.env["RATEWRIGHT_SAMPLES"] ?? join(root, "samples"), workspace.path, { recursive: true });
+  cpSync(join(projectFolder(), "samples"), workspace.path, { recursive: true });
   process.exitCode = await runTests({
-    extensionDevelopmentPath: process.env["RATEWRIGHT_EXTENSION"] ?? root,
+    extensionDevelopmentPath: extension.path,
     extensionTestsPath: join(bundles, "index.cjs"),
     workspace: workspace.path,
     extensionTestsEnv: { RATEWRIGHT_TALLY: tallyFile },
@@ -23,4 +24,5 @@ try {
   if (!existsSync(tallyFile)) throw new Error("the extension host ended before its tests did");
 } finally {
   workspace.remove();
+  extension.remove();
 }

@@ -7,6 +7,7 @@ import { startEditorServer } from "../editor/editorServer.js";
 import { isHarmless } from "../editor/harmless.js";
 import { openBrowser } from "../editor/openBrowser.js";
 import { projectFolder } from "../editor/projectFolder.js";
+import { stageExtension } from "../editor/stageExtension.js";
 import { temporaryFolder } from "../editor/temporaryFolder.js";
 import { withDeadline } from "../editor/withDeadline.js";
 import { type ThemeKind, themes } from "./themes.js";
@@ -33,7 +34,7 @@ export interface Session {
 export interface SessionOptions {
   /** Folder whose copy is opened; the project's samples unless told. */
   samples?: string;
-  /** Folder of the extension; the project's own unless told. */
+  /** Folder of the extension; a copy of the project's, as it is shipped, unless told. */
   extension?: string;
   /** Where the extension runs: in Node, or in the page's web worker. */
   host?: "node" | "web";
@@ -61,7 +62,6 @@ const calm = {
 
 /** Opens the editor in the browser and answers the question of trust. Call `close` whatever happens after. */
 export async function openSession(options: SessionOptions = {}): Promise<Session> {
-  const root = projectFolder();
   const cleanup = createCleanup();
   const host = options.host ?? "node";
   const theme = themes[options.theme ?? "light"];
@@ -71,8 +71,10 @@ export async function openSession(options: SessionOptions = {}): Promise<Session
     const copies = temporaryFolder("person");
     cleanup.add("removal of the copied samples", copies.remove);
     const workspace = join(copies.path, "samples");
-    const samples = options.samples ?? process.env["RATEWRIGHT_SAMPLES"] ?? join(root, "samples");
+    const samples = options.samples ?? join(projectFolder(), "samples");
     cpSync(samples, workspace, { recursive: true });
+    const extension = stageExtension();
+    cleanup.add("removal of the copied extension", extension.remove);
     const say = (line: string) => console.log(line);
     const starting = startEditorServer({ settings: { ...always, ...options.settings }, say });
     const server = await withDeadline("start of the editor", openLimit, starting);
@@ -86,8 +88,9 @@ export async function openSession(options: SessionOptions = {}): Promise<Session
       const line = `${message.type()}: ${message.text()}`;
       if (!isHarmless(line)) lines.push(line);
     });
-    const extensionDevelopmentPath = options.extension ?? process.env["RATEWRIGHT_EXTENSION"] ?? root;
-    await page.goto(editorAddress(server.port, { workspace, extensionDevelopmentPath }));
+    await page.goto(
+      editorAddress(server.port, { workspace, extensionDevelopmentPath: options.extension ?? extension.path }),
+    );
     await answerTrust(page, options.trust ?? true);
     await page.locator(`.monaco-workbench.${theme.mark}`).waitFor({ state: "attached" });
     return {
