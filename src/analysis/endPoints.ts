@@ -2,6 +2,7 @@ import type { Problem } from "../contract/problem.js";
 import { problem } from "../contract/problem.js";
 import type { Relation } from "../monitor/monitor.js";
 import type { Signal } from "../monitor/signal.js";
+import { scatter } from "../numerics/noise.js";
 import { sameDimension } from "../quantity/dimension.js";
 import { combined } from "../quantity/quantity.js";
 import type { EndPoint, Follow, Run } from "../study/run.js";
@@ -33,7 +34,7 @@ export function resolveStart(context: EndContext, wish: EndPoint): ResolvedEnd |
 /**
  * The infinity: fixed at its stated value, else by stoichiometry; by stoichiometry too where nothing is said and the
  * followed species is the reactant that runs out of a reaction that does not go back; else free, within what
- * stoichiometry allows where that is known (three standard uncertainties wider).
+ * stoichiometry allows where that is known (see `slackOf`).
  */
 export function resolveInfinity(context: EndContext, wish: EndPoint): ResolvedEnd | Problem {
   const { run, follow, stoichiometry } = context;
@@ -68,9 +69,20 @@ function boundsOfInfinity(context: EndContext, exhausted: boolean): { low: numbe
   const number = run.reaction?.numbers.get(follow.species.key) ?? 0;
   if (end === null || number === 0) return none;
   const limit = signalOf(context, end);
-  const slack = 3 * (standardUncertainty(limit) ?? 0) + 3 * commonSize(context.signal);
+  const slack = slackOf(context, limit);
   const rises = number * context.relation.slope > 0;
   return rises ? { ...none, high: limit.value + slack } : { ...none, low: limit.value - slack };
+}
+
+/**
+ * How far an infinity may honestly lie beyond what stoichiometry allows: three standard uncertainties of what was taken
+ * and of what all readings share, twice the scatter of a reading, and the rounding of the numbers.
+ */
+function slackOf({ signal }: EndContext, limit: Uncertain): number {
+  const { value, time, random } = signal;
+  const scattered = random === null ? (scatter(time, value) ?? 0) : random.reduce((most, u) => Math.max(most, u), 0);
+  const size = value.reduce((most, reading) => Math.max(most, Math.abs(reading)), 0);
+  return 3 * (standardUncertainty(limit) ?? 0) + 3 * commonSize(signal) + 2 * scattered + 1e-6 * size;
 }
 
 /** Greatest shift that the common causes give any reading. */

@@ -12,6 +12,7 @@ import type { FitFinding, Refusal } from "./fitResult.js";
 import { type Notes, note } from "./notes.js";
 import { scaled, shownParameter, totalUncertainty } from "./parameter.js";
 import { residualFindings } from "./residualFindings.js";
+import { lineIn } from "./runInput.js";
 import { type ResultUnits, rateConstantUnit, shown } from "./shown.js";
 
 /** A fit as findings show it, or why it is none after all. What a person should know of it goes into the notes. */
@@ -59,7 +60,8 @@ export function judgeFit(
     verdict: "",
   };
   warn(context, wish, result, estimates, finding, notes);
-  return { finding: { ...finding, verdict: verdictOf(finding, (kPrime * last) / log(2)) }, estimates };
+  const balanced = context.run.reaction?.balance !== "unbalanced";
+  return { finding: { ...finding, verdict: verdictOf(finding, (kPrime * last) / log(2), balanced) }, estimates };
 }
 
 /** Covariance of what was fitted, random and common together, in the units of the parameters; k, start, infinity. */
@@ -95,7 +97,9 @@ function budgetOf({ common, used }: FirstOrderFit, { kPrime }: Estimates): FitFi
   for (const [source, shift] of common) parts.push({ source, kind: "common", variance: shift[2] * shift[2] });
   const total = parts.reduce((sum, { variance }) => sum + variance, 0);
   if (!(total > 0)) return [];
-  return parts.map(({ source, kind, variance }) => ({ source, kind, share: variance / total }));
+  // What cancels leaves rounding only, and is no part.
+  const real = parts.filter(({ variance }) => variance > 1e-15 * total);
+  return real.map(({ source, kind, variance }) => ({ source, kind, share: variance / total }));
 }
 
 function warn(
@@ -106,7 +110,7 @@ function warn(
   finding: FitFinding,
   notes: Notes,
 ): void {
-  const place = wish.origin.start >= run.block.start && wish.origin.end <= run.block.end ? wish.origin : run.origin;
+  const place = lineIn(run, wish);
   const last = used.time[used.time.length - 1] ?? 0;
   const halfLives = (estimates.kPrime.value * last) / log(2);
   if (infinity.kind === "free" && halfLives < 3) {
@@ -125,7 +129,7 @@ function warn(
   }
 }
 
-function verdictOf(finding: FitFinding, halfLives: number): string {
+function verdictOf(finding: FitFinding, halfLives: number, balanced: boolean): string {
   const k = finding.parameters["k"];
   if (k === undefined) return "";
   const share = k.u === null ? "" : `, known to ${((100 * k.u) / k.value).toPrecision(2)} %`;
@@ -136,5 +140,6 @@ function verdictOf(finding: FitFinding, halfLives: number): string {
         : ""
       : ` (95 %: ${k.interval95.map((end) => formatNumber(Number(end.toPrecision(4)), null)).join(" to ")})`;
   const span = `${finding.points} readings over ${halfLives.toPrecision(2)} half-lives`;
-  return `k = ${k.text}${interval}${share}, from ${span}.`;
+  const doubt = balanced ? "" : " The equation does not balance: k will change with its coefficients.";
+  return `k = ${k.text}${interval}${share}, from ${span}.${doubt}`;
 }

@@ -1,15 +1,14 @@
 import { problem } from "../contract/problem.js";
+import { cellProblems, rowProblems, timeProblems } from "../data/columnProblems.js";
 import type { Columns } from "../data/columns.js";
 import type { CommonCause, Signal } from "../monitor/signal.js";
 import { fromSI, intervalToSI, toSI } from "../quantity/conversion.js";
 import { sameDimension } from "../quantity/dimension.js";
-import { formatQuantity } from "../quantity/formatNumber.js";
 import { isKind, kinds } from "../quantity/kinds.js";
 import type { Quantity } from "../quantity/quantity.js";
 import type { Unit } from "../quantity/unit.js";
 import type { Fact } from "../study/fact.js";
 import type { ColumnFact, Follow, Run } from "../study/run.js";
-import { checkCells } from "./checkCells.js";
 import { dataOrigin, type FoundColumn, findColumns } from "./findColumns.js";
 import { type Notes, note } from "./notes.js";
 
@@ -34,8 +33,8 @@ export function readSignal(run: Run, follow: Follow, file: Columns, notes: Notes
     note(notes, follow.id, problem("column-lacks-unit", args, dataOrigin(run, readings.fact)));
     return null;
   }
-  if (!checkCells(run, follow, file, [time, readings], notes)) return null;
-  const rows = usableRows(run, follow, file, time, readings, notes);
+  if (!sayWhatIsWrong(run, follow, file, time, readings, notes)) return null;
+  const rows = usableRows(time.values, readings.values);
   const value = Float64Array.from(rows, (row) => toSI(readings.values[row] ?? 0, readings.unit as Unit));
   const signal: Signal = {
     time: Float64Array.from(rows, (row) => toSI(time.values[row] ?? 0, time.unit as Unit)),
@@ -68,49 +67,43 @@ function timeColumn(run: Run, found: readonly FoundColumn[], follow: Follow, not
   return first;
 }
 
-function usableRows(
+/**
+ * Says of the used columns which cells are no numbers and whether time runs backwards. False where more than half of a
+ * column is no number: then the rest is no honest signal either.
+ */
+function sayWhatIsWrong(
   run: Run,
   follow: Follow,
   file: Columns,
   time: FoundColumn,
   readings: FoundColumn,
   notes: Notes,
-): Uint32Array {
+): boolean {
+  const path = run.data?.path ?? "";
+  for (const found of rowProblems(file, path, dataOrigin(run, null))) note(notes, follow.id, found);
+  for (const { fact, index } of [time, readings]) {
+    for (const found of cellProblems(file, index, path, dataOrigin(run, fact))) note(notes, follow.id, found);
+  }
+  for (const found of timeProblems(file, time.index, path, dataOrigin(run, time.fact))) note(notes, follow.id, found);
+  return [time, readings].every(({ fact, values }) => {
+    const bad = values.reduce((count, value) => count + (Number.isNaN(value) ? 1 : 0), 0);
+    if (bad * 2 <= file.rows) return true;
+    const args = { file: path, column: fact.name, bad, rows: file.rows };
+    note(notes, follow.id, problem("column-not-numbers", args, dataOrigin(run, fact)));
+    return false;
+  });
+}
+
+/** Rows with both a time and a reading, down to the first that goes back in time: what follows may be another run. */
+function usableRows(time: Float64Array, readings: Float64Array): Uint32Array {
   const rows: number[] = [];
   let before = Number.NEGATIVE_INFINITY;
-  let twice = 0;
-  let firstTwice = -1;
-  for (let row = 0; row < file.rows; row++) {
-    const t = time.values[row] as number;
+  for (let row = 0; row < time.length; row++) {
+    const t = time[row] as number;
     if (Number.isNaN(t)) continue;
-    if (t < before) {
-      const unit = time.unit?.text ?? "";
-      const args = {
-        file: run.data?.path ?? "",
-        line: file.lines[row] ?? 0,
-        header: time.header,
-        before: formatQuantity(before, null, unit),
-        after: formatQuantity(t, null, unit),
-      };
-      note(notes, follow.id, problem("data-time-backwards", args, dataOrigin(run, time.fact)));
-      break;
-    }
-    if (t === before && rows.length > 0) {
-      twice++;
-      if (firstTwice < 0) firstTwice = row;
-    }
+    if (t < before) break;
     before = t;
-    if (!Number.isNaN(readings.values[row] as number)) rows.push(row);
-  }
-  if (twice > 0) {
-    const args = {
-      file: run.data?.path ?? "",
-      line: file.lines[firstTwice] ?? 0,
-      header: time.header,
-      time: formatQuantity(time.values[firstTwice] as number, null, time.unit?.text ?? ""),
-      count: twice,
-    };
-    note(notes, follow.id, problem("data-time-twice", args, dataOrigin(run, time.fact)));
+    if (!Number.isNaN(readings[row] as number)) rows.push(row);
   }
   return Uint32Array.from(rows);
 }

@@ -2,6 +2,7 @@ import type { Place } from "../contract/findings.js";
 import type { Origin } from "../contract/problem.js";
 import type { Columns } from "../data/columns.js";
 import type { Run } from "../study/run.js";
+import { isWithin } from "./findColumns.js";
 
 /** What the analysis of a run works with. */
 export interface RunInput {
@@ -15,6 +16,5 @@ export interface RunInput {
 
 /** The line of a wish, or the run's own line where the wish is inherited from another run. */
 export function lineIn(run: Run, wish: { readonly origin: Origin }): Origin {
-  const own = wish.origin.start >= run.block.start && wish.origin.end <= run.block.end;
-  return own ? wish.origin : run.origin;
+  return isWithin(run, wish.origin) ? wish.origin : run.origin;
 }

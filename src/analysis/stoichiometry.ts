@@ -1,3 +1,4 @@
+import { ionsOf } from "../chemistry/handbook/dissociation.js";
 import { molarMass } from "../chemistry/molarMass.js";
 import { isKind } from "../quantity/kinds.js";
 import { combined } from "../quantity/quantity.js";
@@ -72,7 +73,14 @@ export function stoichiometry(run: Run): Stoichiometry {
   if (reaction === null || !reaction.whole) return { initial, limiting: null, greatestExtent: null, missing: [] };
   for (const taken of run.taken) {
     const concentration = takenConcentration(run, taken);
-    if (concentration !== null) initial.set(taken.species.key, concentration);
+    if (concentration === null) continue;
+    initial.set(taken.species.key, concentration);
+    // A salt, strong acid or strong base counts as its ions, where the equation names those and not itself.
+    const { key, formula } = taken.species;
+    const ions = formula === null || reaction.numbers.has(key) ? null : ionsOf(formula.text);
+    for (const ion of ions ?? []) {
+      initial.set(ion.key, plusTimes(initial.get(ion.key) ?? exact(0), ion.count, concentration));
+    }
   }
   const reactants = [...reaction.numbers].filter(([, number]) => number < 0);
   const missing = reactants.map(([key]) => key).filter((key) => !initial.has(key));

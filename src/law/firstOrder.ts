@@ -6,7 +6,7 @@ import type { LinearParameter, SeparableModel } from "../numerics/separableModel
  * time zero to `infinity` as S = start e^(−k′t) + infinity (1 − e^(−k′t)). Needs no calibration: only k′ is inside the
  * exponential (IUPAC Gold Book, "rate constant, k" and "order of reaction").
  *
- * `time` in s, length n. The one nonlinear parameter is k′ in s⁻¹, from 0 (nothing goes) to where the reaction is over
+ * `time` in s, length n. The one nonlinear parameter is k′ in s⁻¹, from where a millionth reacts in the longest time to where the reaction is over
  * before the first interval is.
  */
 export function firstOrderModel(time: Float64Array, start: LinearParameter, infinity: LinearParameter): SeparableModel {
@@ -14,7 +14,7 @@ export function firstOrderModel(time: Float64Array, start: LinearParameter, infi
   const { shortest, longest } = spacing(time);
   return {
     linear: [start, infinity],
-    nonlinear: [{ name: "kPrime", low: 0, high: 40 / shortest, grid: rateGrid(shortest, longest) }],
+    nonlinear: [{ name: "kPrime", low: 1e-6 / longest, high: 40 / shortest, grid: rateGrid(shortest, longest) }],
     evaluate(theta, basis, derivative) {
       const rate = theta[0] ?? 0;
       const [left, gone] = basis as [Float64Array, Float64Array];

@@ -16,6 +16,8 @@ export interface Reaction {
   /** states of aggregation, where they are written */
   readonly states: ReadonlyMap<string, State>;
   readonly reversible: boolean;
+  /** whether elements and charge balance; unchecked where a species has no formula */
+  readonly balance: "balanced" | "unbalanced" | "unchecked";
   /** false where the line is broken and only the species' names could be kept */
   readonly whole: boolean;
   readonly origin: Origin;

@@ -1,16 +1,21 @@
 import { analyse, fileKey } from "../analysis/analyse.js";
+import { dataOrigin, isWithin } from "../analysis/findColumns.js";
 import type { Note } from "../analysis/notes.js";
 import type { Description } from "../contract/findings.js";
+import type { Problem } from "../contract/problem.js";
 import type { Columns } from "../data/columns.js";
 import { contentHash } from "../data/contentHash.js";
+import { refusalProblem } from "../data/dataOptions.js";
+import { outcomeProblem } from "../data/outcomeProblem.js";
+import { resolutionProblem } from "../data/resolutionProblem.js";
+import type { Resolution } from "../data/resolve.js";
 import type { Bound } from "../language/bind/bind.js";
 import { placeOf } from "../language/lineIndex.js";
 import { meaningOf } from "../language/meaning.js";
 import type { DataFile, Run } from "../study/run.js";
 import type { ColumnStore } from "./columnStore.js";
-import { contentProblem, pathProblem, readProblem } from "./dataProblem.js";
 import { diagnosticsOf, withProblems } from "./diagnostics.js";
-import type { DataFileState } from "./fileContent.js";
+import type { DataFileState, FileContent } from "./fileContent.js";
 
 /** What a description is worked out with. */
 export interface DescribeInput {
@@ -66,22 +71,36 @@ async function readFiles(bound: Bound, input: DescribeInput): Promise<ReadFiles>
 }
 
 function readFile(run: Run, file: DataFile, input: DescribeInput, result: ReadFiles): void {
-  const say = (problem: Note["problem"]): void => void result.notes.push({ problem, item: run.id });
   const state = input.files.get(file.path);
   if (state === undefined) return;
-  if ("refusal" in state) return say(pathProblem(run, file, state.refusal));
-  const { outcome } = state;
-  if (outcome.kind !== "bytes") {
-    const found = readProblem(run, file, outcome, input.sizeLimit);
-    return found === null ? undefined : say(found);
-  }
-  const { sha256, reading } = input.store.read(outcome.bytes, state.key, file, input.stopped);
-  if (reading.kind === "stopped") return;
+  const found = "refusal" in state ? pathProblem(run, file, state.refusal) : contentOf(run, file, state, input, result);
+  if (found !== null) result.notes.push({ problem: found, item: run.id });
+}
+
+/** Why a path leads nowhere; the mend is for the run's own line only. */
+function pathProblem(run: Run, file: DataFile, refusal: Exclude<Resolution, { kind: "uri" }>): Problem {
+  if (isWithin(run, file.origin)) return resolutionProblem(refusal, file.path, file.pathOrigin);
+  const { mend: _, ...found } = resolutionProblem(refusal, file.path, dataOrigin(run, null));
+  return found;
+}
+
+/** Puts the columns of a file into the result, or says why there are none. */
+function contentOf(
+  run: Run,
+  file: DataFile,
+  { key, outcome }: FileContent,
+  input: DescribeInput,
+  result: ReadFiles,
+): Problem | null {
+  const origin = dataOrigin(run, null);
+  if (outcome.kind !== "bytes") return outcomeProblem(outcome, file.path, input.sizeLimit, origin);
+  const { sha256, reading } = input.store.read(outcome.bytes, key, file, input.stopped);
+  if (reading.kind === "stopped") return null;
   const columns = reading.kind === "columns" ? reading.columns : null;
   if (!result.data.some(({ path }) => path === file.path)) {
     const headers = columns?.columns.map(({ header }) => header) ?? [];
     result.data.push({ path: file.path, sha256, rows: columns?.rows ?? 0, columns: headers });
   }
-  if (reading.kind === "refused") say(contentProblem(run, file, reading));
   if (columns !== null) result.files.set(fileKey(file), columns);
+  return reading.kind === "refused" ? refusalProblem(reading, file.path, origin) : null;
 }

@@ -1,4 +1,5 @@
 import type { ReadOutcome } from "../contract/reader.js";
+import type { Resolution } from "../data/resolve.js";
 
 /** A data file as it was read. `key` names this very reading: another reading of the same file has another. */
 export interface FileContent {
@@ -6,9 +7,5 @@ export interface FileContent {
   readonly outcome: ReadOutcome;
 }
 
-/** Why a path of a data line leads nowhere; decided before anything is read. */
-export type PathRefusal =
-  | { readonly kind: "empty" | "absolute" | "unsaved" | "leaves" }
-  | { readonly kind: "backslash"; readonly mended: string };
-
-export type DataFileState = FileContent | { readonly refusal: PathRefusal };
+/** A file, or why its path leads nowhere, which is decided before anything is read. */
+export type DataFileState = FileContent | { readonly refusal: Exclude<Resolution, { kind: "uri" }> };

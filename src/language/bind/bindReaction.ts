@@ -27,8 +27,8 @@ export function bindReactions(
       return [{ ...nothing, name, text: field.text, origin }];
     }
     useNames(binding, statement, field.span.start, reading.equation);
-    checkBalance(binding, statement, field.text, field.span.start, reading.equation);
-    return [reactionOf(reading.equation, name, origin)];
+    const result = checkBalance(binding, statement, field.text, field.span.start, reading.equation);
+    return [reactionOf(reading.equation, name, result, origin)];
   });
   return { reactions, salvaged };
 }
@@ -40,10 +40,16 @@ const nothing = {
   numbers: new Map(),
   states: new Map(),
   reversible: false,
+  balance: "unchecked",
   whole: false,
 } as const;
 
-function reactionOf(equation: Equation, name: string | null, origin: Reaction["origin"]): Reaction {
+function reactionOf(
+  equation: Equation,
+  name: string | null,
+  result: Reaction["balance"],
+  origin: Reaction["origin"],
+): Reaction {
   const keys = (terms: Equation["left"]): string[] => [...new Set(terms.map(({ species }) => species))];
   return {
     name,
@@ -54,6 +60,7 @@ function reactionOf(equation: Equation, name: string | null, origin: Reaction["o
     states: new Map(
       [...equation.left, ...equation.right].flatMap(({ species, state }) => (state === null ? [] : [[species, state]])),
     ),
+    balance: result,
     reversible: equation.arrow === "<=>",
     whole: true,
     origin,
@@ -72,7 +79,13 @@ function useNames(binding: Binding, statement: Statement, at: number, equation: 
 /** Balances looked up before, by the equation's text and the formulas behind its names: they are not cheap. */
 const balanced = new Map<string, Balance>();
 
-function checkBalance(binding: Binding, statement: Statement, text: string, at: number, equation: Equation): void {
+function checkBalance(
+  binding: Binding,
+  statement: Statement,
+  text: string,
+  at: number,
+  equation: Equation,
+): Reaction["balance"] {
   const formulaOf = (key: string): Formula | null => binding.declared.get(key)?.formula ?? null;
   const names = [...equation.left, ...equation.right].map(({ species }) => formulaOf(species)?.text ?? "");
   const key = `${text} | ${names.join(" ")}`;
@@ -82,8 +95,10 @@ function checkBalance(binding: Binding, statement: Statement, text: string, at: 
   if (result.kind === "unchecked") {
     const species = result.species.join(", ");
     report(binding, problem("balance-unchecked", { species }, originOf(binding.uri, statement, "equation")));
-    return;
+    return "unchecked";
   }
   const found = balanceFault(equation, result, text);
-  if (found !== null) reportIn(binding, statement, at, found);
+  if (found === null) return "balanced";
+  reportIn(binding, statement, at, found);
+  return "unbalanced";
 }

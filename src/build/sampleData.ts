@@ -1,0 +1,50 @@
+import { exp } from "../numerics/elementary.js";
+import { seededRandom } from "../numerics/random.js";
+
+/** The data files of the samples by their path in samples/: first-order decays with scatter, invented from fixed seeds. */
+export function sampleData(): ReadonlyMap<string, string> {
+  return new Map([
+    ["data/peroxide-a.csv", peroxide(101, 1.24e-3)],
+    ["data/peroxide-b.csv", peroxide(102, 6.2e-4)],
+    ["data/ester.csv", ester(103)],
+    ["data/planted.csv", planted(104)],
+  ]);
+}
+
+const mark = "# invented figures, made by src/build/samples.mjs";
+
+/** Titrated peroxide, mol/L against s; `rate` is k′ in s⁻¹. */
+function peroxide(seed: number, rate: number): string {
+  const random = seededRandom(seed);
+  const rows = Array.from({ length: 36 }, (_, i) => {
+    const t = i <= 12 ? 25 * i : 300 + 120 * (i - 12);
+    const c = 0.1 * exp(-rate * t) + 0.0004 * random.normal();
+    return `${t},${c.toFixed(4)}`;
+  });
+  return lines([mark, "time / s,c(H2O2) / mol L^-1", ...rows]);
+}
+
+/** Ester left, mmol/L against min, as a program with a decimal comma writes it. */
+function ester(seed: number): string {
+  const random = seededRandom(seed);
+  const rows = Array.from({ length: 41 }, (_, i) => {
+    const c = 44 * exp(-0.0583 * i) + 0.25 * random.normal();
+    return `${i};${c.toFixed(2).replace(".", ",")}`;
+  });
+  return lines([mark, "t / min;c(ester) / mmol/L", ...rows]);
+}
+
+/** Peroxide with an empty cell and a word among the readings. */
+function planted(seed: number): string {
+  const random = seededRandom(seed);
+  const rows = Array.from({ length: 21 }, (_, i) => {
+    const t = 120 * i;
+    const c = (0.05 * exp(-9e-4 * t) + 0.0003 * random.normal()).toFixed(4);
+    return `${t},${i === 6 ? "" : i === 11 ? "spilt" : c}`;
+  });
+  return lines([mark, "time / s,c(H2O2) / mol L^-1", ...rows]);
+}
+
+function lines(all: readonly string[]): string {
+  return `${all.join("\n")}\n`;
+}
