@@ -3,7 +3,7 @@ import { firstOrderModel } from "../law/firstOrder.js";
 import { fitLeastSquares, type LeastSquaresFit, type SeparableModel, sensitivities } from "../numerics/leastSquares.js";
 import type { FitWish } from "../study/run.js";
 import { type EndContext, isProblem, type ResolvedEnd, resolveInfinity, resolveStart } from "./endPoints.js";
-import { type FitData, refuseAfter, refuseBefore } from "./fitRefusals.js";
+import { type FitData, refuseAfter, refuseBefore, refuseBeyond } from "./fitRefusals.js";
 import type { Refusal } from "./fitResult.js";
 
 /** A first-order fit that came out, SI; parameters in the order start, infinity, k′. */
@@ -51,8 +51,16 @@ export function fitFirstOrder(
   const model = firstOrderModel(used.time, parameterOf("start", start), parameterOf("infinity", infinity));
   const fit = fitLeastSquares(used.value, used.weights, model, { stopped });
   const after = refuseAfter(data, fit, fit.values[0] ?? 0, fit.values[1] ?? 0);
-  if (after !== null) return { refused: after, used };
+  const beyond = after ?? (fit.bound[1] === null ? null : refuseBeyond(data, fit, unbounded(used, start, stopped)));
+  if (beyond !== null) return { refused: beyond, used };
   return { fit, model, start, infinity, used, common: commonShifts(context, used, model, fit, start, infinity) };
+}
+
+/** The same fit with nothing known of the infinity. */
+function unbounded(used: UsedReadings, start: ResolvedEnd, stopped: () => boolean): LeastSquaresFit {
+  const anywhere = { name: "infinity", fixed: null, low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
+  const model = firstOrderModel(used.time, parameterOf("start", start), anywhere);
+  return fitLeastSquares(used.value, used.weights, model, { stopped });
 }
 
 function usedReadings({ signal }: EndContext, wish: FitWish): UsedReadings {

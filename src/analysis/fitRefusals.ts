@@ -77,6 +77,22 @@ export function refuseAfter(data: FitData, fit: LeastSquaresFit, start: number, 
   return null;
 }
 
+/**
+ * An infinity held at what stoichiometry allows is honest only while the readings do not speak against it: F test, at
+ * 1 %, of the held fit against the free one.
+ */
+export function refuseBeyond({ value, wanted }: FitData, held: LeastSquaresFit, free: LeastSquaresFit): Refusal | null {
+  const left = value.length - wanted;
+  const worse = held.chiSquare - free.chiSquare;
+  const exactly = free.chiSquare <= 1e-24 * held.chiSquare;
+  if (!exactly && (left < 1 || (fTail(worse / (free.chiSquare / left), 1, left) ?? 1) >= 0.01)) return null;
+  return refusal(
+    "bound",
+    "the readings run towards an infinity beyond what was taken allows",
+    "Check what was taken, the unit of the column and the window, or try another order.",
+  );
+}
+
 /** A number whose standard uncertainty is as large as itself is none. */
 export function refuseUndetermined(k: number, uRandom: number | null): Refusal | null {
   if (uRandom === null || uRandom < k) return null;
