@@ -2,6 +2,7 @@ import type { GasRow } from "../chemistry/handbook/gases.js";
 import type { Run as RunFinding } from "../contract/findings.js";
 import { formatNumber } from "../quantity/formatNumber.js";
 import type { Run } from "../study/run.js";
+import { isUnbalanced } from "./runFormulas.js";
 import type { Stoichiometry } from "./stoichiometry.js";
 import type { RunSubstance } from "./substancesOf.js";
 
@@ -21,7 +22,9 @@ export function isGas({ state, gas }: RunSubstance): boolean {
  */
 export function givenOff(run: Run, amounts: Stoichiometry, all: readonly RunSubstance[]): Caution[] {
   const gaseous = all.filter(isGas);
-  const net = gaseous.reduce((sum, { number }) => sum + (number ?? 0), 0);
+  // A reactant without a state may be dissolved: it takes no gas away.
+  const counted = gaseous.filter(({ product, state }) => product || state === "g");
+  const net = counted.reduce((sum, { number }) => sum + (number ?? 0), 0);
   return gaseous
     .filter(({ product, number }) => product && number !== null && number > 0)
     .map(({ key, number }) => {
@@ -31,8 +34,11 @@ export function givenOff(run: Run, amounts: Stoichiometry, all: readonly RunSubs
 }
 
 function howMuch(run: Run, { greatestExtent, missing }: Stoichiometry, number: number): string {
+  if (isUnbalanced(run)) return "How much cannot be said: the equation does not balance.";
   if (greatestExtent === null) {
-    const why = missing.length > 0 ? `nothing is stated of ${missing.join(", ")}` : "what was taken does not tell";
+    const unknown =
+      missing.length > 0 ? `the amount of ${missing.join(", ")} is not known` : "what was taken does not tell";
+    const why = run.volume === null ? "no volume is stated" : unknown;
     return `How much cannot be said: ${why}.`;
   }
   const each = number * greatestExtent.value;
@@ -60,8 +66,7 @@ function inUnits(value: number, units: readonly (readonly [size: number, name: s
 }
 
 function pressure(net: number): string {
-  if (net > 0)
-    return "A closed vessel builds up pressure; how high depends on its head space, which is not stated. Let the gas out safely.";
+  if (net > 0) return "A closed vessel builds up pressure; how high depends on its head space, which is not stated.";
   return "At least as much gas is used up, so the gas by itself does not raise the pressure of a closed vessel; heat can.";
 }
 
@@ -92,7 +97,7 @@ function codeOf({ flags, asphyxiant }: GasRow): string | null {
 }
 
 function describe(key: string, { name, flags, asphyxiant, thanAir, burns, note }: GasRow): string {
-  const words = flags.map((flag) => (flag === "unstable" ? "may explode by itself" : properties[flag]));
+  const words: string[] = flags.map((flag) => (flag === "unstable" ? "may explode by itself" : properties[flag]));
   if (asphyxiant === "simple") words.push("displaces the oxygen of the air");
   if (asphyxiant === "chemical") words.push("stops the use of oxygen in the body");
   const parts = [words.join(", "), densities[thanAir]];

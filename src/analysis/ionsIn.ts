@@ -42,7 +42,7 @@ export function ionsIn(formula: Formula): IonsIn {
   for (const ending of anionEndings) {
     const before = cationsBefore(text, ending);
     if (before === null || !cationRun.test(before)) continue;
-    const found = before.match(oneCation) ?? [];
+    const found: readonly string[] = before.match(oneCation) ?? [];
     const dissociates = ionsOf(text) !== null;
     const acid = found.includes("H");
     if ((acid || ending === "OH") && !dissociates) return none;

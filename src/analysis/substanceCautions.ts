@@ -15,7 +15,7 @@ export function substanceDangers(all: readonly RunSubstance[]): Caution[] {
     return rows.filter(isClassed).map((row) => {
       const own = `${key}: as ${row.name}`;
       const shared = `${key} shares an ion with ${row.name}; that`;
-      const text = `${reagent === null ? shared : own} is classed: ${classes(row)}. ${validity(row)}${asides(row)}`;
+      const text = `${reagent === null ? shared : own} is classed (categories in brackets): ${classes(row)}. ${validity(row)}${asides(row)}`;
       return { code: "dangerous-substance", text, species: [key] };
     });
   });
@@ -31,7 +31,7 @@ function classes({ hazards, also }: SubstanceRow): string {
 
 function validity({ name }: SubstanceRow): string {
   if (name.includes("%")) return "This holds for that strength; other strengths are classed otherwise.";
-  return "This holds for the substance as named, not for a solution of it.";
+  return "This holds for the substance as named; a solution is classed by its strength.";
 }
 
 function asides({ sure, note }: SubstanceRow): string {

@@ -2,11 +2,12 @@ import type { Formula } from "../chemistry/formula.js";
 import { type GasRow, gases } from "../chemistry/handbook/gases.js";
 import { type SubstanceRow, substances } from "../chemistry/handbook/substances.js";
 import { readFormula } from "../chemistry/readFormula.js";
-import { readSpecies, type State } from "../chemistry/readSpecies.js";
+import type { State } from "../chemistry/readSpecies.js";
 import { isFault } from "../quantity/shifted.js";
 import type { Reaction } from "../study/reaction.js";
 import type { Run } from "../study/run.js";
 import { anhydrous, ionsIn } from "./ionsIn.js";
+import { formulasOf } from "./runFormulas.js";
 
 /** A substance of a run with what the handbook has of it. */
 export interface RunSubstance {
@@ -36,11 +37,9 @@ export interface RunSubstance {
  * without a formula, declared elsewhere and only met in the equation, is known by the name alone.
  */
 export function substancesOf(run: Run): RunSubstance[] {
-  const formulas = new Map<string, Formula | null>();
-  for (const { species } of [...run.taken, ...run.follow]) formulas.set(species.key, species.formula);
   const { reaction } = run;
-  const inEquation = reaction === null ? [] : [...new Set([...reaction.reactants, ...reaction.products])];
-  for (const key of inEquation) if (!formulas.has(key)) formulas.set(key, formulaOfKey(key, reaction));
+  const formulas = formulasOf(run);
+  const inEquation = reaction === null ? [] : [...reaction.reactants, ...reaction.products];
   const keys = new Set([...run.taken.map(({ species }) => species.key), ...inEquation]);
   const all = [...keys].map((key) => known(key, formulas.get(key) ?? null, reaction));
   const given = new Set(all.flatMap(({ formula }) => (formula?.charge === 0 ? ionNames(formula) : [])));
@@ -77,23 +76,6 @@ function ionNames(formula: Formula): string[] {
 function covered(ion: Formula, given: ReadonlySet<string>): boolean {
   const { rows } = ionsIn(ion);
   return rows.length > 0 && rows.every(({ body, sign }) => given.has(`${body} ${sign}`));
-}
-
-/**
- * The formula that a key of the equation is. A lone symbol without a state, `K`, may be a declared name: it is an
- * element only where the other side of the equation has that element too.
- */
-function formulaOfKey(key: string, reaction: Reaction | null): Formula | null {
-  const formula = wholeFormula(key);
-  if (formula === null || reaction === null || formula.text === "e^-") return null;
-  if (!/^[A-Z][a-z]?$/.test(key) || reaction.states.has(key)) return formula;
-  const others = reaction.products.includes(key) ? reaction.reactants : reaction.products;
-  return others.some((other) => wholeFormula(other)?.parts.has(key)) ? formula : null;
-}
-
-function wholeFormula(text: string): Formula | null {
-  const reading = readSpecies(text);
-  return isFault(reading) || reading.end !== text.length ? null : reading.formula;
 }
 
 function gasOf(formula: Formula): GasRow | null {

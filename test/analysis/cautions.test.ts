@@ -96,6 +96,10 @@ describe("cautions: gas given off", () => {
     assert.match(textOf(withoutVolume, "gas-given-off", "H2"), /cannot be said: no volume is stated\./);
     const withoutZinc = cautions(zinc, "volume 50 mL", "taken H2SO4 0.5 mol/L");
     assert.match(textOf(withoutZinc, "gas-given-off", "H2"), /cannot be said: the amount of Zn is not known\./);
+    const unbalanced = cautions("reaction H2O2 -> H2O + O2(g)", "volume 50 mL", "taken H2O2 0.1 mol/L");
+    assert.match(textOf(unbalanced, "gas-given-off", "O2"), /cannot be said: the equation does not balance\./);
+    const halves = cautions("reaction H2O2 -> H2O + 1/2 O2(g)", "volume 50 mL", "taken H2O2 0.1 mol/L");
+    assert.match(textOf(halves, "gas-given-off", "O2"), /At most 2\.5 mmol/);
     const nought = cautions(peroxide, "volume 50 mL", "taken H2O2 0 mol/L");
     assert.match(textOf(nought, "gas-given-off", "O2"), /cannot be said from what was taken\./);
   });
