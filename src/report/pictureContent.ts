@@ -1,0 +1,69 @@
+import type { Run } from "../contract/findings.js";
+import { decimate } from "./decimate.js";
+
+type Follow = Run["follow"][number];
+export type Fit = Run["fits"][number];
+export type Rate = Run["rates"][number];
+
+/** Greatest number of readings that a picture draws. */
+const most = 600;
+
+/** What a picture of one follow shows, in the units of its columns. */
+export interface PictureContent {
+  readonly follow: Follow;
+  readonly timeUnit: string;
+  readonly signalUnit: string;
+  /** the readings drawn; `used` tells whether any fit rests on them */
+  readonly readings: readonly { readonly time: number; readonly signal: number; readonly used: boolean }[];
+  /** fits with a curve, in the order of the text; `number` counts all fits of the run, from 1 */
+  readonly fits: readonly { readonly fit: Fit; readonly number: number; readonly curve: NonNullable<Fit["curve"]> }[];
+  /** rates with a chord or tangent, in the order of the text; `number` counts all rates of the run, from 1 */
+  readonly rates: readonly { readonly rate: Rate; readonly number: number; readonly mark: NonNullable<Rate["mark"]> }[];
+}
+
+/** What is to be drawn of a follow line of a run; null where there are no readings. */
+export function pictureContent(run: Run, follow: Follow): PictureContent | null {
+  const { time, signal } = follow;
+  if (time === undefined || signal === undefined) return null;
+  const windows = run.fits.filter((fit) => fit.follow === follow.id && fit.window !== null).map(({ window }) => window);
+  const inAWindow = (t: number): boolean =>
+    windows.length === 0 || windows.some((window) => window !== null && within(window, t));
+  const readings = decimate(time.values, signal.values, most).map((index) => {
+    const t = time.values[index] as number;
+    return { time: t, signal: signal.values[index] as number, used: inAWindow(t) };
+  });
+  if (readings.length === 0) return null;
+  return {
+    follow,
+    timeUnit: time.unit,
+    signalUnit: signal.unit,
+    readings,
+    fits: run.fits.flatMap((fit, index) =>
+      fit.curve === undefined || fit.follow !== follow.id ? [] : [{ fit, number: index + 1, curve: fit.curve }],
+    ),
+    // Rates are those of the first signal of a run.
+    rates:
+      run.follow[0] === follow
+        ? run.rates.flatMap((rate, index) => (rate.mark === null ? [] : [{ rate, number: index + 1, mark: rate.mark }]))
+        : [],
+  };
+}
+
+/** Residuals of a fit with their times, thinned out as readings are; none where the two do not belong together. */
+export function residualsOf(follow: Follow, fit: Fit): { time: number; residual: number }[] {
+  const { window, residuals } = fit;
+  if (window === null || residuals === undefined || follow.time === undefined || follow.signal === undefined) return [];
+  const signal = follow.signal.values;
+  const times = follow.time.values.filter(
+    (t, index): t is number => t !== null && signal[index] !== null && within(window, t),
+  );
+  if (times.length !== residuals.values.length) return [];
+  return decimate(times, residuals.values, most).map((index) => ({
+    time: times[index] as number,
+    residual: residuals.values[index] as number,
+  }));
+}
+
+function within([from, to]: NonNullable<Fit["window"]>, t: number): boolean {
+  return t >= from.value && t <= to.value;
+}

@@ -1,0 +1,89 @@
+import { axisMarkup } from "./axisText.js";
+import { curveLook } from "./curveParts.js";
+import type { Palette } from "./palette.js";
+import { type PictureContent, residualsOf } from "./pictureContent.js";
+import { type Box, extentOf, linearScale, px, type Scale } from "./plotFrame.js";
+import { niceTicks } from "./ticks.js";
+
+/** Diameter of a reading, px: smaller where there are many. */
+function size(count: number): number {
+  return count > 300 ? 2.4 : count > 80 ? 3.4 : 5;
+}
+
+/** The readings as dots; hollow where no fit rests on them. */
+export function readingParts(
+  { readings }: PictureContent,
+  time: Scale,
+  signal: Scale,
+  { ink, ground }: Palette,
+): string[] {
+  const places = (used: boolean): [number, number][] =>
+    readings.filter((reading) => reading.used === used).map((r) => [time.at(r.time), signal.at(r.signal)]);
+  return [
+    ...dots(places(true), ink, size(readings.length)),
+    ...rings(places(false), ink, ground, size(readings.length)),
+  ];
+}
+
+/** Lines without length with round ends: the shortest way to write many dots. */
+function dots(places: readonly (readonly [number, number])[], colour: string, diameter: number): string[] {
+  if (places.length === 0) return [];
+  const path = places.map(([x, y]) => `M${px(x)} ${px(y)}h0`).join("");
+  return [`<path d="${path}" fill="none" stroke="${colour}" stroke-width="${diameter}" stroke-linecap="round"/>`];
+}
+
+function rings(
+  places: readonly (readonly [number, number])[],
+  colour: string,
+  ground: string,
+  diameter: number,
+): string[] {
+  if (places.length === 0) return [];
+  const r = diameter / 2;
+  const ring = `a${r} ${r} 0 1 0 ${diameter} 0a${r} ${r} 0 1 0 ${-diameter} 0`;
+  const path = places.map(([x, y]) => `M${px(x - r)} ${px(y)}${ring}`).join("");
+  return [`<path d="${path}" fill="${ground}" stroke="${colour}" stroke-width="1"/>`];
+}
+
+/** Reading minus curve, as stems from zero, under the same time axis; one set of signs per fit. */
+export function residualParts(
+  { follow, fits, signalUnit }: PictureContent,
+  time: Scale,
+  box: Box,
+  palette: Palette,
+): string[] {
+  const sets = fits.map(({ fit }) => residualsOf(follow, fit));
+  const [low, high] = extentOf([0, ...sets.flat().map(({ residual }) => residual)], 0.08);
+  const greatest = Math.max(Math.abs(low), Math.abs(high));
+  const scale = linearScale(-greatest, greatest, box.bottom, box.top);
+  const { values, labels, power } = niceTicks(-greatest, greatest, 2.5);
+  const x = box.left - 4;
+  const name = axisMarkup({ symbol: "reading − curve", of: "", unit: signalUnit, power });
+  return [
+    `<path d="M${px(box.left)} ${px(scale.at(0))}H${px(box.right)}" stroke="${palette.faint}" stroke-opacity="0.6" fill="none"/>`,
+    `<path d="${values.map((value) => `M${px(x - 4)} ${px(scale.at(value))}h4`).join("")}" stroke="${palette.faint}" fill="none"/>`,
+    ...values.map(
+      (value, i) =>
+        `<text x="${px(x - 7)}" y="${px(scale.at(value) + 3.8)}" text-anchor="end" fill="${palette.ink}">${labels[i] ?? ""}</text>`,
+    ),
+    `<text x="${px(6)}" y="${px(box.top - 8)}" fill="${palette.ink}">${name}</text>`,
+    ...sets.flatMap((set, order) => residualMarks(set, order, time, scale, palette)),
+  ];
+}
+
+function residualMarks(
+  set: readonly { time: number; residual: number }[],
+  order: number,
+  time: Scale,
+  scale: Scale,
+  palette: Palette,
+): string[] {
+  const { colour } = curveLook(order, palette);
+  const places = set.map(({ time: t, residual }): [number, number] => [time.at(t), scale.at(residual)]);
+  const zero = px(scale.at(0));
+  const stems = set.length > 120 ? "" : places.map(([x, y]) => `M${px(x)} ${zero}V${px(y)}`).join("");
+  return [
+    stems === "" ? "" : `<path d="${stems}" fill="none" stroke="${colour}" stroke-opacity="0.55"/>`,
+    ...(order === 0 ? dots(places, colour, 3.6) : rings(places, colour, "none", 4)),
+  ];
+}
