@@ -33,7 +33,10 @@ export function readEquation(text: string, isDeclared: (name: string) => boolean
       : readSide(text, plain, { start: arrow.span.end, end: arrows[1]?.span.start ?? text.length }, isDeclared);
   const terms = [...left.terms, ...(right?.terms ?? [])];
   const species = [...new Set(terms.map((term) => term.species))];
-  const faults = [...left.faults, ...arrowFaults(arrows, left, right, span), ...(right?.faults ?? [])].slice(0, 1);
+  const aboutArrow = arrowFaults(arrows, left, right, span);
+  // Without an arrow everything is the left side: then only the arrow is worth a word.
+  const first = arrow === undefined ? aboutArrow : [...left.faults, ...aboutArrow, ...(right?.faults ?? [])];
+  const faults = first.slice(0, 1);
   if (faults.length > 0 || arrow === undefined || right === null || arrow.meant === null)
     return { equation: null, species, faults };
   const equation: Equation = { left: left.terms, right: right.terms, arrow: arrow.meant, arrowSpan: arrow.span, span };

@@ -10,6 +10,9 @@ export interface WrittenQuantity {
   readonly unit: Span | null;
 }
 
+/** Units that say a share of a mixture, but not of what. */
+const sharesOfMixture = new Set(["%", "ppm"]);
+
 /** Null where a quantity is what its line wants, else the fault: dimension first, then sign. */
 export function checkQuantity(written: WrittenQuantity, text: string, kind: QuantityKind): Fault | null {
   const { name, dimensions, atLeast }: KindOfQuantity = quantityKinds[kind];
@@ -17,6 +20,13 @@ export function checkQuantity(written: WrittenQuantity, text: string, kind: Quan
   if (dimensions !== null) {
     const span = written.unit ?? written.number;
     const shown = written.unit === null ? undefined : text.slice(written.unit.start, written.unit.end);
+    if (kind === "taken" && shown !== undefined && sharesOfMixture.has(quantity.unit.text)) {
+      return fault(
+        "share-of-what",
+        { share: `${text.slice(written.number.start, written.number.end)} ${shown}` },
+        span,
+      );
+    }
     const wrong = checkDimension(written.unit === null ? null : quantity.unit, { name, dimensions }, span, shown);
     if (wrong !== null) return wrong;
   }

@@ -2,7 +2,7 @@ import { type Fault, fault, type Problem, placed, replacement } from "../contrac
 import { nearest } from "../quantity/nearest.js";
 import { describeHeads } from "./describeHeads.js";
 import { type LineIndex, lineIndex } from "./lineIndex.js";
-import { parseLine } from "./parseLine.js";
+import { parseLine, parseLineAs } from "./parseLine.js";
 import type { Part } from "./shape.js";
 import { headsBelow, type Owner, type StatementRow, statementByHead } from "./statements.js";
 import type { LineStatement, Statement } from "./syntax.js";
@@ -29,13 +29,15 @@ interface State {
   readonly problems: Problem[];
   readonly open: Open[];
   runSeen: boolean;
+  /** kinds of line that were said to stand wrong below the present run: once is enough */
+  readonly misplaced: Set<StatementRow>;
 }
 
 /** Parses a whole text. Never fails: it returns a tree and problems. Spans are UTF-16 units from the text's start. */
 export function parse(uri: string, text: string): Parsed {
   const index = lineIndex(text);
   const file: Open = { owner: "file", children: [] };
-  const state: State = { uri, problems: [], open: [file], runSeen: false };
+  const state: State = { uri, problems: [], open: [file], runSeen: false, misplaced: new Set() };
   let wantedAtEnd: readonly Part[] = [];
   index.starts.forEach((offset, number) => {
     const next = index.starts[number + 1] ?? text.length;
@@ -43,7 +45,7 @@ export function parse(uri: string, text: string): Parsed {
     const parsed = parseLine(line);
     wantedAtEnd = parsed.wanted;
     if (parsed.fault !== null) state.problems.push(placed(parsed.fault, uri, offset));
-    for (const statement of parsed.statements) attach(state, statement, offset);
+    for (const statement of parsed.statements) attach(state, statement, line, offset);
   });
   return { uri, text, index, statements: file.children, problems: state.problems, wantedAtEnd };
 }
@@ -55,19 +57,23 @@ function withoutBreak(text: string, start: number, next: number): string {
 }
 
 /** Puts a statement below the nearest open header that lists it. */
-function attach(state: State, line: LineStatement, offset: number): void {
-  const known = line.row === null ? guess(state, line, offset) : line;
+function attach(state: State, line: LineStatement, text: string, offset: number): void {
+  const known = line.row === null ? guess(state, line, text, offset) : line;
   if (known === null || known.row === null) return;
   const { row } = known;
   const depth = state.open.findLastIndex((candidate) => takes(state, candidate.owner, row));
   const owner = state.open[depth];
   if (owner === undefined) {
-    if (known.fault === null) state.problems.push(placed(misplaced(row, known), state.uri, offset));
+    if (known.fault === null && !state.misplaced.has(row)) {
+      state.misplaced.add(row);
+      state.problems.push(placed(misplaced(row, known), state.uri, offset));
+    }
     return;
   }
   const statement: Statement = { line: known, offset, owner: owner.owner, children: [] };
   owner.children.push(statement);
   state.open.length = depth + 1;
+  if (depth === 0) state.misplaced.clear();
   if (row.opens !== undefined) state.open.push({ owner: row.opens, children: statement.children });
   if (row.opens === "run") state.runSeen = true;
 }
@@ -87,7 +93,7 @@ function misplaced(row: StatementRow, line: LineStatement): Fault {
  * A first word that is not known: says so, offers the nearest one allowed here, and takes the line for that one so
  * that the lines below it do not slide below a wrong header.
  */
-function guess(state: State, line: LineStatement, offset: number): LineStatement | null {
+function guess(state: State, line: LineStatement, text: string, offset: number): LineStatement | null {
   const allowed = [...new Set(state.open.toReversed().flatMap((open) => headsBelow(open.owner)))].filter((head) => {
     const row = statementByHead.get(head);
     return row !== undefined && state.open.some((open) => takes(state, open.owner, row));
@@ -97,5 +103,6 @@ function guess(state: State, line: LineStatement, offset: number): LineStatement
   const unknown = fault("word-unknown", { word: line.head.text, allowed: describeHeads(allowed) }, line.head, mend);
   state.problems.push(placed(unknown, state.uri, offset));
   const row = near === null ? undefined : statementByHead.get(near);
-  return row === undefined ? null : { ...line, row, fault: unknown };
+  const meant = row === undefined ? undefined : parseLineAs(text, row).statements[0];
+  return meant === undefined ? null : { ...meant, fault: unknown };
 }

@@ -18,7 +18,12 @@ export function parseLine(text: string): ParsedLine {
   return parsed;
 }
 
-function readLine(text: string): ParsedLine {
+/** Reads a line whose first word is not known as if it were that of `row`: its names are not lost to the rest. */
+export function parseLineAs(text: string, row: StatementRow): ParsedLine {
+  return readLine(text, row);
+}
+
+function readLine(text: string, meant: StatementRow | null = null): ParsedLine {
   const tokens = lexLine(text).filter((token) => token.kind !== "comment");
   const statements: LineStatement[] = [];
   let cursor: Cursor | null = null;
@@ -26,9 +31,9 @@ function readLine(text: string): ParsedLine {
   while (at < tokens.length) {
     const first = tokens[at] as Token;
     cursor = { text, tokens, at: at + 1, fields: new Map(), fault: null, wanted: [], before: first.text };
-    const row = rowOf(first, cursor);
+    const row = rowOf(first, cursor) ?? (at === 0 ? meant : null);
     if (row === null) {
-      statements.push(statement(null, first, cursor, tokens.length));
+      statements.push(statement(text, null, first, cursor, tokens.length));
       break;
     }
     readParts(cursor, row.parts, row);
@@ -37,7 +42,7 @@ function readLine(text: string): ParsedLine {
     if (cursor.fault === null && next !== undefined && !beginsLine(next)) leftOver(cursor, next, row);
     if (cursor.fault !== null && row.slips !== undefined) cursor.fault = slip(cursor, row, first) ?? cursor.fault;
     const last = cursor.fault === null ? end : endAfterFault(cursor);
-    statements.push(statement(row, first, cursor, last));
+    statements.push(statement(text, row, first, cursor, last));
     at = last;
   }
   return { statements, fault: lineFault(text, statements), wanted: cursor?.wanted ?? [] };
@@ -102,11 +107,11 @@ function beginsLine(token: Token): boolean {
   return token.kind === "word" && statementByHead.has(token.text);
 }
 
-function statement(row: StatementRow | null, first: Token, cursor: Cursor, end: number): LineStatement {
+function statement(text: string, row: StatementRow | null, first: Token, cursor: Cursor, end: number): LineStatement {
   const last = cursor.tokens[end - 1] ?? first;
   return {
     row,
-    head: { text: first.text, start: first.start, end: first.end },
+    head: { text: text.slice(first.start, first.end), start: first.start, end: first.end },
     fields: cursor.fields,
     span: { start: first.start, end: last.end },
     fault: cursor.fault,

@@ -1,4 +1,4 @@
-import { type Fault, fault, replacement, type Span } from "../contract/problem.js";
+import { type Fault, fault, type Mend, replacement, type Span } from "../contract/problem.js";
 import { nearest } from "../quantity/nearest.js";
 import { readNumber } from "../quantity/readNumber.js";
 import { readQuantity } from "../quantity/readQuantity.js";
@@ -141,8 +141,12 @@ const connectives = new Set(
   "in from as at to of is by like using and with after within reads purity density giving".split(" "),
 );
 
+function isName(text: string): boolean {
+  return !connectives.has(text) && /^[\p{L}\p{N}_\-′']+$/u.test(text);
+}
+
 function readName(cursor: Cursor, label: string, what: string, token: Token): void {
-  if (connectives.has(token.text) || !/^[\p{L}\p{N}_\-′']+$/u.test(token.text)) {
+  if (!isName(token.text)) {
     cursor.fault = fault("name-malformed", { name: token.text, what }, token);
   }
   keep(cursor, label, { kind: "text", text: token.text, span: token });
@@ -216,9 +220,22 @@ function wantedButFound(cursor: Cursor, parts: readonly Part[], row: StatementRo
     cursor.fault = fault("line-incomplete", { before: cursor.before, wanted, example }, last);
     return;
   }
-  const near = token.kind === "word" ? (nearest(token.text, firstWords(all))[0] ?? null) : null;
-  const mend = near === null ? [] : [replacement(token, near)];
+  const mend = mendsOf(cursor, all, token);
   cursor.fault = fault("line-unexpected", { found: token.text, before: cursor.before, wanted }, token, mend);
+}
+
+/** A fixed word that is near; a text put in quotes where one is wanted; a name taken out of its quotes. */
+function mendsOf(cursor: Cursor, wanted: readonly Part[], token: Token): Mend[] {
+  const [near] = token.kind === "word" ? nearest(token.text, firstWords(wanted)) : [];
+  if (near !== undefined) return [replacement(token, near)];
+  const only = wanted.length === 1 ? wanted[0]?.part : undefined;
+  if (only === "string" && token.kind === "word") {
+    const last = cursor.tokens[cursor.tokens.length - 1] ?? token;
+    const span = { start: token.start, end: last.end };
+    return [replacement(span, `"${cursor.text.slice(span.start, span.end)}"`)];
+  }
+  if (only === "name" && token.kind === "string" && isName(token.text)) return [replacement(token, token.text)];
+  return [];
 }
 
 /** Says of a word that is left over what could have stood in its place. */

@@ -52,6 +52,9 @@ const many: Repeat = { repeat: "many" };
 const set: Repeat = { repeat: "set" };
 const key = (field: string): Repeat => ({ repeat: "key", field });
 
+/** `first order`, `2nd-order`: the order as speech has it. */
+export const orderInWords = /^(zero|zeroth|half|first|second|third|0th|1st|2nd|3rd)[- ]?order\b/i;
+
 export const statements: readonly StatementRow[] = [
   {
     head: "ratewright",
@@ -234,12 +237,7 @@ export const statements: readonly StatementRow[] = [
     owners: ["file", "run"],
     opens: "fit",
     repeats: set,
-    slips: [
-      {
-        pattern: /^(zero|zeroth|half|first|second|third|\d(st|nd|rd|th))[- ]?order\b/i,
-        say: (rest) => fault("order-in-words", { example: "order 1 in A" }, rest),
-      },
-    ],
+    slips: [{ pattern: orderInWords, say: (rest) => fault("order-in-words", { example: "order 1 in A" }, rest) }],
     parts: [keyword("order"), number("order", "the order, a number"), keyword("in"), species()],
     help: "A rate law that is fitted to the signal.",
     example: "fit order 1 in H2O2",

@@ -91,6 +91,12 @@ export const languageMessages = {
     "A quantity is negative, or zero, that cannot be.",
     ({ what, limit }: { what: string; limit: string }) => `${what} must be ${limit}.`,
   ),
+  "share-of-what": message(
+    "error",
+    "A share of a mixture could be by mass, by amount or by volume.",
+    ({ share }: { share: string }) =>
+      `${share} of what: by mass, by amount or by volume? Give the concentration in the mixture, the amount or the mass instead.`,
+  ),
   "order-in-words": message(
     "error",
     "The order of a reaction is given as a number, and in one species.",

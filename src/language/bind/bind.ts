@@ -13,6 +13,7 @@ import { bindRun } from "./bindRun.js";
 import { checkRun } from "./checkRun.js";
 import { declareSpecies } from "./declareSpecies.js";
 import { checkRepeats, type KeyOf, mergeLines } from "./effectiveLines.js";
+import { withOrderInNumbers } from "./orderInNumbers.js";
 
 /** What a description means, and everything the text alone can tell is wrong with it, in the order of the text. */
 export interface Bound {
@@ -37,7 +38,8 @@ export function bind(parsed: Parsed): Bound {
   checkRepeats(binding, parsed.index, statements, keyOf);
   const runs = bindRuns(binding, parsed, reactions, keyOf);
   const study: Study = { uri, reactions, species: [...declared.values()], runs };
-  const all = [...parsed.problems, ...problems.values()];
+  const fromLines = parsed.problems.map((found) => withOrderInNumbers(found, parsed.text, reactions));
+  const all = [...fromLines, ...problems.values()];
   all.sort((a, b) => a.origin.start - b.origin.start || a.origin.end - b.origin.end);
   return { parsed, study, problems: all, uses };
 }
