@@ -98,11 +98,18 @@ function guess(state: State, line: LineStatement, text: string, offset: number):
     const row = statementByHead.get(head);
     return row !== undefined && state.open.some((open) => takes(state, open.owner, row));
   });
-  const near = nearest(line.head.text, allowed)[0] ?? null;
+  const near = nearest(line.head.text, allowed)[0] ?? begunHeader(line, allowed);
   const mend = near === null ? [] : [replacement(line.head, near)];
   const unknown = fault("word-unknown", { word: line.head.text, allowed: describeHeads(allowed) }, line.head, mend);
   state.problems.push(placed(unknown, state.uri, offset));
   const row = near === null ? undefined : statementByHead.get(near);
   const meant = row === undefined ? undefined : parseLineAs(text, row).statements[0];
   return meant === undefined ? null : { ...meant, fault: unknown };
+}
+
+/** A header that is being typed at the margin: the lines below it are not those of the run above. */
+function begunHeader({ head }: LineStatement, allowed: readonly string[]): string | null {
+  if (head.start > 0) return null;
+  const headers = allowed.filter((word) => statementByHead.get(word)?.opens === "run");
+  return headers.find((word) => word.startsWith(head.text)) ?? null;
 }

@@ -234,7 +234,8 @@ function mendsOf(cursor: Cursor, wanted: readonly Part[], token: Token): Mend[] 
     const span = { start: token.start, end: last.end };
     return [replacement(span, `"${cursor.text.slice(span.start, span.end)}"`)];
   }
-  if (only === "name" && token.kind === "string" && isName(token.text)) return [replacement(token, token.text)];
+  const alone = token === cursor.tokens[cursor.tokens.length - 1];
+  if (only === "name" && token.kind === "string" && alone && isName(token.text)) return [replacement(token, token.text)];
   return [];
 }
 

@@ -74,8 +74,8 @@ function bindFollow(
     const origin = originOf(uri, statement, "column");
     binding.uses.push({ kind: "column", name: column, run, declares: false, origin });
     if (dataLine !== undefined && !declaredIn(dataLine, column)) {
-      const names = (data?.columns ?? []).map((candidate) => candidate.name);
-      const known = names.length === 0 ? ". Declare it below the data line" : `; there are ${names.join(", ")}`;
+      const names = [...new Set((data?.columns ?? []).map((candidate) => candidate.name))];
+      const known = names.length === 0 ? ". Declare it below the data line" : `; there ${names.length === 1 ? "is" : "are"} ${names.join(", ")}`;
       const mend = nearest(column, names).map((near) => replacement(origin, near));
       report(binding, problem("name-unknown", { what: "column", name: column, known }, origin, mend));
     }
@@ -97,9 +97,10 @@ function bindFollow(
   return [{ id, origin: originOf(uri, statement), block: blockOf(uri, statement), species, monitor, column }];
 }
 
-/** Whether a data line declares a column, be it on a line that is otherwise broken. */
+/** Whether a data line declares a column, or may: a line so broken that it lost its name could be the one. */
 function declaredIn(dataLine: Statement, column: string): boolean {
-  return dataLine.children.some((child) => textOf(child, "column") === column);
+  const lines = dataLine.children.filter((child) => child.line.row?.head === "column");
+  return lines.some((child) => textOf(child, "column") === column || textOf(child, "column") === null);
 }
 
 function textFact(uri: string, statement: Statement | undefined, label: string): Fact<string> | null {
