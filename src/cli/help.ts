@@ -1,3 +1,4 @@
+import { alignedTable } from "../report/table.js";
 import type { Command } from "./command.js";
 import { commands } from "./commands.js";
 
@@ -25,13 +26,16 @@ function overview(): string {
 }
 
 function commandHelp({ name, summary, options, example }: Command): string {
-  const width = Math.max(...Object.keys(options).map((option) => option.length));
+  const rows = Object.entries(options).map(([option, { words, takes }]) => [
+    takes === undefined ? `--${option}` : `--${option} ${takes}`,
+    words,
+  ]);
   return [
     `ratewright ${name}: ${summary}`,
     "",
     `usage: ratewright ${name} [OPTION…] PATH…`,
     "",
-    ...Object.entries(options).map(([option, words]) => `  --${option.padEnd(width)}  ${words}`),
+    ...alignedTable(rows, "  "),
     "",
     `example: ${example}`,
     "",

@@ -23,12 +23,18 @@ export async function runCommandLine(words: readonly string[], io: Io): Promise<
     const hint = near === undefined ? `the commands are ${names.join(", ")}` : `the nearest is ${near}`;
     return misuse(io, `there is no command ${first}; ${hint}`);
   }
-  const options = Object.fromEntries(
-    [...Object.keys(command.options), "help"].map((name) => [name, { type: "boolean" as const }]),
-  );
+  const options = Object.fromEntries([
+    ["help", { type: "boolean" as const }],
+    ...Object.entries(command.options).map(([name, { takes }]) => [
+      name,
+      { type: takes === undefined ? ("boolean" as const) : ("string" as const) },
+    ]),
+  ]);
   try {
     const { values, positionals } = parseArgs({ args: rest, options, allowPositionals: true });
-    const given = new Set(Object.keys(values));
+    const given = new Map(
+      Object.entries(values).map(([name, value]) => [name, typeof value === "string" ? value : ""]),
+    );
     if (given.has("help")) {
       io.out(help(command));
       return 0;

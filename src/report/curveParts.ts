@@ -46,12 +46,12 @@ function endNumbers(fits: PictureContent["fits"], time: Scale, signal: Scale, bo
     const t = curve.time.values.at(-1);
     const value = curve.signal.values.at(-1);
     if (typeof t !== "number" || typeof value !== "number") return [];
-    return [{ number, order, x: Math.min(time.at(t), box.right) - 2, y: signal.at(value) - 6 }];
+    return [{ number, order, x: Math.min(time.at(t), box.right) - 2, y: signal.at(value) - 9 }];
   });
-  ends.sort((a, b) => a.y - b.y);
-  let before = box.top - 4;
+  ends.sort((a, b) => b.y - a.y);
+  let before = box.bottom + 9;
   return ends.map(({ number, order, x, y }) => {
-    before = Math.max(before + 13, y);
+    before = Math.min(before - 13, y);
     const { colour } = curveLook(order, palette);
     return `<text x="${px(x)}" y="${px(before)}" text-anchor="end" fill="${colour}">fit ${number}</text>`;
   });

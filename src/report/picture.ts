@@ -46,14 +46,14 @@ export function runPicture(run: Run, follow: Run["follow"][number], style: Pictu
   const strip = residuals.length === 0 ? 0 : style.strip;
   const top = 26;
   const bottom = height - 36 - (strip === 0 ? 0 : strip + 26);
-  const signalTicks = (low: number, high: number) => niceTicks(low, high, Math.max(2, (bottom - top) / 48));
+  const signalTicks = (low: number, high: number) => niceTicks(low, high, Math.max(2, (bottom - top) / 36));
   const [low, high] = extentOf(signalsOf(content), 0.05);
   const across = signalTicks(low, high);
   const gap = Math.max(...across.labels.map((label) => label.length), 1) * digit + 16;
   const box: Box = { left: Math.max(gap, strip === 0 ? 0 : 64), right: width - 16, top, bottom };
   const time = linearScale(...extentOf(timesOf(content), 0.02), box.left, box.right);
   const signal = linearScale(low, high, box.bottom, box.top);
-  const along = niceTicks(time.low, time.high, (box.right - box.left) / 72);
+  const along = niceTicks(time.low, time.high, (box.right - box.left) / 64);
   const floor = strip === 0 ? box.bottom : height - 36;
   const parts = [
     palette.card

@@ -41,7 +41,8 @@ export function px(value: number): string {
   return String(rounded === 0 ? 0 : rounded);
 }
 
-type Point = readonly [x: number, y: number];
+/** A place in the picture, px. */
+export type Point = readonly [x: number, y: number];
 
 /** The part of a straight line that lies in the box (Liang and Barsky 1984); null where none does. */
 export function clipSegment([x1, y1]: Point, [x2, y2]: Point, box: Box): [Point, Point] | null {

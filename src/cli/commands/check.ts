@@ -8,8 +8,8 @@ export const check: Command = {
   name: "check",
   summary: "say what is wrong with descriptions and their data files",
   options: {
-    json: "print the findings as JSON, without runs",
-    lines: "print one line each: file:line:column: severity: message [code]",
+    json: { words: "print the findings as JSON, without runs" },
+    lines: { words: "print one line each: file:line:column: severity: message [code]" },
   },
   example: "ratewright check runs/peroxide.raterun",
   async run(paths, options, io) {
