@@ -1,8 +1,10 @@
-// Bundles everything that runs: node src/build/build.mjs. Other scripts import `build`.
+// Bundles everything that runs: node src/build/build.mjs. Other scripts import `build`. With --write the files made from
+// the code that are kept in the repository are written anew too; a test says when one of them is not current.
 import { rm } from "node:fs/promises";
 import { join } from "node:path";
 import { pathToFileURL } from "node:url";
 import { build as bundle } from "esbuild";
+import { writeGrammar } from "./grammarFile.mjs";
 import { root } from "./install.mjs";
 
 const shared = {
@@ -24,6 +26,9 @@ const node = {
   banner: { js: 'const bundleUrl=require("node:url").pathToFileURL(__filename).href;' },
 };
 
+const web = { ...shared, platform: "browser", format: "iife" };
+const client = { format: "cjs", external: ["vscode"] };
+
 /** Entry, bundle and how it is made. */
 const bundles = [
   {
@@ -32,6 +37,11 @@ const bundles = [
     outfile: "dist/ratewright.cjs",
     banner: { js: `#!/usr/bin/env node\n${node.banner.js}` },
   },
+  { ...node, entryPoints: ["src/server/node.ts"], outfile: "dist/server.cjs" },
+  { ...node, entryPoints: ["src/server/compute/workerNode.ts"], outfile: "dist/worker.cjs" },
+  { ...web, entryPoints: ["src/server/web.ts"], outfile: "dist/server.web.js" },
+  { ...node, ...client, entryPoints: ["src/extension/node.ts"], outfile: "dist/extension.cjs" },
+  { ...web, ...client, entryPoints: ["src/extension/web.ts"], outfile: "dist/extension.web.js" },
 ];
 
 /** Builds all bundles into dist/ and gives their sizes in bytes, by name. */
@@ -44,5 +54,6 @@ export async function build() {
 }
 
 if (process.argv[1] !== undefined && import.meta.url === pathToFileURL(process.argv[1]).href) {
+  if (process.argv.includes("--write")) await writeGrammar();
   for (const [name, bytes] of Object.entries(await build())) console.log(`${name}  ${Math.round(bytes / 1000)} kB`);
 }

@@ -21,17 +21,24 @@ export interface Computer {
   compute(job: Job, signal: AbortSignal): Promise<Description | null>;
 }
 
+/** What a job is done with, wherever it is done. */
+export interface JobTools {
+  readonly store: ColumnStore;
+  readonly stopped: () => boolean;
+  readonly breathe: () => Promise<void>;
+}
+
+/** Does a job in this thread; null when `stopped` said so meanwhile. */
+export async function computeJob(job: Job, tools: JobTools): Promise<Description | null> {
+  const bound: Bound = bind(parse(job.uri, job.text));
+  const { path, files, sizeLimit, curves } = job;
+  const description = await describe(bound, { path, files, sizeLimit, curves, ...tools });
+  return tools.stopped() ? null : description;
+}
+
 /** Works in the same thread and gives way by `breathe`. */
 export function inlineComputer(breathe: () => Promise<void>, store: ColumnStore = columnStore()): Computer {
-  return {
-    async compute(job, signal) {
-      const stopped = (): boolean => signal.aborted;
-      const bound: Bound = bind(parse(job.uri, job.text));
-      const { path, files, sizeLimit, curves } = job;
-      const description = await describe(bound, { path, files, store, sizeLimit, curves, stopped, breathe });
-      return signal.aborted ? null : description;
-    },
-  };
+  return { compute: (job, signal) => computeJob(job, { store, breathe, stopped: () => signal.aborted }) };
 }
 
 /** Bytes of all data files of a job: what decides whether it is worth a worker. */

@@ -1,0 +1,58 @@
+import { type ExtensionContext, type LogOutputChannel, window, workspace } from "vscode";
+import type { BaseLanguageClient, LanguageClientOptions } from "vscode-languageclient";
+import {
+  type InitializationOptions,
+  type ReadFileAnswer,
+  readFile,
+  statusChanged,
+  type ThemeChanged,
+  themeChanged,
+  trustGranted,
+} from "../contract/editorProtocol.js";
+import { registerRestartServer } from "./commands/restartServer.js";
+import { registerShowLog } from "./commands/showLog.js";
+import { readForServer } from "./readForServer.js";
+import { createStatusItem } from "./statusItem.js";
+import { themeKind } from "./themeKind.js";
+
+/** Makes the client with its server, not started; how differs between Node and the web. */
+export type MakeClient = (options: LanguageClientOptions) => BaseLanguageClient;
+
+/** Starts everything the extension is. Whatever goes wrong with the server is said in the log and the status item. */
+export async function activateWith(context: ExtensionContext, make: MakeClient): Promise<BaseLanguageClient> {
+  const log = window.createOutputChannel("Ratewright", { log: true });
+  const client = make(clientOptions(log));
+  const status = createStatusItem(client);
+  context.subscriptions.push(
+    log,
+    status,
+    registerShowLog(log),
+    registerRestartServer(client, log),
+    client.onNotification(statusChanged, status.take),
+    client.onRequest<ReadFileAnswer, unknown>(readFile, readForServer),
+    window.onDidChangeActiveColorTheme(() => {
+      const message: ThemeChanged = { theme: themeKind() };
+      return client.isRunning() ? client.sendNotification(themeChanged, message) : undefined;
+    }),
+    workspace.onDidGrantWorkspaceTrust(() => {
+      return client.isRunning() ? client.sendNotification(trustGranted) : undefined;
+    }),
+  );
+  try {
+    await client.start();
+  } catch (error) {
+    log.error(`The language server did not start: ${error instanceof Error ? error.message : String(error)}`);
+  }
+  return client;
+}
+
+function clientOptions(log: LogOutputChannel): LanguageClientOptions {
+  return {
+    documentSelector: [{ language: "raterun" }],
+    outputChannel: log,
+    // Asked for at each start, so that a restarted server knows the theme and the trust of that moment.
+    initializationOptions: (): InitializationOptions => ({ theme: themeKind(), trusted: workspace.isTrusted }),
+    markdown: { isTrusted: false, supportHtml: false },
+    diagnosticCollectionName: "ratewright",
+  };
+}

@@ -1,0 +1,72 @@
+import {
+  defaultSettings,
+  type EditorSettings,
+  type InitializationOptions,
+  type ThemeKind,
+} from "../contract/editorProtocol.js";
+
+/** What is known of the client and of the person's choices; changes while the server runs. */
+export interface ClientState {
+  /** null until the client tells */
+  theme: ThemeKind | null;
+  trusted: boolean;
+  /** URIs of the opened folders */
+  folders: string[];
+  settings: EditorSettings;
+  /** what the client is able to do */
+  readonly abilities: ClientAbilities;
+}
+
+export interface ClientAbilities {
+  configuration: boolean;
+  configurationEvents: boolean;
+  folderEvents: boolean;
+  /** it watches files as told, by patterns below a folder */
+  watching: boolean;
+  /** it takes edits that name the version of the document they are for */
+  versionedEdits: boolean;
+}
+
+/** The state before `initialize`; nothing is trusted until the client says so. */
+export function createClientState(): ClientState {
+  return {
+    theme: null,
+    trusted: false,
+    folders: [],
+    settings: defaultSettings,
+    abilities: {
+      configuration: false,
+      configurationEvents: false,
+      folderEvents: false,
+      watching: false,
+      versionedEdits: false,
+    },
+  };
+}
+
+/** What the client said on `initialize`; a client that says nothing of trust is one that asks for none. */
+export function readInitializationOptions(state: ClientState, options: unknown): void {
+  const told = isRecord(options) ? (options as Partial<InitializationOptions>) : {};
+  state.trusted = told.trusted ?? true;
+  state.theme = told.theme ?? null;
+}
+
+/** Settings as the client answers, each replaced by its default where it is not a number that makes sense. */
+export function readSettings(answer: unknown): EditorSettings {
+  const delay = numberIn(answer, "preview", "updateDelay");
+  const size = numberIn(answer, "data", "maximumSize");
+  return {
+    preview: { updateDelay: delay !== null && delay >= 0 ? delay : defaultSettings.preview.updateDelay },
+    data: { maximumSize: size !== null && size > 0 ? size : defaultSettings.data.maximumSize },
+  };
+}
+
+function numberIn(answer: unknown, section: string, name: string): number | null {
+  const inner = isRecord(answer) ? answer[section] : undefined;
+  const value = isRecord(inner) ? inner[name] : undefined;
+  return typeof value === "number" && Number.isFinite(value) ? value : null;
+}
+
+function isRecord(value: unknown): value is Record<string, unknown> {
+  return typeof value === "object" && value !== null;
+}

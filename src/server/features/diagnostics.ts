@@ -1,0 +1,50 @@
+import { DiagnosticSeverity, type Diagnostic as LspDiagnostic } from "vscode-languageserver";
+import type { TextDocument } from "vscode-languageserver-textdocument";
+import type { Diagnostic } from "../../contract/findings.js";
+import type { Feature, ServerContext } from "../context.js";
+import { rangeOf } from "../places.js";
+
+const severities = {
+  error: DiagnosticSeverity.Error,
+  warning: DiagnosticSeverity.Warning,
+  information: DiagnosticSeverity.Information,
+} as const;
+
+/** A diagnostic as the protocol has it. */
+export function protocolDiagnostic(diagnostic: Diagnostic): LspDiagnostic {
+  const { severity, code, message } = diagnostic;
+  return { range: rangeOf(diagnostic), severity: severities[severity], code, source: "ratewright", message };
+}
+
+/**
+ * What is wrong, as one types: the text's own problems at once, what data and fits show after a pause. Nothing is sent
+ * that stands there already, so that nothing flickers.
+ */
+export const diagnostics: Feature = {
+  capabilities: {},
+  start(context) {
+    const sent = new Map<string, string>();
+    const send = ({ uri, version }: TextDocument, all: readonly Diagnostic[]): void => {
+      const shown = all.map(protocolDiagnostic);
+      const words = JSON.stringify(shown);
+      if (sent.get(uri) === words) return;
+      sent.set(uri, words);
+      void context.connection.sendDiagnostics({ uri, version, diagnostics: shown });
+    };
+    context.documents.onDidChangeContent(({ document }) => {
+      send(document, context.shown.text(document, boundOf(context, document)));
+    });
+    context.loop.onFindings((document, description) => {
+      send(document, context.shown.findings(document, boundOf(context, document), description));
+    });
+    context.documents.onDidClose(({ document: { uri } }) => {
+      sent.delete(uri);
+      context.shown.close(uri);
+      void context.connection.sendDiagnostics({ uri, diagnostics: [] });
+    });
+  },
+};
+
+function boundOf(context: ServerContext, document: TextDocument) {
+  return context.workspace().bound(context.document(document));
+}

@@ -1,0 +1,110 @@
+import { type Connection, type InitializeParams, TextDocumentSyncKind, TextDocuments } from "vscode-languageserver";
+import { TextDocument } from "vscode-languageserver-textdocument";
+import type { Reader } from "../contract/reader.js";
+import { version } from "../contract/version.js";
+import type { FileAccess } from "../workspace/loadFiles.js";
+import { createWorkspace, type Document, type Workspace } from "../workspace/workspace.js";
+import { type ClientState, createClientState, readInitializationOptions } from "./clientState.js";
+import type { EndableComputer } from "./compute/workerComputer.js";
+import type { Feature, ServerContext } from "./context.js";
+import { features } from "./features/features.js";
+import { createFindingsLoop } from "./findingsLoop.js";
+import { fenceOf, shownPath } from "./folders.js";
+import { createShownDiagnostics } from "./shownDiagnostics.js";
+
+/** What differs between Node and a web worker. */
+export interface ServerHost {
+  reader(connection: Connection): Reader;
+  /** where findings are worked out; asked for anew whenever what may be read has changed */
+  computer(log: (line: string) => void): EndableComputer;
+}
+
+/** Serves a connection until it ends. */
+export function startServer(connection: Connection, host: ServerHost): void {
+  const documents = new TextDocuments(TextDocument);
+  const client = createClientState();
+  const log = (line: string): void => connection.console.info(line);
+  const open = (): Opened => openWorkspace(host, connection, client, log);
+  let opened: Opened | null = null;
+  const current = (): Opened => {
+    opened ??= open();
+    return opened;
+  };
+  const document = (text: TextDocument): Document => {
+    return { uri: text.uri, text: text.getText(), path: shownPath(text.uri, client.folders) };
+  };
+  const workspace = (): Workspace => current().workspace;
+  const delay = (): number => client.settings.preview.updateDelay;
+  const loop = createFindingsLoop({ documents, workspace, document, delay });
+  const context: ServerContext = {
+    connection,
+    documents,
+    client,
+    workspace,
+    access: () => current().access,
+    document,
+    loop,
+    shown: createShownDiagnostics(),
+    log,
+    renew() {
+      opened?.computer.end();
+      opened = null;
+      for (const { uri } of documents.all()) loop.refresh(uri);
+    },
+  };
+
+  connection.onInitialize((params) => {
+    readClient(client, params);
+    return {
+      capabilities: capabilitiesOf(features),
+      serverInfo: { name: "ratewright", version },
+    };
+  });
+  documents.onDidClose(({ document: { uri } }) => workspace().close(uri));
+  for (const feature of features) feature.start(context);
+  connection.onShutdown(() => {
+    loop.end();
+    opened?.computer.end();
+  });
+  documents.listen(connection);
+  connection.listen();
+}
+
+interface Opened {
+  readonly access: FileAccess;
+  readonly computer: EndableComputer;
+  readonly workspace: Workspace;
+}
+
+function openWorkspace(
+  host: ServerHost,
+  connection: Connection,
+  client: ClientState,
+  log: (line: string) => void,
+): Opened {
+  const access: FileAccess = {
+    reader: host.reader(connection),
+    sizeLimit: client.settings.data.maximumSize * 1e6,
+    within: (description) => (client.trusted ? null : fenceOf(description, client.folders)),
+  };
+  const computer = host.computer(log);
+  return { access, computer, workspace: createWorkspace(access, computer) };
+}
+
+function readClient(client: ClientState, params: InitializeParams): void {
+  readInitializationOptions(client, params.initializationOptions);
+  client.folders = (params.workspaceFolders ?? []).map(({ uri }) => uri);
+  const { workspace } = params.capabilities;
+  const { abilities } = client;
+  abilities.configuration = workspace?.configuration === true;
+  abilities.configurationEvents = workspace?.didChangeConfiguration?.dynamicRegistration === true;
+  abilities.folderEvents = workspace?.workspaceFolders === true;
+  const watching = workspace?.didChangeWatchedFiles;
+  abilities.watching = watching?.dynamicRegistration === true && watching.relativePatternSupport === true;
+  abilities.versionedEdits = workspace?.workspaceEdit?.documentChanges === true;
+}
+
+function capabilitiesOf(all: readonly Feature[]): Feature["capabilities"] {
+  const common = { textDocumentSync: TextDocumentSyncKind.Incremental, positionEncoding: "utf-16" };
+  return Object.assign(common, ...all.map(({ capabilities }) => capabilities));
+}
