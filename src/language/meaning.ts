@@ -1,7 +1,7 @@
 import type { Study } from "../study/study.js";
 
 /** Keys that say where and how something is written, not what it means. */
-const notMeaning = new Set(["origin", "block", "id", "uri", "reactants", "products"]);
+const notMeaning = new Set(["origin", "block", "id", "uri", "reactants", "products", "pathOrigin"]);
 
 /**
  * The meaning of a study as one canonical text: units in SI, keys in order, no places, order only where order

@@ -1,5 +1,5 @@
 import type { Note } from "../analysis/notes.js";
-import { mendTitle, messageOf } from "../contract/catalogue.js";
+import { mendTitle, messageOf } from "../contract/words.js";
 import type { Diagnostic, Run } from "../contract/findings.js";
 import type { Problem, Span } from "../contract/problem.js";
 import type { Bound } from "../language/bind/bind.js";

@@ -1,6 +1,6 @@
 import assert from "node:assert/strict";
 import fc from "fast-check";
-import { messageOf } from "../../src/contract/catalogue.js";
+import { messageOf } from "../../src/contract/words.js";
 import type { Problem } from "../../src/contract/problem.js";
 import { cellProblems, rowProblems, timeProblems } from "../../src/data/columnProblems.js";
 import type { DataOptions } from "../../src/data/dataOptions.js";

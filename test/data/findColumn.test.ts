@@ -1,5 +1,5 @@
 import assert from "node:assert/strict";
-import { messageOf } from "../../src/contract/catalogue.js";
+import { messageOf } from "../../src/contract/words.js";
 import { findColumn } from "../../src/data/findColumn.js";
 import { columnsOf } from "./reading.js";
 

@@ -1,5 +1,5 @@
 import assert from "node:assert/strict";
-import { messageOf } from "../../src/contract/catalogue.js";
+import { messageOf } from "../../src/contract/words.js";
 import { dataMessages } from "../../src/contract/messages/data.js";
 import type { Problem } from "../../src/contract/problem.js";
 import type { ReadOutcome } from "../../src/contract/reader.js";

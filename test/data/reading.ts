@@ -1,5 +1,5 @@
 import assert from "node:assert/strict";
-import { messageOf } from "../../src/contract/catalogue.js";
+import { messageOf } from "../../src/contract/words.js";
 import type { Columns } from "../../src/data/columns.js";
 import { type DataOptions, refusalProblem } from "../../src/data/dataOptions.js";
 import { readColumns } from "../../src/data/readColumns.js";

@@ -1,5 +1,5 @@
 import assert from "node:assert/strict";
-import { messageOf } from "../../src/contract/catalogue.js";
+import { messageOf } from "../../src/contract/words.js";
 import type { Fault } from "../../src/contract/problem.js";
 import { isFault } from "../../src/quantity/shifted.js";
 
