@@ -1,6 +1,7 @@
 import { toSuperscript } from "../quantity/plainText.js";
 import { printedUnit } from "../quantity/quantityText.js";
 import { escapeHtml } from "./escape.js";
+import { printedSpecies } from "./printedSpecies.js";
 
 /** What an axis shows: symbol (slanted where it is one), of what, unit, and the power of ten taken out of its numbers. */
 export interface AxisName {
@@ -14,7 +15,7 @@ export interface AxisName {
 
 /** The name of the signal axis of a follow line. */
 export function signalName(follow: { monitor: string; species: string; column: string }, unit: string): AxisName {
-  if (follow.monitor === "concentration") return { symbol: "c", of: follow.species, unit, power: 0 };
+  if (follow.monitor === "concentration") return { symbol: "c", of: printedSpecies(follow.species), unit, power: 0 };
   return { symbol: follow.column, of: "", unit, power: 0 };
 }
 

@@ -31,7 +31,7 @@ export function countWords(diagnostics: readonly Diagnostic[]): string {
   const words = [
     ...count("error", "error", "errors"),
     ...count("warning", "warning", "warnings"),
-    ...count("information", "information", "informations"),
+    ...count("information", "piece of information", "pieces of information"),
   ];
   return words.length === 0 ? "nothing to mend" : words.join(", ");
 }

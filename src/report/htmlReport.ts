@@ -70,8 +70,11 @@ ${part("What to watch", runWatch(run, own))}
 }
 
 /** One step of the argument; folded, its gist is the one line left. */
-function part(name: string, { gist, body }: { gist: string; body: Html }): Html {
-  const line = gist === "" ? nothing : html` <span class="gist">${gist}</span>`;
+function part(name: string, { gist, body }: { gist: string | Html; body: Html }): Html {
+  const line =
+    gist === "" || (typeof gist === "object" && gist.markup === "")
+      ? nothing
+      : html` <span class="gist">${gist}</span>`;
   return html`<details open><summary><h4>${name}</h4>${line}</summary>${body}</details>`;
 }
 

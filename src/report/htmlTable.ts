@@ -4,7 +4,11 @@ import { type Html, html, nothing } from "./html.js";
 export type Cell = string | Html | null;
 
 /** A table with a caption and heads; the first cell of each row is its head. Columns that are empty throughout are left out. */
-export function headedTable(caption: string, heads: readonly string[], rows: readonly (readonly Cell[])[]): Html {
+export function headedTable(
+  caption: string,
+  heads: readonly (string | Html)[],
+  rows: readonly (readonly Cell[])[],
+): Html {
   if (rows.length === 0) return nothing;
   const shown = heads.map((_, column) => column === 0 || rows.some((row) => !isEmpty(row[column])));
   const kept = <T>(cells: readonly T[]): T[] => cells.filter((_, column) => shown[column]);

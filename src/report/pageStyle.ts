@@ -32,7 +32,7 @@ th, td { text-align: left; vertical-align: baseline; padding: .22rem 1.1rem .22r
 thead th { color: var(--faint); font-size: .85rem; border-bottom: 1px solid var(--rule); }
 thead td { border-bottom: 1px solid var(--rule); }
 td:last-child { padding-right: 0; }
-.facts th { color: var(--faint); width: 11rem; }
+.facts th { color: var(--faint); width: 13rem; }
 .facts td:nth-child(3) { text-align: right; width: 5rem; }
 .unseen { position: absolute; width: 1px; height: 1px; overflow: hidden; clip-path: inset(50%); }
 figure { margin: 1rem 0; }

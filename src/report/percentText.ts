@@ -7,5 +7,5 @@ export function percentText(share: number): string {
   if (percent > 0 && percent < 0.01) return "under 0.01 %";
   const size = Math.abs(percent);
   const decimals = size >= 99.95 ? 0 : size >= 95 ? 1 : size >= 9.95 ? 0 : size >= 0.995 ? 1 : size > 0 ? 2 : 0;
-  return `${percent.toFixed(decimals).replace("-", "\u2212")}\u00a0%`;
+  return `${percent.toFixed(decimals).replace("-", "\u2212")} %`;
 }

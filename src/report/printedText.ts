@@ -19,3 +19,13 @@ export function printedQuantity({ text, unit }: Pick<Q, "text" | "unit">): strin
   if (unit === "" || !text.endsWith(tail)) return printedNumber(text);
   return `${printedNumber(text.slice(0, -tail.length))} ${printedUnit(unit)}`.replaceAll(" ", "\u00a0");
 }
+
+/** A sentence with numbers and units in it, with the signs of print: `k = 5.5(1)e-4 min^-1` and the like. */
+export function printedSentence(text: string): string {
+  return text
+    .replace(/(?<=[\d)])e([+-]?)(\d+)\b/g, (_, sign: string, digits: string) => {
+      return `\u00a0×\u00a010${toSuperscript(`${sign === "-" ? "-" : ""}${digits}`)}`;
+    })
+    .replace(/(?<=[A-Za-z])\^(-?\d+)(?![\d.+])/g, (_, exponent: string) => toSuperscript(exponent))
+    .replace(/(?<![\w)⁻])-(?=\d)/g, "\u2212");
+}

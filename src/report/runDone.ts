@@ -1,12 +1,8 @@
 import type { Run } from "../contract/findings.js";
 import { type Html, html } from "./html.js";
 import { type Cell, factTable } from "./htmlTable.js";
+import { printedEquation, printedSpecies } from "./printedSpecies.js";
 import { printedQuantity } from "./printedText.js";
-
-/** An equation with the signs of print: `->` as →, `<=>` as ⇌. */
-export function printedEquation(equation: string): string {
-  return equation.replace(/<=>|<->/g, "⇌").replace(/->/g, "→");
-}
 
 /** What was done: the equation, what was taken, the conditions. */
 export function runDone(run: Run): { gist: string; body: Html } {
@@ -15,7 +11,10 @@ export function runDone(run: Run): { gist: string; body: Html } {
   for (const { species, given, concentration, limiting } of run.taken) {
     const converted =
       concentration === null || concentration.text === given.text ? "" : `, that is ${printedQuantity(concentration)}`;
-    rows.push([`taken of ${species}`, `${printedQuantity(given)}${converted}${limiting ? "; runs out first" : ""}`]);
+    rows.push([
+      `taken of ${printedSpecies(species)}`,
+      `${printedQuantity(given)}${converted}${limiting ? "; runs out first" : ""}`,
+    ]);
   }
   for (const [name, value] of Object.entries(run.conditions)) rows.push([name, printedQuantity(value)]);
   if (run.conditions["temperature"] === undefined) rows.push(["temperature", "not stated"]);

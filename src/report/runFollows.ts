@@ -1,19 +1,24 @@
-import type { P, Run } from "../contract/findings.js";
+import type { P, Q, Run } from "../contract/findings.js";
 import { formatNumber } from "../quantity/formatNumber.js";
 import { toSuperscript } from "../quantity/plainText.js";
 import { type Html, html } from "./html.js";
 import { type Cell, headedTable, lineCell } from "./htmlTable.js";
-import { printedNumber, printedQuantity } from "./printedText.js";
+import { printedSpecies } from "./printedSpecies.js";
+import { printedNumber, printedQuantity, printedSentence } from "./printedText.js";
 import { rateName } from "./rateName.js";
 
 type Fit = Run["fits"][number];
 
 /** What follows: rates, parameters of each fit, the comparison as a sentence. */
-export function runFollows(run: Run): { gist: string; body: Html } {
+export function runFollows(run: Run): { gist: string | Html; body: Html } {
   const ks = run.fits.flatMap(({ parameters }) => (parameters["k"] === undefined ? [] : [parameters["k"]]));
-  const gist = ks.map((k) => `k = ${printedQuantity(k)}`).join("; ");
   return {
-    gist: gist !== "" ? gist : run.fits.length > 0 ? "no rate constant" : "",
+    gist:
+      ks.length > 0
+        ? html`${ks.map((k, i) => html`${i === 0 ? "" : "; "}<i>k</i> = ${printedQuantity(k)}`)}`
+        : run.fits.length > 0
+          ? "no rate constant"
+          : "",
     body: html`${rateTable(run)}${run.fits.map(fitPart)}${run.comparisons.map(({ text }) => html`<p>${text}</p>`)}`,
   };
 }
@@ -21,17 +26,39 @@ export function runFollows(run: Run): { gist: string; body: Html } {
 function rateTable(run: Run): Html {
   const rows = run.rates.map((rate, index): Cell[] => [
     String(index + 1),
-    printedNumber(rateName(rate)),
-    rate.rate === null ? "no rate" : printedQuantity(rate.rate),
-    rate.species === null ? null : `${rate.species.name}: ${printedQuantity(rate.species.rate)}`,
-    rate.signal === null || rate.signal.text === rate.species?.rate.text ? null : printedQuantity(rate.signal),
-    lineCell(rate),
+    html`${rateName(rate, printedQuantity)} ${lineCell(rate)}`,
+    rate.rate === null ? "no rate" : wrapping(rate.rate),
+    rate.species === null ? null : wrapping(rate.species.rate),
+    rate.signal === null || rate.signal.text === rate.species?.rate.text ? null : wrapping(rate.signal),
   ]);
-  return headedTable("Rates of reaction", ["", "which", "v", "dc/dt of", "of the signal", "from"], rows);
+  const species = run.rates.find((rate) => rate.species !== null)?.species?.name ?? "";
+  const heads = [
+    "",
+    "which",
+    html`<i>v</i>`,
+    html`d<i>c</i>(${printedSpecies(species)})/d<i>t</i>`,
+    "slope of the signal",
+  ];
+  return headedTable("Rates of reaction", heads, rows);
+}
+
+/** A quantity that may break between number and unit, for a narrow column. */
+function wrapping(quantity: Q): string {
+  const printed = printedQuantity(quantity);
+  const last = printed.lastIndexOf("\u00a0");
+  return quantity.unit === "" || last < 0 ? printed : `${printed.slice(0, last)} ${printed.slice(last + 1)}`;
 }
 
 function fitPart(fit: Fit, index: number): Html {
-  return html`<h5>Fit ${index + 1}: ${fit.law} ${lineCell(fit)}</h5>${rateLaw(fit)}${parameterTable(fit, index + 1)}${fit.verdict === "" ? html`` : html`<p class="verdict">${printedNumber(fit.verdict)}</p>`}`;
+  return html`<h5>Fit ${index + 1}: ${printedLaw(fit)} ${lineCell(fit)}</h5>${rateLaw(fit)}${parameterTable(fit, index + 1)}${verdictPart(fit.verdict)}`;
+}
+
+/** The verdict as a sentence, its k slanted where it begins with one. */
+export function verdictPart(verdict: string): Html {
+  if (verdict === "") return html``;
+  const printed = printedSentence(verdict);
+  const body = printed.startsWith("k = ") ? html`<i>k</i>${printed.slice(1)}` : html`${printed}`;
+  return html`<p class="verdict">${body}</p>`;
 }
 
 /** v = k c(A)ⁿ, symbols slanted. */
@@ -39,9 +66,14 @@ function rateLaw({ orders, parameters }: Fit): Html {
   if (parameters["k"] === undefined || orders.length === 0) return html``;
   const factors = orders.map(({ species, value }) => {
     const power = value === 1 ? "" : Number.isInteger(value) ? toSuperscript(String(value)) : `^${value}`;
-    return value === 0 ? html`` : html` <i>c</i>(${species})${power}`;
+    return value === 0 ? html`` : html` <i>c</i>(${printedSpecies(species)})${power}`;
   });
   return html`<p>Rate law: <i>v</i> = <i>k</i>${factors}, for the equation as it is written above.</p>`;
+}
+
+/** A law's words with its species as they are printed. */
+export function printedLaw({ law }: Pick<Fit, "law">): string {
+  return law.split(" ").map(printedSpecies).join(" ");
 }
 
 const symbols: Readonly<Record<string, Html>> = { k: html`<i>k</i>`, start: html`start`, infinity: html`infinity` };
@@ -53,7 +85,8 @@ function parameterTable(fit: Fit, number: number): Html {
     if (name !== "k") continue;
     const { kPrime, halfLife } = fit;
     if (kPrime !== null && kPrime.value !== parameter.value) rows.push(parameterRow(html`<i>k</i>′`, kPrime));
-    if (halfLife !== null) rows.push([html`half-life of ${halfLife.species}`, printedQuantity(halfLife), null, null]);
+    if (halfLife !== null)
+      rows.push([html`half-life of ${printedSpecies(halfLife.species)}`, printedQuantity(halfLife), null, null]);
   }
   return headedTable(`Parameters of fit ${number}`, ["", "value", "95 % interval", ""], rows);
 }

@@ -4,6 +4,7 @@ import { type Cell, factTable, headedTable, lineCell } from "./htmlTable.js";
 import { pagePalette } from "./palette.js";
 import { reportStyle, runPicture } from "./picture.js";
 import { type PictureContent, pictureContent, residualsOf } from "./pictureContent.js";
+import { printedSpecies } from "./printedSpecies.js";
 import { printedQuantity } from "./printedText.js";
 import { readingsUsed } from "./readingsUsed.js";
 
@@ -11,7 +12,9 @@ type Follow = Run["follow"][number];
 
 /** What was seen: each followed signal with its picture and what its uncertainty is made of. */
 export function runSeen(run: Run): { gist: string; body: Html } {
-  const gist = run.follow.map((follow) => `${follow.species}, readings: ${readingsUsed(follow)}`).join("; ");
+  const gist = run.follow
+    .map((follow) => `${printedSpecies(follow.species)}, readings: ${readingsUsed(follow)}`)
+    .join("; ");
   return {
     gist: gist === "" ? "nothing was followed" : gist,
     body: html`${run.follow.map((follow) => followed(run, follow))}${suitability(run)}`,
@@ -20,7 +23,11 @@ export function runSeen(run: Run): { gist: string; body: Html } {
 
 function followed(run: Run, follow: Follow): Html {
   const rows: Cell[][] = [
-    ["followed", `${follow.species} as ${follow.monitor}, from column ${follow.column}`, lineCell(follow)],
+    [
+      "followed",
+      `${printedSpecies(follow.species)} as ${follow.monitor}, from column ${follow.column}`,
+      lineCell(follow),
+    ],
     ["readings", readingsUsed(follow), null],
   ];
   for (const { name, kind, u } of follow.sources) {

@@ -1,24 +1,24 @@
 import type { Run } from "../contract/findings.js";
 import { formatQuantity } from "../quantity/formatNumber.js";
+import { causeName } from "./causeName.js";
 import { type Html, html, nothing } from "./html.js";
 import { type Cell, factTable } from "./htmlTable.js";
 import { percentText } from "./percentText.js";
 import { printedQuantity } from "./printedText.js";
+import { printedLaw } from "./runFollows.js";
 
 type Fit = Run["fits"][number];
 
 /** How sure: for each fit the budget of k as one bar, what the residuals say, how far the reaction was followed. */
-export function runSure(run: Run): { gist: string; body: Html } {
+export function runSure(run: Run): { gist: string | Html; body: Html } {
   const sure = run.fits.filter(({ parameters }) => parameters["k"] !== undefined);
   if (sure.length === 0) {
     return { gist: "", body: html`<p>No fit gave a rate constant, so nothing is known of its uncertainty.</p>` };
   }
-  const gist = sure
-    .map(({ parameters: { k } }) =>
-      k === undefined || k.u === null ? "" : `k to ${percentText(k.u / Math.abs(k.value))}`,
-    )
-    .filter((words) => words !== "")
-    .join("; ");
+  const shares = sure.flatMap(({ parameters: { k } }) =>
+    k === undefined || k.u === null ? [] : [percentText(k.u / Math.abs(k.value))],
+  );
+  const gist = html`${shares.map((share, i) => html`${i === 0 ? "" : "; "}<i>k</i> to ${share}`)}`;
   return { gist, body: html`${run.fits.map((fit, index) => fitSure(fit, index + 1, run.fits.length > 1))}` };
 }
 
@@ -39,7 +39,7 @@ function fitSure(fit: Fit, number: number, several: boolean): Html {
   for (const { name, text } of fit.tests) rows.push([name, text]);
   if (fit.correlation !== null)
     rows.push(["correlation of neighbours", fit.correlation.toFixed(2).replace("-", "\u2212")]);
-  const head = several ? html`<h5>Fit ${number}: ${fit.law}</h5>` : nothing;
+  const head = several ? html`<h5>Fit ${number}: ${printedLaw(fit)}</h5>` : nothing;
   return html`${head}${budget(fit)}${factTable(`How sure fit ${number} is`, rows)}`;
 }
 
@@ -62,7 +62,7 @@ function budget({ budget }: Fit): Html {
   });
   const items = causes.map(
     ({ source, kind, share }) =>
-      html`<li><span class="sign ${kind}"></span>${source}: ${percentText(share)} (${kind})</li>`,
+      html`<li><span class="sign ${kind}"></span>${causeName(source, kind)}: ${percentText(share)}</li>`,
   );
   const [first] = causes;
   const most =

@@ -1,6 +1,9 @@
-import type { P, Run } from "../contract/findings.js";
-import { formatNumber } from "../quantity/formatNumber.js";
+import type { Run } from "../contract/findings.js";
+import { fitText } from "./fitText.js";
+import { rateName } from "./rateName.js";
+import { readingsUsed } from "./readingsUsed.js";
 import { alignedTable } from "./table.js";
+import { wrappedText } from "./wrappedText.js";
 
 /** One run in plain text: what was done, what was seen, what follows, how sure, what to watch. */
 export function runText(run: Run): string[] {
@@ -12,7 +15,7 @@ export function runText(run: Run): string[] {
     ...run.fits.flatMap(fitText),
     ...block(
       "cautions",
-      run.cautions.map(({ text }) => `    ${text}`),
+      run.cautions.flatMap(({ text }) => wrappedText(text, "  - ")),
     ),
   ];
 }
@@ -29,58 +32,24 @@ function whatWasDone(run: Run): string[][] {
     const converted = concentration === null || concentration.text === given.text ? "" : ` = ${concentration.text}`;
     rows.push(["taken", `${species} ${given.text}${converted}${limiting ? ", runs out first" : ""}`]);
   }
-  for (const { species, monitor, column, used, points, sources } of run.follow) {
-    const counted = used === points ? `all ${points} readings used` : `${used} of ${points} readings used`;
-    rows.push(["followed", `${species} as ${monitor} from column ${column}, ${counted}`]);
+  for (const follow of run.follow) {
+    const { species, monitor, column, sources } = follow;
+    rows.push(["followed", `${species} as ${monitor} from column ${column}; readings: ${readingsUsed(follow)}`]);
     for (const { name, kind, u } of sources) rows.push(["uncertainty", `${name}: ${u.text} (${kind})`]);
   }
   return rows;
 }
 
 function rateRows(run: Run): string[][] {
-  const rows = run.rates.map(({ kind, from, to, at, rate, species, signal }) => {
-    const when =
-      kind === "average"
-        ? `average from ${from?.text ?? ""} to ${to?.text ?? ""}`
-        : kind === "initial"
-          ? `initial${at === null ? "" : `, at ${at.text}`}`
-          : `at ${at?.text ?? ""}`;
-    const ofSpecies = species === null ? "" : `${species.name}: ${species.rate.text}`;
-    return [when, rate === null ? "no rate" : rate.text, ofSpecies, signal?.text ?? ""];
+  const rows = run.rates.map((rate) => {
+    const v = rate.rate?.text ?? "no rate";
+    const ofSpecies = rate.species?.rate.text ?? "";
+    const ofSignal = rate.signal?.text ?? "";
+    return [rateName(rate), v, ofSpecies, ofSignal === ofSpecies ? "" : ofSignal];
   });
-  return rows.length === 0 ? [] : [["", "v", "d c/d t", "d signal/d t"], ...rows];
-}
-
-function fitText(fit: Run["fits"][number], index: number): string[] {
-  const { k, start, infinity } = fit.parameters;
-  const rows: string[][] = [];
-  if (k !== undefined) rows.push(parameterRow("k", k));
-  if (fit.kPrime !== null && k !== undefined && fit.kPrime.value !== k.value) rows.push(parameterRow("k′", fit.kPrime));
-  if (fit.halfLife !== null) rows.push(["half-life", fit.halfLife.text, `of ${fit.halfLife.species}`]);
-  if (start !== undefined) rows.push(parameterRow("start", start));
-  if (infinity !== undefined) rows.push(parameterRow("infinity", infinity));
-  if (fit.conversion !== null && k !== undefined)
-    rows.push(["conversion", `${(100 * fit.conversion).toPrecision(3)} %`]);
-  if (fit.residual !== null) rows.push(["residual SD", fit.residual.text]);
-  for (const { name, text } of fit.tests) rows.push([name, text]);
-  if (fit.budget.length > 0) rows.push(["budget of k", budgetWords(fit)]);
-  return [
-    "",
-    `  fit ${index + 1}: ${fit.law}`,
-    ...alignedTable(rows, "    "),
-    ...(fit.verdict === "" ? [] : [`    ${fit.verdict}`]),
-  ];
-}
-
-function parameterRow(name: string, parameter: P): string[] {
-  const interval =
-    parameter.interval95 === null
-      ? ""
-      : `95 %: ${parameter.interval95.map((end) => formatNumber(Number(end.toPrecision(5)), null)).join(" to ")}`;
-  return [name, parameter.text, parameter.fixed ? "fixed" : interval];
-}
-
-function budgetWords({ budget, uKind }: Run["fits"][number]): string {
-  const shares = budget.map(({ source, kind, share }) => `${source} ${(100 * share).toPrecision(2)} % (${kind})`);
-  return `${shares.join(", ")}; covariance ${uKind === "scaled" ? "scaled by the residual variance" : "from the stated uncertainty"}`;
+  if (rows.length === 0) return [];
+  const species = run.rates.find((rate) => rate.species !== null)?.species?.name ?? "";
+  const heads = ["", "v", `dc(${species})/dt`, "slope of the signal"];
+  // The slope of a signal that is the concentration itself says nothing new.
+  return [heads, ...rows].map((row) => row.filter((_, column) => column < 3 || rows.some((one) => one[column] !== "")));
 }

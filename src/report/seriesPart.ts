@@ -1,8 +1,8 @@
 import type { Description, P } from "../contract/findings.js";
 import { type Html, html, nothing } from "./html.js";
 import { type Cell, headedTable, lineCell } from "./htmlTable.js";
-import { printedNumber, printedQuantity } from "./printedText.js";
-import { intervalText } from "./runFollows.js";
+import { printedQuantity } from "./printedText.js";
+import { intervalText, verdictPart } from "./runFollows.js";
 
 /** What runs say together: orders, temperature dependence, replicates. */
 export function seriesPart(series: Description["series"][number]): Html {
@@ -28,7 +28,7 @@ export function seriesPart(series: Description["series"][number]): Html {
         ).map(([words, parameter]) => [words, printedQuantity(parameter), intervalText(parameter)]);
   const replicate =
     replicates === null ? nothing : html`<p>Replicates: <i>k</i> = ${printedQuantity(replicates.k)}.</p>`;
-  return html`<section><h3>Series ${name} ${lineCell(series)}</h3>${headedTable("Orders", ["in", "order", "95 % interval", "k", "from"], orderRows)}${headedTable("Temperature dependence", ["", "value", "95 % interval"], temperatureRows)}${replicate}<p class="verdict">${printedNumber(verdict)}</p></section>`;
+  return html`<section><h3>Series ${name} ${lineCell(series)}</h3>${headedTable("Orders", ["in", "order", "95 % interval", "k", "from"], orderRows)}${headedTable("Temperature dependence", ["", "value", "95 % interval"], temperatureRows)}${replicate}${verdictPart(verdict)}</section>`;
 }
 
 /** What a mechanism of elementary steps says. */
@@ -39,5 +39,5 @@ export function mechanismPart(mechanism: Description["mechanisms"][number]): Htm
     printedQuantity(value),
     intervalText(value),
   ]);
-  return html`<section><h3>Mechanism ${name} ${lineCell(mechanism)}</h3>${headedTable("Parameters", ["", "value", "95 % interval"], rows)}<p class="verdict">${printedNumber(verdict)}</p></section>`;
+  return html`<section><h3>Mechanism ${name} ${lineCell(mechanism)}</h3>${headedTable("Parameters", ["", "value", "95 % interval"], rows)}${verdictPart(verdict)}</section>`;
 }
