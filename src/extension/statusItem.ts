@@ -3,6 +3,9 @@ import { type BaseLanguageClient, State } from "vscode-languageclient";
 import type { StatusChanged } from "../contract/editorProtocol.js";
 import { showLog } from "./commands/showLog.js";
 
+/** Time a description may be behind before the item says so, ms: it would only flicker with every keystroke. */
+const patience = 500;
+
 /** Says beside a description where the server stands with it, in words. */
 export interface StatusItem extends Disposable {
   take(status: StatusChanged): void;
@@ -14,6 +17,7 @@ export function createStatusItem(client: BaseLanguageClient): StatusItem {
   item.name = "Ratewright";
   item.command = showLog;
   const known = new Map<string, StatusChanged>();
+  const behind = new Map<string, ReturnType<typeof setTimeout>>();
 
   const show = (): void => {
     const active = window.activeTextEditor?.document;
@@ -41,10 +45,19 @@ export function createStatusItem(client: BaseLanguageClient): StatusItem {
   show();
   return {
     take(status) {
-      known.set(status.uri, status);
-      show();
+      const { uri, state } = status;
+      if (state === "working" && behind.has(uri)) return;
+      clearTimeout(behind.get(uri));
+      behind.delete(uri);
+      const tell = (): void => {
+        known.set(uri, status);
+        show();
+      };
+      if (state === "working") behind.set(uri, setTimeout(tell, patience));
+      else tell();
     },
     dispose() {
+      for (const timer of behind.values()) clearTimeout(timer);
       for (const part of parts) part.dispose();
     },
   };

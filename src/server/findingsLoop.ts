@@ -14,6 +14,7 @@ export interface FindingsLoop {
   end(): void;
 }
 
+/** Working: from the change on, the pause included. */
 export type LoopStatus =
   | { readonly state: "working" }
   | { readonly state: "up to date"; readonly milliseconds: number }
@@ -52,7 +53,6 @@ export function createFindingsLoop({ documents, workspace, document, delay }: Lo
     if (open === undefined) return;
     const { version } = open;
     const begin = performance.now();
-    tell(uri, { state: "working" });
     try {
       const description = await workspace().describe(document(open), { curves: false, signal });
       if (description === null || signal.aborted || documents.get(uri)?.version !== version) return;
@@ -66,6 +66,7 @@ export function createFindingsLoop({ documents, workspace, document, delay }: Lo
 
   const schedule = (uri: string, pause: number): void => {
     stop(uri);
+    tell(uri, { state: "working" });
     const abort = new AbortController();
     turns.set(uri, { abort, timer: setTimeout(() => void work(uri, abort.signal), pause) });
   };

@@ -17,9 +17,9 @@ export interface ShownDiagnostics {
 
 interface Shown {
   readonly all: readonly Diagnostic[];
-  /** what only data and fits tell, and the text they told it of */
+  /** what only data and fits tell, placed in `text` */
   readonly notes: readonly Diagnostic[];
-  readonly notesText: string;
+  readonly text: string;
 }
 
 export function createShownDiagnostics(): ShownDiagnostics {
@@ -28,15 +28,16 @@ export function createShownDiagnostics(): ShownDiagnostics {
     text(open, bound) {
       const before = shown.get(open.uri);
       const now = open.getText();
-      const notes = before === undefined ? [] : movedNotes(before.notes, before.notesText, now);
+      // Step by step, so that a change here and one there each move what lies behind them.
+      const notes = before === undefined ? [] : movedNotes(before.notes, before.text, now);
       const all = [...diagnosticsOf(bound, []), ...notes].sort(byPlace);
-      shown.set(open.uri, { all, notes: before?.notes ?? [], notesText: before?.notesText ?? now });
+      shown.set(open.uri, { all, notes, text: now });
       return all;
     },
     findings(open, bound, { diagnostics }) {
       const ofText = new Set(diagnosticsOf(bound, []).map(key));
       const notes = diagnostics.filter((diagnostic) => !ofText.has(key(diagnostic)));
-      shown.set(open.uri, { all: diagnostics, notes, notesText: open.getText() });
+      shown.set(open.uri, { all: diagnostics, notes, text: open.getText() });
       return diagnostics;
     },
     current: (uri) => shown.get(uri)?.all ?? [],
