@@ -69,7 +69,11 @@ describe("findings worked out in a worker thread", () => {
   });
 
   it("stop when told to: null at once, and the worker is soon free for the next job", async () => {
-    const long = jobOf(decayCsv(400_000, 0.005), "reading 1");
+    const one = jobOf(decayCsv(100_000, 0.02), "reading 1");
+    const long = {
+      ...one,
+      text: one.text + ["B", "C", "D", "E", "F", "G"].map((run) => `run ${run} like A\n`).join(""),
+    };
     const whole = await timeOf(() => computer.compute(long, never));
     const abort = new AbortController();
     const changed = { ...long, text: long.text.replace("25.0", "26.0") };
