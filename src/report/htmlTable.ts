@@ -13,7 +13,7 @@ export function headedTable(
   const shown = heads.map((_, column) => column === 0 || rows.some((row) => !isEmpty(row[column])));
   const kept = <T>(cells: readonly T[]): T[] => cells.filter((_, column) => shown[column]);
   const head = kept(heads).map((text) => (text === "" ? html`<td></td>` : html`<th scope="col">${text}</th>`));
-  return html`<div class="wide" tabindex="0" role="region" aria-label="${caption}"><table><caption>${caption}</caption><thead><tr>${head}</tr></thead><tbody>${rows.map((row) => tableRow(kept(row)))}</tbody></table></div>`;
+  return html`<div class="wide" tabindex="0" role="group" aria-label="${caption}"><table><caption>${caption}</caption><thead><tr>${head}</tr></thead><tbody>${rows.map((row) => tableRow(kept(row)))}</tbody></table></div>`;
 }
 
 /** Facts one below the other: name, value, and the line of the description it came from. */

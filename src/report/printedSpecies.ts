@@ -22,3 +22,8 @@ export function printedEquation(equation: string): string {
     })
     .join("");
 }
+
+/** A law's words, "order 1 in H2O2", with its species as they are printed. */
+export function printedLaw({ law }: { readonly law: string }): string {
+  return law.split(" ").map(printedSpecies).join(" ");
+}

@@ -66,7 +66,7 @@ export function residualParts(
       (value, i) =>
         `<text x="${px(x - 7)}" y="${px(scale.at(value) + 3.8)}" text-anchor="end" fill="${palette.ink}">${labels[i] ?? ""}</text>`,
     ),
-    `<text x="${px(6)}" y="${px(box.top - 8)}" fill="${palette.ink}">${name}</text>`,
+    `<text x="${px(box.left - 48)}" y="${px(box.top - 8)}" fill="${palette.ink}">${name}</text>`,
     ...sets.flatMap((set, order) => residualMarks(set, order, time, scale, palette)),
   ];
 }

@@ -3,7 +3,7 @@ import { formatNumber } from "../quantity/formatNumber.js";
 import { toSuperscript } from "../quantity/plainText.js";
 import { type Html, html } from "./html.js";
 import { type Cell, headedTable, lineCell } from "./htmlTable.js";
-import { printedSpecies } from "./printedSpecies.js";
+import { printedLaw, printedSpecies } from "./printedSpecies.js";
 import { printedNumber, printedQuantity, printedSentence } from "./printedText.js";
 import { rateName } from "./rateName.js";
 
@@ -69,11 +69,6 @@ function rateLaw({ orders, parameters }: Fit): Html {
     return value === 0 ? html`` : html` <i>c</i>(${printedSpecies(species)})${power}`;
   });
   return html`<p>Rate law: <i>v</i> = <i>k</i>${factors}, for the equation as it is written above.</p>`;
-}
-
-/** A law's words with its species as they are printed. */
-export function printedLaw({ law }: Pick<Fit, "law">): string {
-  return law.split(" ").map(printedSpecies).join(" ");
 }
 
 const symbols: Readonly<Record<string, Html>> = { k: html`<i>k</i>`, start: html`start`, infinity: html`infinity` };

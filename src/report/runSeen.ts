@@ -4,7 +4,7 @@ import { type Cell, factTable, headedTable, lineCell } from "./htmlTable.js";
 import { pagePalette } from "./palette.js";
 import { reportStyle, runPicture } from "./picture.js";
 import { type PictureContent, pictureContent, residualsOf } from "./pictureContent.js";
-import { printedSpecies } from "./printedSpecies.js";
+import { printedLaw, printedSpecies } from "./printedSpecies.js";
 import { printedQuantity } from "./printedText.js";
 import { readingsUsed } from "./readingsUsed.js";
 
@@ -52,16 +52,22 @@ function key(content: PictureContent): string {
   if (readings.some(({ used }) => !used)) words.push("Hollow: outside the window, used by no fit.");
   for (const [order, { number, fit }] of fits.entries()) {
     const dash = dashWords[order % dashWords.length] ?? "";
-    words.push(`${dash[0]?.toUpperCase()}${dash.slice(1)} curve: fit ${number}, ${fit.law}.`);
+    words.push(`${dash[0]?.toUpperCase()}${dash.slice(1)} curve: fit ${number}, ${printedLaw(fit)}.`);
   }
   if (fits.length > 0) words.push(`Shaded: ${fits.length === 1 ? "its 95 % band" : "their 95 % bands"}.`);
   const numbers = (average: boolean) =>
     rates.filter(({ rate }) => (rate.kind === "average") === average).map(({ number }) => number);
   const [chords, tangents] = [numbers(true), numbers(false)];
-  if (chords.length > 0) words.push(`Dashed between bars: the chord of rate ${chords.join(", ")}.`);
-  if (tangents.length > 0) words.push(`Through a diamond: the tangent of rate ${tangents.join(", ")}.`);
+  if (chords.length > 0) words.push(`Dashed between bars: ${ofRates("chord", chords)}.`);
+  if (tangents.length > 0) words.push(`Through a diamond: ${ofRates("tangent", tangents)}.`);
   if (fits.some(({ fit }) => residualsOf(follow, fit).length > 0)) words.push("Below: reading minus curve.");
   return words.join(" ");
+}
+
+/** "the tangent of rate 2", "the tangents of rates 2, 3". */
+function ofRates(line: string, numbers: readonly number[]): string {
+  const s = numbers.length > 1 ? "s" : "";
+  return `the ${line}${s} of rate${s} ${numbers.join(", ")}`;
 }
 
 function suitability({ suitability }: Run): Html {

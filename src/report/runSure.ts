@@ -4,8 +4,8 @@ import { causeName } from "./causeName.js";
 import { type Html, html, nothing } from "./html.js";
 import { type Cell, factTable } from "./htmlTable.js";
 import { percentText } from "./percentText.js";
+import { printedLaw } from "./printedSpecies.js";
 import { printedQuantity } from "./printedText.js";
-import { printedLaw } from "./runFollows.js";
 
 type Fit = Run["fits"][number];
 
@@ -30,8 +30,11 @@ function fitSure(fit: Fit, number: number, several: boolean): Html {
     u === null ? "" : printedQuantity({ text: formatQuantity(Number(u.toPrecision(2)), null, k.unit), unit: k.unit });
   const u = html`<i>u</i>(<i>k</i>)`;
   if (k.u !== null) rows.push([u, `${own(k.u)}, ${uncertaintyWords(fit)}`]);
-  if (k.uCommon !== null && k.uCommon > 0)
-    rows.push([html`${u} by cause`, `random ${own(k.uRandom)}, common ${own(k.uCommon)}`]);
+  if (k.u !== null && k.uCommon !== null && k.uCommon > 0) {
+    // What cancels leaves a remainder of rounding, which is no finding.
+    const common = k.uCommon > 1e-3 * k.u ? `common ${own(k.uCommon)}` : "common: under a thousandth of it";
+    rows.push([html`${u} by kind`, `random ${own(k.uRandom)}, ${common}`]);
+  }
   if (k.uCorrelated !== null) rows.push([html`${u}, errors correlated`, own(k.uCorrelated)]);
   if (fit.conversion !== null) rows.push(["followed to a conversion of", percentText(fit.conversion)]);
   if (fit.residual !== null) rows.push(["residual standard deviation", printedQuantity(fit.residual)]);

@@ -15,7 +15,7 @@ export function runText(run: Run): string[] {
     ...run.fits.flatMap(fitText),
     ...block(
       "cautions",
-      run.cautions.flatMap(({ text }) => wrappedText(text, "  - ")),
+      run.cautions.flatMap(({ text }) => wrappedText(text, "    - ")),
     ),
   ];
 }

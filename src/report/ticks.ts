@@ -8,8 +8,6 @@ export interface Ticks {
   readonly power: number;
 }
 
-const steps = [1, 2, 5, 10];
-
 /**
  * Round numbers (1, 2 or 5 times a power of ten apart) within `low` to `high`, about `wanted` of them. A power of ten
  * goes to the unit where the greatest number is below 1e-2 or from 1e5 on.
@@ -19,13 +17,16 @@ export function niceTicks(low: number, high: number, wanted: number): Ticks {
   if (!(span > 0) || !Number.isFinite(span)) return { values: [], labels: [], power: 0 };
   const rough = span / Math.max(1, wanted);
   const exponent = exponentOf(rough);
-  const scale = tenTo(exponent);
-  const factor = steps.find((candidate) => candidate * scale >= rough * 0.999) ?? 10;
+  const leading = scaled(rough, -exponent);
+  // The nearest of 1, 2, 5 and 10 as ratios go: the borders lie near the geometric means.
+  const factor = leading < 1.5 ? 1 : leading < 3.2 ? 2 : leading < 7.1 ? 5 : 10;
   const [stepDigit, stepExponent] = factor === 10 ? [1, exponent + 1] : [factor, exponent];
   // Whole multiples of the step are divided, not multiplied, where the step is a fraction: 3 / 10 is 0.3, 3 * 0.1 not.
   const at = (count: number): number => scaled(count * stepDigit, stepExponent);
   const first = Math.ceil(low / at(1) - 1e-9);
   const last = Math.floor(high / at(1) + 1e-9);
+  // One number alone makes no scale.
+  if (last - first < 1 && wanted < 64) return niceTicks(low, high, 2 * wanted);
   const counts = Array.from({ length: Math.max(0, last - first + 1) }, (_, index) => first + index);
   const greatest = Math.max(Math.abs(low), Math.abs(high));
   const size = exponentOf(greatest);

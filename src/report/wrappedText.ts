@@ -1,7 +1,7 @@
 /** Greatest length of a line of running text, characters. */
-const width = 100;
+const width = 110;
 
-/** A text in lines of at most 100 characters, broken between words; the first begins with `lead`, the others below its end. */
+/** A text in lines of at most 110 characters, broken between words; the first begins with `lead`, the others below its end. */
 export function wrappedText(text: string, lead: string): string[] {
   const lines: string[] = [];
   let line = lead;

@@ -1,0 +1,38 @@
+import assert from "node:assert/strict";
+import { decimate } from "../../src/report/decimate.js";
+
+describe("readings drawn", () => {
+  it("are all where there are few, those without a number left out", () => {
+    assert.deepEqual(decimate([0, 1, null, 3, 4], [5, null, 5, 5, 5], 600), [0, 3, 4]);
+    assert.deepEqual(decimate([], [], 600), []);
+  });
+
+  it("are at most as many as asked for, ascending, ends and extremes among them", () => {
+    const time = Array.from({ length: 100_000 }, (_, i) => i / 7);
+    const value = time.map((t) => Math.sin(t / 500));
+    value[31_234] = 9;
+    value[77_777] = -9;
+    const drawn = decimate(time, value, 600);
+    assert.ok(drawn.length <= 600 && drawn.length > 500, String(drawn.length));
+    assert.ok(drawn.every((index, i) => i === 0 || index > (drawn[i - 1] ?? index)));
+    for (const index of [31_234, 77_777]) assert.ok(drawn.includes(index), `${index} is drawn`);
+    // Each stretch of time keeps its lowest and highest reading, so the outline stays.
+    const bins = 300;
+    const last = time[time.length - 1] ?? 1;
+    for (let bin = 0; bin < bins; bin++) {
+      const inside = (index: number): boolean =>
+        Math.min(bins - 1, Math.floor(((time[index] ?? 0) / last) * bins)) === bin;
+      const of = (indices: number[]): number[] => indices.filter(inside).map((index) => value[index] ?? 0);
+      const all = of(
+        [...time.keys()].slice(Math.floor((bin * 1e5) / bins) - 5, Math.ceil(((bin + 1) * 1e5) / bins) + 5),
+      );
+      if (all.length === 0) continue;
+      const kept = of([...drawn]);
+      assert.deepEqual([Math.min(...kept), Math.max(...kept)], [Math.min(...all), Math.max(...all)]);
+    }
+  });
+
+  it("at one single time are its lowest and its highest", () => {
+    assert.deepEqual(decimate(new Array(10).fill(2), [3, 9, 4, 1, 5, 5, 5, 5, 5, 5], 4), [1, 3]);
+  });
+});
