@@ -1,6 +1,6 @@
 /**
- * Which of many readings a picture draws: all where there are at most `most`, else the lowest and the highest of each
- * of most/2 equal stretches of time, so that the outline the eye sees stays. Indices, ascending. Readings without a
+ * Which of many readings a picture draws: all where there are at most `most`, else the first, the last,
+ * and the lowest and the highest of each of (most - 2)/2 equal stretches of time, so that the outline the eye sees stays. Indices, ascending. Readings without a
  * time or a value are left out. `time` ascending.
  */
 export function decimate(
@@ -15,7 +15,7 @@ export function decimate(
   if (drawn.length <= most) return drawn;
   const start = time[drawn[0] as number] as number;
   const span = (time[drawn[drawn.length - 1] as number] as number) - start;
-  const bins = Math.max(1, Math.floor(most / 2));
+  const bins = Math.max(1, Math.floor((most - 2) / 2));
   const binOf = (index: number): number =>
     span > 0 ? Math.min(bins - 1, Math.floor((((time[index] as number) - start) / span) * bins)) : 0;
   const kept: number[] = [];
@@ -32,5 +32,5 @@ export function decimate(
     kept.push(Math.min(lowest, highest));
     if (lowest !== highest) kept.push(Math.max(lowest, highest));
   }
-  return kept;
+  return [...new Set([drawn[0] as number, ...kept, drawn[drawn.length - 1] as number])];
 }

@@ -67,8 +67,10 @@ export function runPicture(run: Run, follow: Run["follow"][number], style: Pictu
       palette.ink,
       axisMarkup({ ...signalName(follow, content.signalUnit), power: across.power }),
     ),
+    // A ribbon of readings would hide the curve, single readings would be hidden by it.
+    ...(content.thinned ? readingParts(content, time, signal, palette) : []),
     ...curveParts(content, time, signal, box, palette),
-    ...readingParts(content, time, signal, palette),
+    ...(content.thinned ? [] : readingParts(content, time, signal, palette)),
     ...markParts(content, time, signal, box, palette),
     ...(strip === 0 ? [] : residualParts(content, time, { ...box, top: floor - strip, bottom: floor }, palette)),
     timeAxis(time, along, floor, palette),

@@ -15,6 +15,8 @@ export interface PictureContent {
   readonly signalUnit: string;
   /** the readings drawn; `used` tells whether any fit rests on them */
   readonly readings: readonly { readonly time: number; readonly signal: number; readonly used: boolean }[];
+  /** whether `readings` are only the lowest and highest of many, drawn as a ribbon */
+  readonly thinned: boolean;
   /** fits with a curve, in the order of the text; `number` counts all fits of the run, from 1 */
   readonly fits: readonly { readonly fit: Fit; readonly number: number; readonly curve: NonNullable<Fit["curve"]> }[];
   /** rates with a chord or tangent, in the order of the text; `number` counts all rates of the run, from 1 */
@@ -28,7 +30,8 @@ export function pictureContent(run: Run, follow: Follow): PictureContent | null 
   const windows = run.fits.filter((fit) => fit.follow === follow.id && fit.window !== null).map(({ window }) => window);
   const inAWindow = (t: number): boolean =>
     windows.length === 0 || windows.some((window) => window !== null && within(window, t));
-  const readings = decimate(time.values, signal.values, most).map((index) => {
+  const indices = decimate(time.values, signal.values, most);
+  const readings = indices.map((index) => {
     const t = time.values[index] as number;
     return { time: t, signal: signal.values[index] as number, used: inAWindow(t) };
   });
@@ -38,6 +41,7 @@ export function pictureContent(run: Run, follow: Follow): PictureContent | null 
     timeUnit: time.unit,
     signalUnit: signal.unit,
     readings,
+    thinned: indices.length < numbersIn(time.values, signal.values),
     fits: run.fits.flatMap((fit, index) =>
       fit.curve === undefined || fit.follow !== follow.id ? [] : [{ fit, number: index + 1, curve: fit.curve }],
     ),
@@ -62,6 +66,11 @@ export function residualsOf(follow: Follow, fit: Fit): { time: number; residual:
     time: times[index] as number,
     residual: residuals.values[index] as number,
   }));
+}
+
+/** How many readings have both a time and a value. */
+function numbersIn(time: readonly (number | null)[], value: readonly (number | null)[]): number {
+  return time.filter((t, index) => t !== null && typeof value[index] === "number").length;
 }
 
 function within([from, to]: NonNullable<Fit["window"]>, t: number): boolean {

@@ -11,7 +11,7 @@ export function pictureTitle(run: Run, { follow, signalUnit, timeUnit }: Picture
 }
 
 /** The picture in words, for those who do not see it. */
-export function pictureWords({ follow, signalUnit, timeUnit, readings, fits, rates }: PictureContent): string {
+export function pictureWords({ follow, signalUnit, timeUnit, readings, thinned, fits, rates }: PictureContent): string {
   const first = readings[0];
   const last = readings[readings.length - 1];
   const sentences: string[] = [];
@@ -24,7 +24,7 @@ export function pictureWords({ follow, signalUnit, timeUnit, readings, fits, rat
     sentences.push(`${count} of column ${follow.column}, ${span}, between ${from} and ${to}.`);
   }
   const outside = readings.filter(({ used }) => !used).length;
-  if (outside > 0) sentences.push("Readings outside the window of the fit are hollow.");
+  if (outside > 0) sentences.push(`Readings outside the window of the fit are ${thinned ? "paler" : "hollow"}.`);
   for (const { fit, number } of fits) {
     const k = fit.parameters["k"];
     sentences.push(

@@ -2,7 +2,7 @@ import { axisMarkup } from "./axisText.js";
 import { curveLook } from "./curveParts.js";
 import type { Palette } from "./palette.js";
 import { type PictureContent, residualsOf } from "./pictureContent.js";
-import { type Box, extentOf, linearScale, px, type Scale } from "./plotFrame.js";
+import { type Box, extentOf, linearScale, type Point, px, type Scale } from "./plotFrame.js";
 import { niceTicks } from "./ticks.js";
 
 /** Diameter of a reading, px: smaller where there are many. */
@@ -12,16 +12,33 @@ function size(count: number): number {
 
 /** The readings as dots; hollow where no fit rests on them. */
 export function readingParts(
-  { readings }: PictureContent,
+  { readings, thinned }: PictureContent,
   time: Scale,
   signal: Scale,
   { ink, ground }: Palette,
 ): string[] {
   const places = (used: boolean): [number, number][] =>
     readings.filter((reading) => reading.used === used).map((r) => [time.at(r.time), signal.at(r.signal)]);
+  if (thinned) return [...ribbon(places(true), ink, 0.45), ...ribbon(places(false), ink, 0.2)];
   return [
     ...dots(places(true), ink, size(readings.length)),
     ...rings(places(false), ink, ground, size(readings.length)),
+  ];
+}
+
+/** Widest gap between neighbours of a ribbon, px. */
+const gap = 8;
+
+/** Many readings, each stretch of time from its lowest to its highest; where none were made for a while it is broken. */
+function ribbon(places: readonly Point[], colour: string, opacity: number): string[] {
+  if (places.length === 0) return [];
+  const path = places.map(([x, y], index) => {
+    const before = places[index - 1];
+    const joined = before !== undefined && x - before[0] <= gap;
+    return `${joined ? "L" : "M"}${px(x)} ${px(y)}${joined ? "" : "h0"}`;
+  });
+  return [
+    `<path d="${path.join("")}" fill="none" stroke="${colour}" stroke-opacity="${opacity}" stroke-width="2" stroke-linejoin="round" stroke-linecap="round"/>`,
   ];
 }
 
@@ -81,6 +98,7 @@ function residualMarks(
   const { colour } = curveLook(order, palette);
   const places = set.map(({ time: t, residual }): [number, number] => [time.at(t), scale.at(residual)]);
   const zero = px(scale.at(0));
+  if (set.length > 300) return ribbon(places, colour, 0.55);
   const stems = set.length > 120 ? "" : places.map(([x, y]) => `M${px(x)} ${zero}V${px(y)}`).join("");
   return [
     stems === "" ? "" : `<path d="${stems}" fill="none" stroke="${colour}" stroke-opacity="0.55"/>`,

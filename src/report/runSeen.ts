@@ -47,9 +47,11 @@ const dashWords = ["unbroken", "broken", "dotted", "dash-dotted"];
 
 /** What the signs of the picture stand for, told by their shape. */
 function key(content: PictureContent): string {
-  const { readings, fits, rates, follow } = content;
-  const words = ["Dots: readings."];
-  if (readings.some(({ used }) => !used)) words.push("Hollow: outside the window, used by no fit.");
+  const { readings, thinned, fits, rates, follow } = content;
+  const words = [thinned ? "Ribbon: the readings, from lowest to highest at each time." : "Dots: readings."];
+  if (readings.some(({ used }) => !used)) {
+    words.push(`${thinned ? "Paler" : "Hollow"}: outside the window, used by no fit.`);
+  }
   for (const [order, { number, fit }] of fits.entries()) {
     const dash = dashWords[order % dashWords.length] ?? "";
     words.push(`${dash[0]?.toUpperCase()}${dash.slice(1)} curve: fit ${number}, ${printedLaw(fit)}.`);

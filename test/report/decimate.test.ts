@@ -15,9 +15,9 @@ describe("readings drawn", () => {
     const drawn = decimate(time, value, 600);
     assert.ok(drawn.length <= 600 && drawn.length > 500, String(drawn.length));
     assert.ok(drawn.every((index, i) => i === 0 || index > (drawn[i - 1] ?? index)));
-    for (const index of [31_234, 77_777]) assert.ok(drawn.includes(index), `${index} is drawn`);
+    for (const index of [0, 31_234, 77_777, 99_999]) assert.ok(drawn.includes(index), `${index} is drawn`);
     // Each stretch of time keeps its lowest and highest reading, so the outline stays.
-    const bins = 300;
+    const bins = 299;
     const last = time[time.length - 1] ?? 1;
     for (let bin = 0; bin < bins; bin++) {
       const inside = (index: number): boolean =>
@@ -32,7 +32,7 @@ describe("readings drawn", () => {
     }
   });
 
-  it("at one single time are its lowest and its highest", () => {
-    assert.deepEqual(decimate(new Array(10).fill(2), [3, 9, 4, 1, 5, 5, 5, 5, 5, 5], 4), [1, 3]);
+  it("at one single time are its first, lowest, highest and last", () => {
+    assert.deepEqual(decimate(new Array(10).fill(2), [3, 9, 4, 1, 5, 5, 5, 5, 5, 5], 4), [0, 1, 3, 9]);
   });
 });

@@ -63,9 +63,28 @@ describe("picture of a run", () => {
 
   it("stays small however many readings there are", () => {
     const svg = pictureOf(inventedRun(50_000));
-    assert.ok((svg.match(/h0(?=M|")/g)?.length ?? 0) <= 600);
+    const ribbon = /<path d="M([^"]*)" fill="none" stroke="[^"]*" stroke-opacity="0.45"/.exec(svg)?.[1] ?? "";
+    const corners = ribbon.split("L").length;
+    assert.ok(corners > 500 && corners <= 600, String(corners));
+    assert.equal(ribbon.split("M").length, 1, "unbroken where readings follow each other");
     // The editor cuts hover text at 100 000 signs (its own limit, from memory); base64 makes three signs four.
     assert.ok(svg.length < 70_000, String(svg.length));
+  });
+
+  it("breaks the ribbon of many readings where none were made", () => {
+    const run = inventedRun(5_000);
+    const follow = run.follow.map((one) => ({
+      ...one,
+      signal: {
+        unit: "V",
+        values: (one.signal?.values ?? []).map((value, i) => (i > 2000 && i < 3000 ? null : value)),
+      },
+    }));
+    const svg = pictureOf({ ...run, follow });
+    assert.equal(
+      /<path d="M([^"]*)" fill="none" stroke="[^"]*" stroke-opacity="0.45"/.exec(svg)?.[1]?.split("M").length,
+      2,
+    );
   });
 
   it("draws readings that no fit uses hollow", () => {
