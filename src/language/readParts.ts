@@ -235,7 +235,8 @@ function mendsOf(cursor: Cursor, wanted: readonly Part[], token: Token): Mend[] 
     return [replacement(span, `"${cursor.text.slice(span.start, span.end)}"`)];
   }
   const alone = token === cursor.tokens[cursor.tokens.length - 1];
-  if (only === "name" && token.kind === "string" && alone && isName(token.text)) return [replacement(token, token.text)];
+  if (only === "name" && token.kind === "string" && alone && isName(token.text))
+    return [replacement(token, token.text)];
   return [];
 }
 

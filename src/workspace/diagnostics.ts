@@ -1,7 +1,7 @@
 import type { Note } from "../analysis/notes.js";
-import { mendTitle, messageOf } from "../contract/words.js";
 import type { Diagnostic, Run } from "../contract/findings.js";
 import type { Problem, Span } from "../contract/problem.js";
+import { mendTitle, messageOf } from "../contract/words.js";
 import type { Bound } from "../language/bind/bind.js";
 import { placeOf } from "../language/lineIndex.js";
 

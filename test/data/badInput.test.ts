@@ -1,7 +1,7 @@
 import assert from "node:assert/strict";
 import fc from "fast-check";
-import { messageOf } from "../../src/contract/words.js";
 import type { Problem } from "../../src/contract/problem.js";
+import { messageOf } from "../../src/contract/words.js";
 import { cellProblems, rowProblems, timeProblems } from "../../src/data/columnProblems.js";
 import type { DataOptions } from "../../src/data/dataOptions.js";
 import { readColumns } from "../../src/data/readColumns.js";

@@ -1,8 +1,8 @@
 import assert from "node:assert/strict";
-import { messageOf } from "../../src/contract/words.js";
 import { dataMessages } from "../../src/contract/messages/data.js";
 import type { Problem } from "../../src/contract/problem.js";
 import type { ReadOutcome } from "../../src/contract/reader.js";
+import { messageOf } from "../../src/contract/words.js";
 import { outcomeProblem } from "../../src/data/outcomeProblem.js";
 import { resolutionProblem } from "../../src/data/resolutionProblem.js";
 import { resolveUri } from "../../src/data/resolve.js";

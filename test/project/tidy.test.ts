@@ -2,6 +2,7 @@ import assert from "node:assert/strict";
 import { execFileSync } from "node:child_process";
 import { readFileSync } from "node:fs";
 import { sampleData } from "../../src/build/sampleData.js";
+import { version } from "../../src/contract/version.js";
 
 const tracked = execFileSync("git", ["ls-files", "-z"], { encoding: "utf8" })
   .split("\0")
@@ -45,6 +46,11 @@ describe("what is kept in the project", () => {
       [...top].filter((name) => !allowed.includes(name)),
       [],
     );
+  });
+
+  it("the version of the program is that of the package", () => {
+    const packageFile = JSON.parse(readFileSync("package.json", "utf8")) as { version: string };
+    assert.equal(version, packageFile.version);
   });
 
   it("the data files of the samples are what their script makes, and say that they are invented", () => {

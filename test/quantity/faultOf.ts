@@ -1,6 +1,6 @@
 import assert from "node:assert/strict";
-import { messageOf } from "../../src/contract/words.js";
 import type { Fault } from "../../src/contract/problem.js";
+import { messageOf } from "../../src/contract/words.js";
 import { isFault } from "../../src/quantity/shifted.js";
 
 /** The fault that an answer must be. */

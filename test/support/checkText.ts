@@ -1,5 +1,5 @@
-import { messageOf } from "../../src/contract/words.js";
 import type { Problem } from "../../src/contract/problem.js";
+import { messageOf } from "../../src/contract/words.js";
 import { type Bound, bind } from "../../src/language/bind/bind.js";
 import { parse } from "../../src/language/parse.js";
 

@@ -75,7 +75,10 @@ function bindFollow(
     binding.uses.push({ kind: "column", name: column, run, declares: false, origin });
     if (dataLine !== undefined && !declaredIn(dataLine, column)) {
       const names = [...new Set((data?.columns ?? []).map((candidate) => candidate.name))];
-      const known = names.length === 0 ? ". Declare it below the data line" : `; there ${names.length === 1 ? "is" : "are"} ${names.join(", ")}`;
+      const known =
+        names.length === 0
+          ? ". Declare it below the data line"
+          : `; there ${names.length === 1 ? "is" : "are"} ${names.join(", ")}`;
       const mend = nearest(column, names).map((near) => replacement(origin, near));
       report(binding, problem("name-unknown", { what: "column", name: column, known }, origin, mend));
     }
