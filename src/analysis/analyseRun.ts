@@ -99,6 +99,7 @@ function followFinding(
     species: follow.species.key,
     monitor: follow.monitor,
     column: follow.column,
+    timeColumn: read?.timeColumn ?? null,
     points: read?.points ?? 0,
     used: context === null ? 0 : context.signal.time.length,
     sources: context === null ? [] : sourcesOf(context),

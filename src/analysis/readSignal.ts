@@ -16,6 +16,7 @@ import { type Notes, note } from "./notes.js";
 export interface ReadSignal {
   readonly signal: Signal;
   readonly points: number;
+  readonly timeColumn: string;
 }
 
 /**
@@ -45,7 +46,7 @@ export function readSignal(run: Run, follow: Follow, file: Columns, notes: Notes
     unit: readings.unit,
     rows,
   };
-  return { signal, points: file.rows };
+  return { signal, points: file.rows, timeColumn: time.fact.name };
 }
 
 /** The column whose unit is a time; of several the first, with an information. */

@@ -68,6 +68,8 @@ export interface Run extends Item {
     species: string;
     monitor: string;
     column: string;
+    /** name of the column that is the time; null where there is none */
+    timeColumn: string | null;
     points: number;
     used: number;
     sources: { name: string; kind: "common" | "random"; u: Q }[]; // what the uncertainty is made of

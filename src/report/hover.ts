@@ -65,7 +65,9 @@ function rateWords(rate: Run["rates"][number], number: number): string {
 
 /** A column that is not followed itself: what stands beside it, and over which span of time. */
 function besideText(run: Run, column: string): string {
-  const head = `**${escapeMarkdown(column)}** · ${escapeMarkdown(`not followed itself, run ${run.name}`)}`;
+  const isTime = run.follow.some(({ timeColumn }) => timeColumn === column);
+  const what = isTime ? "time" : "not followed itself";
+  const head = `**${escapeMarkdown(column)}** · ${escapeMarkdown(`${what}, run ${run.name}`)}`;
   const beside = run.follow.map((follow) => {
     const times = (follow.time?.values ?? []).filter((time) => time !== null);
     const [first, last] = [times[0], times[times.length - 1]];

@@ -47,7 +47,7 @@ describe("hover of a column", () => {
 
   it("of a column that nothing follows tells the span of the readings beside it", () => {
     const text = columnHover(inventedRun(), "t", "light");
-    assert.equal(text, "**t** · not followed itself, run A\n\nReadings of c: all 21 used, time from 0 s to 100 s");
+    assert.equal(text, "**t** · time, run A\n\nReadings of c: all 21 used, time from 0 s to 100 s");
   });
 
   it("leaves out what belongs to another run, and what is only to know", () => {
