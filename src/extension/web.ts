@@ -1,6 +1,12 @@
 // The extension in a web worker: dist/extension.web.js.
 import { type ExtensionContext, Uri, workspace } from "vscode";
-import { type BaseLanguageClient, LanguageClient } from "vscode-languageclient/browser";
+import {
+  type BaseLanguageClient,
+  BrowserMessageReader,
+  BrowserMessageWriter,
+  LanguageClient,
+  type MessageTransports,
+} from "vscode-languageclient/browser";
 import { activateWith } from "./activate.js";
 
 let client: BaseLanguageClient | undefined;
@@ -16,10 +22,12 @@ export async function activate(context: ExtensionContext): Promise<void> {
  * A worker may only run a script of its own origin, and the extension's files have another: the script is read through
  * the editor and run from memory. Its address stays valid, since the server starts a worker of its own from it.
  */
-async function startWorker(script: Uri): Promise<Worker> {
+async function startWorker(script: Uri): Promise<MessageTransports> {
   const text = await workspace.fs.readFile(script);
   const source = new Blob([new Uint8Array(text)], { type: "text/javascript" });
-  return new Worker(URL.createObjectURL(source), { name: "ratewright language server" });
+  const worker = new Worker(URL.createObjectURL(source), { name: "ratewright language server" });
+  // The ends of the wire are made here: the client knows a worker by its class, and the editor has one of its own.
+  return { reader: new BrowserMessageReader(worker), writer: new BrowserMessageWriter(worker) };
 }
 
 export async function deactivate(): Promise<void> {

@@ -76,14 +76,15 @@ describe("a person with the samples", () => {
         await openFile(session, "peroxide.raterun");
         await untilUpToDate(session);
         await closePanel(session);
-        const hover = await hoverAt(session, "random   0.0004", 1).catch(() => null);
-        assert.equal(hover?.pictures.length ?? 0, 0, "the line below the column is not the column");
         const shown = await hoverAt(session, "c(H2O2) / mol L^-1", 1);
-        assert.match(shown.text, /k = \d+\.\d+\(\d+\)(?: ?× ?10| ?e|E)?.*s/);
-        assert.equal(shown.pictures.length, 1);
-        assert.match(shown.pictures[0] ?? "", /^data:image\/svg\+xml/);
-        const size = await shown.element.locator("img").evaluate((image) => (image as HTMLImageElement).naturalWidth);
-        assert.ok(size > 100, "the picture is drawn");
+        // The line holds for run A and, by “like A”, for run B: each has its picture and its k.
+        assert.equal(shown.text.match(/k = \d/g)?.length, 2, shown.text);
+        assert.equal(shown.pictures.length, 2);
+        assert.ok(shown.pictures.every((source) => source.startsWith("data:image/svg+xml")));
+        const image = shown.element.locator("img").first();
+        await until("the picture is drawn", () =>
+          image.evaluate((one) => (one as HTMLImageElement).naturalWidth > 100),
+        );
         await takePicture(session, `hover.${kind}`);
         await leaveHover(session);
       });
@@ -109,7 +110,7 @@ describe("a person with the samples", () => {
       await untilProblem(session, "Oxygen does not balance", true);
       const { page } = session;
       await page.keyboard.press("F1");
-      await page.locator(".quick-input-widget input").fill(">Ratewright: Restart Language Server");
+      await page.locator(".quick-input-widget .quick-input-box input").fill(">Ratewright: Restart Language Server");
       await page.locator(".quick-input-list .monaco-list-row").first().waitFor();
       await page.keyboard.press("Enter");
       await untilUpToDate(session);

@@ -8,6 +8,9 @@ import { shownProblems, squiggles } from "./problems.js";
 import { type } from "./typing.js";
 import { withSession } from "./withSession.js";
 
+/** High enough for the whole sample above the panel of problems, px. */
+const size = { width: 1280, height: 1000 };
+
 describe("a line nobody knows, typed at the end of a sample", () => {
   const cases = [
     { where: "in Node", name: "node", options: {} },
@@ -16,7 +19,7 @@ describe("a line nobody knows, typed at the end of a sample", () => {
   ] as const;
   for (const { where, name, options } of cases) {
     it(`becomes an error on that line, the extension running ${where}`, async () => {
-      await withSession(`unknown-line.${name}`, options, async (session) => {
+      await withSession(`unknown-line.${name}`, { ...options, size }, async (session) => {
         const sample = readdirSync(session.workspace)
           .sort()
           .find((file) => file.endsWith(".raterun"));
