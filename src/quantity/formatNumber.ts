@@ -68,7 +68,7 @@ function roundedAt(value: number, place: number): string {
 }
 
 /** `digits` with the last `decimals` of them after the point. */
-function pointed(digits: string, decimals: number): string {
+export function pointed(digits: string, decimals: number): string {
   if (decimals <= 0) return digits;
   const padded = digits.padStart(decimals + 1, "0");
   return `${padded.slice(0, -decimals)}.${padded.slice(-decimals)}`;

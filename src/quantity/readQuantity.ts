@@ -1,6 +1,7 @@
 import { type Fault, fault, replacement, type Span } from "../contract/problem.js";
 import { readClockTime } from "./clockTime.js";
 import { intervalToSI, toSI } from "./conversion.js";
+import { formatNumber } from "./formatNumber.js";
 import { plainText } from "./plainText.js";
 import type { Quantity, Source } from "./quantity.js";
 import { readNumber } from "./readNumber.js";
@@ -70,7 +71,9 @@ function withUnit(text: string, head: Head, from: number, sourceName: string): R
   const plusMinus = /^ *(±|\+ ?\/ ?-|\+-(?=[ .\d]))/.exec(text.slice(from));
   let begin = from;
   const us = [...head.us];
-  if (plusMinus !== null && !/^ *\S+ *%/.test(text.slice(from + plusMinus[0].length))) {
+  if (plusMinus !== null) {
+    const share = shareFault(text, head, from + plusMinus[0].length, plusMinus[1] ?? "");
+    if (share !== null) return share;
     const stated = uncertainty(text, from + plusMinus[0].length, plusMinus[1] ?? "");
     if (isFault(stated)) return stated;
     if (us.length > 0) return fault("uncertainty-twice", {}, { start: head.span.start, end: stated.end });
@@ -97,6 +100,22 @@ function withUnit(text: string, head: Head, from: number, sourceName: string): R
   const sources: Source[] = all.map((u) => ({ name: sourceName, kind: "common", u }));
   const basis = (by?.[1] ?? null) as ReadQuantity["basis"];
   return { quantity: { value, unit: read.unit, sources }, number: head.span, unit, basis };
+}
+
+/** `98 ± 2 %` may mean (98 ± 2) % or 98 with 2 % of it: both are offered. Null where the text says which. */
+function shareFault(text: string, { value, us, span }: Head, from: number, word: string): Fault | null {
+  const found = /^ *(\d+(?:\.\d+)?|\.\d+) *%(?= *$| *within)/.exec(text.slice(from));
+  if (found === null || us.length > 0) return null;
+  const [all, size = ""] = found;
+  const number = text.slice(span.start, span.end);
+  const inner = number.replace(/^\((.*)\)$/, "$1");
+  const share = formatNumber(Math.abs(value) * (Number(size) / 100), null);
+  const whole = { start: span.start, end: from + all.length };
+  const readings = [`(${inner} ${word} ${size}) %`, `${inner} ${word} ${share}`];
+  const [first = "", second = ""] = readings;
+  const written = text.slice(whole.start, whole.end);
+  const mends = readings.map((reading) => replacement(whole, reading));
+  return fault("uncertainty-of-what", { text: written, first, second }, whole, mends);
 }
 
 /** An uncertainty after the unit, SI. */

@@ -34,7 +34,7 @@ type Factors = { readonly parts: UnitPart[] } | Fault;
 
 const longest = 200;
 const symbolAt =
-  /[°º˚] ?[CF](?![A-Za-z])|℃|℉|deg ?[CF](?![A-Za-z])|mm ?Hg(?![A-Za-z])|[mc]mH2O|cal_15|[%‰°º˚]|[A-Za-zΩ\u2126Å\u212b]+(?:_[A-Za-z]+)?/y;
+  /[°º˚] ?[CF](?![A-Za-z])|℃|℉|deg ?[CF](?![A-Za-z])|mm ?Hg(?![A-Za-z])|[mc]mH2O|[km]?cal_15|[%‰°º˚]|[A-Za-zΩ\u2126Å\u212b]+(?:_[A-Za-z]+)?/y;
 const exponentAt = /\^ ?\( ?([-+]?\d+(?:\.\d+|\/\d+)?) ?\)|\^ ?([-+]?\d+(?:\.\d+)?)|([⁺⁻]?[⁰¹²³⁴-⁹]+)|([-+]?\d+)/y;
 const productAt = / *[·*] *|\.(?=[A-Za-z°Ω(])| +/y;
 

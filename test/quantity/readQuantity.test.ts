@@ -19,6 +19,9 @@ describe("readQuantity", () => {
     ["0.100 mol/L ± 2 %", 100, 2, "mol L^-1"],
     ["0.100 mol/L +/- 2%", 100, 2, "mol L^-1"],
     ["98.0 % ± 0.5 %", 0.98, 0.005, "%"],
+    ["(98.0 ± 0.5) %", 0.98, 0.005, "%"],
+    ["500 ± 5 ppm", 5e-4, 5e-6, "ppm"],
+    ["4.2 within 5 %", 4.2, 0.21 / Math.sqrt(3), ""],
     ["-98.2(5) kJ/mol", -98200, 500, "kJ mol^-1"],
     ["-98.2 kJ/mol ± 1 %", -98200, 982, "kJ mol^-1"],
     ["1.0(1)e-3 s^-1", 1e-3, 1e-4, "s^-1"],
@@ -66,6 +69,18 @@ describe("readQuantity", () => {
   });
 
   it("says what a per cent is a share of", () => {
+    const share = valid(readQuantity("30 ± 1 % by mass"));
+    assert.equal(share.basis, "mass");
+    assert.equal(share.quantity.value, 0.3);
+    assert.equal(combined(share.quantity.sources), 0.01);
+    assert.deepEqual(share.unit, { start: 7, end: 8 });
+    const later = valid(readQuantity("30 % by mass ± 1 %"));
+    assert.equal(later.basis, "mass");
+    assert.equal(combined(later.quantity.sources), 0.01);
+    const ppm = valid(readQuantity("500 ppm by volume ± 2 %"));
+    assert.equal(ppm.basis, "volume");
+    assert.equal(combined(ppm.quantity.sources), 1e-5);
+    assert.equal(valid(readQuantity("30 percent by mass".replace("percent", "‰"))).basis, "mass");
     assert.equal(valid(readQuantity("30 % by mass")).basis, "mass");
     assert.equal(valid(readQuantity("30 % by volume")).basis, "volume");
     assert.equal(valid(readQuantity("500 ppm by amount")).basis, "amount");
@@ -89,6 +104,19 @@ describe("readQuantity", () => {
     ],
     ["0.1(2) ± 3 s", "The uncertainty is stated twice; keep one of the two.", [0, 10], null],
     ["0.1(2) s ± 3 s", "The uncertainty is stated twice; keep one of the two.", [0, 14], null],
+    // uncertainty-of-what
+    [
+      "98.0 ± 0.5 %",
+      "98.0 ± 0.5 % could be (98.0 ± 0.5) % or 98.0 ± 0.49; write the one you mean.",
+      [0, 12],
+      "(98.0 ± 0.5) %",
+    ],
+    [
+      "4.2 +/- 5%",
+      "4.2 +/- 5% could be (4.2 +/- 5) % or 4.2 +/- 0.21; write the one you mean.",
+      [0, 10],
+      "(4.2 +/- 5) %",
+    ],
     [
       "50 mL within 0.05",
       "within 0.05 needs its unit, as in 50.00 mL within 0.05 mL.",

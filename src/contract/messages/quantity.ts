@@ -30,6 +30,12 @@ export const quantityMessages = {
     "One standard uncertainty is stated for a quantity, in brackets or after ±, not both.",
     () => "The uncertainty is stated twice; keep one of the two.",
   ),
+  "uncertainty-of-what": message(
+    "error",
+    "In 98 ± 2 % the per cent sign could belong to both numbers or make the second a share of the first.",
+    ({ text, first, second }: { text: string; first: string; second: string }) =>
+      `${text} could be ${first} or ${second}; write the one you mean.`,
+  ),
   "uncertainty-unit": message(
     "error",
     "An uncertainty has the unit of its value, or per cent.",
