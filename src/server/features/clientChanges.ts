@@ -1,5 +1,6 @@
 import { DidChangeConfigurationNotification } from "vscode-languageserver";
 import { type ThemeChanged, themeChanged, trustGranted } from "../../contract/editorProtocol.js";
+import { version } from "../../contract/version.js";
 import { readSettings } from "../clientState.js";
 import type { Feature, ServerContext } from "../context.js";
 
@@ -9,6 +10,7 @@ export const clientChanges: Feature = {
   start(context) {
     const { connection, client } = context;
     connection.onInitialized(async () => {
+      context.log(`The language server of Ratewright ${version} runs.`);
       if (client.abilities.configurationEvents) {
         await connection.client.register(DidChangeConfigurationNotification.type, { section: "ratewright" });
       }
