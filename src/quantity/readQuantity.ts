@@ -1,4 +1,5 @@
 import { type Fault, fault, replacement, type Span } from "../contract/problem.js";
+import { type Basis, basisAtEnd, basisFault, basisMisplaced } from "./basis.js";
 import { readClockTime } from "./clockTime.js";
 import { intervalToSI, toSI } from "./conversion.js";
 import { formatNumber } from "./formatNumber.js";
@@ -17,7 +18,7 @@ export interface ReadQuantity {
   /** null where no unit is written */
   readonly unit: Span | null;
   /** what a share of a mixture is a share of: `30 % by mass`; null where that is not said */
-  readonly basis: "mass" | "amount" | "volume" | null;
+  readonly basis: Basis | null;
 }
 
 const sign = /±|\+ ?\/ ?-|\+-(?=[ .\d])|(?<![A-Za-z])within(?![A-Za-z])/;
@@ -82,13 +83,20 @@ function withUnit(text: string, head: Head, from: number, sourceName: string): R
   }
   const rest = text.slice(begin);
   const next = sign.exec(rest);
-  const by = / by +(mass|amount|volume) *$/.exec(next === null ? rest : rest.slice(0, next.index));
-  const unitEnd = begin + (by?.index ?? next?.index ?? rest.length);
+  const by = basisAtEnd(next === null ? rest : rest.slice(0, next.index));
+  const unitEnd = begin + (by?.start ?? next?.index ?? rest.length);
   const unitText = text.slice(begin, unitEnd);
   const read = unitText.trim() === "" ? { unit: noUnit } : readUnit(unitText);
-  if (isFault(read)) return shifted(read, begin);
+  if (isFault(read)) return shifted(basisFault(unitText) ?? read, begin);
   const unitStart = begin + unitText.length - unitText.trimStart().length;
   const unit = unitText.trim() === "" ? null : { start: unitStart, end: begin + unitText.trimEnd().length };
+  if (by !== null) {
+    const span = { start: begin + by.start, end: begin + (next?.index ?? rest.length) };
+    const from = span.start + (text.charAt(span.start) === " " ? 1 : 0);
+    const written = { start: from, end: span.start + text.slice(span.start, span.end).trimEnd().length };
+    const misplaced = basisMisplaced(read.unit, by.basis, unit?.end ?? begin, written);
+    if (misplaced !== null) return misplaced;
+  }
   const tails = next === null ? [] : tailsOf(text, begin + next.index, head.value, read.unit);
   if (isFault(tails)) return tails;
   if (us.length > 0 && tails.some(({ kind }) => kind === "stated")) {
@@ -98,8 +106,7 @@ function withUnit(text: string, head: Head, from: number, sourceName: string): R
   const value = toSI(head.value, read.unit);
   if (![value, ...all].every(Number.isFinite)) return fault("number-range", { text: text.trim() }, head.span);
   const sources: Source[] = all.map((u) => ({ name: sourceName, kind: "common", u }));
-  const basis = (by?.[1] ?? null) as ReadQuantity["basis"];
-  return { quantity: { value, unit: read.unit, sources }, number: head.span, unit, basis };
+  return { quantity: { value, unit: read.unit, sources }, number: head.span, unit, basis: by?.basis ?? null };
 }
 
 /** `98 ± 2 %` may mean (98 ± 2) % or 98 with 2 % of it: both are offered. Null where the text says which. */

@@ -74,6 +74,7 @@ describe("readQuantity", () => {
     assert.equal(share.quantity.value, 0.3);
     assert.equal(combined(share.quantity.sources), 0.01);
     assert.deepEqual(share.unit, { start: 7, end: 8 });
+    assert.equal(valid(readQuantity("30 %by volume")).basis, "volume");
     const later = valid(readQuantity("30 % by mass ± 1 %"));
     assert.equal(later.basis, "mass");
     assert.equal(combined(later.quantity.sources), 0.01);
@@ -104,6 +105,51 @@ describe("readQuantity", () => {
     ],
     ["0.1(2) ± 3 s", "The uncertainty is stated twice; keep one of the two.", [0, 10], null],
     ["0.1(2) s ± 3 s", "The uncertainty is stated twice; keep one of the two.", [0, 14], null],
+    // share-basis
+    [
+      "30 % by weight",
+      "What a share is of is written by mass, by amount or by volume; “by weight” is not one of them.",
+      [5, 14],
+      "30 % by mass",
+    ],
+    [
+      "30 % w/w",
+      "What a share is of is written by mass, by amount or by volume; “w/w” is not one of them.",
+      [5, 8],
+      "30 % by mass",
+    ],
+    [
+      "30% (v/v)",
+      "What a share is of is written by mass, by amount or by volume; “(v/v)” is not one of them.",
+      [4, 9],
+      "30% by volume",
+    ],
+    [
+      "30 % of mass",
+      "What a share is of is written by mass, by amount or by volume; “of mass” is not one of them.",
+      [5, 12],
+      "30 % by mass",
+    ],
+    [
+      "500 ppm by moles",
+      "What a share is of is written by mass, by amount or by volume; “by moles” is not one of them.",
+      [8, 16],
+      "500 ppm by amount",
+    ],
+    [
+      "30 % by",
+      "What a share is of is written by mass, by amount or by volume; “by” is not one of them.",
+      [5, 7],
+      "30 % by mass",
+    ],
+    // share-basis-alone
+    ["30 mL by mass", "by mass stands behind a share, as in 30 % by mass; mL is a unit of volume.", [6, 13], "30 mL"],
+    [
+      "30 by volume ± 1 %",
+      "by volume stands behind a share, as in 30 % by volume; a bare number is none.",
+      [3, 12],
+      "30 % by volume ± 1 %",
+    ],
     // uncertainty-of-what
     [
       "98.0 ± 0.5 %",

@@ -47,6 +47,18 @@ export const quantityMessages = {
     "A tolerance states its unit: 50.00 mL within 0.05 mL.",
     ({ number }: { number: string }) => `within ${number} needs its unit, as in 50.00 mL within 0.05 mL.`,
   ),
+  "share-basis": message(
+    "error",
+    "A share of a mixture says what it is of: by mass, by amount or by volume.",
+    ({ text }: { text: string }) =>
+      `What a share is of is written by mass, by amount or by volume; “${text}” is not one of them.`,
+  ),
+  "share-basis-alone": message(
+    "error",
+    "By mass, by amount and by volume stand behind a share: %, ppm.",
+    ({ basis, given }: { basis: string; given: string }) =>
+      `by ${basis} stands behind a share, as in 30 % by ${basis}; ${given}.`,
+  ),
   "time-parts": message(
     "error",
     "A time of several parts goes from the larger unit to the smaller, as 1 min 30 s; minutes and seconds stay under 60 in 00:01:30.",
