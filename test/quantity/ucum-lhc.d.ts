@@ -1,0 +1,11 @@
+/** The part of the UCUM library that the tests use; it carries no types of its own. */
+declare module "@lhncbc/ucum-lhc" {
+  interface Conversion {
+    readonly status: "succeeded" | "failed" | "error";
+    readonly toVal: number | null;
+    readonly msg: readonly string[];
+  }
+  export const UcumLhcUtils: {
+    getInstance(): { convertUnitTo(from: string, value: number, to: string): Conversion };
+  };
+}
