@@ -1,6 +1,7 @@
 // The language server in Node: dist/server.cjs. The client says by the arguments how it is spoken to.
 import { join } from "node:path";
 import { createConnection, ProposedFeatures } from "vscode-languageserver/node";
+import { fencedReader } from "../host/node/fencedReader.js";
 import { nodeReader } from "../host/node/nodeReader.js";
 import { openThread } from "../host/node/workThread.js";
 import { inlineComputer } from "../workspace/computer.js";
@@ -12,7 +13,7 @@ import { startServer } from "./server.js";
 const script = join(__dirname, "worker.cjs");
 
 startServer(createConnection(ProposedFeatures.all), {
-  reader: () => nodeReader(),
+  reader: (_, fence) => fencedReader(nodeReader(), fence),
   computer: (log) =>
     bySize(
       inlineComputer(createBreathe()),

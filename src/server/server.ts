@@ -14,7 +14,8 @@ import { createShownDiagnostics } from "./shownDiagnostics.js";
 
 /** What differs between Node and a web worker. */
 export interface ServerHost {
-  reader(connection: Connection): Reader;
+  /** `fence`: folders that files must lie in, links followed; null where any file may be read */
+  reader(connection: Connection, fence: () => readonly string[] | null): Reader;
   /** where findings are worked out; asked for anew whenever what may be read has changed */
   computer(log: (line: string) => void): EndableComputer;
 }
@@ -24,7 +25,12 @@ export function startServer(connection: Connection, host: ServerHost): void {
   const documents = new TextDocuments(TextDocument);
   const client = createClientState();
   const log = (line: string): void => connection.console.info(line);
-  const open = (): Opened => openWorkspace(host, connection, client, log);
+  const open = (): Opened => {
+    const fence = (): readonly string[] | null => {
+      return client.trusted ? null : documents.all().map(({ uri }) => fenceOf(uri, client.folders));
+    };
+    return openWorkspace(host.reader(connection, fence), host.computer(log), client);
+  };
   let opened: Opened | null = null;
   const current = (): Opened => {
     opened ??= open();
@@ -76,18 +82,12 @@ interface Opened {
   readonly workspace: Workspace;
 }
 
-function openWorkspace(
-  host: ServerHost,
-  connection: Connection,
-  client: ClientState,
-  log: (line: string) => void,
-): Opened {
+function openWorkspace(reader: Reader, computer: EndableComputer, client: ClientState): Opened {
   const access: FileAccess = {
-    reader: host.reader(connection),
+    reader,
     sizeLimit: client.settings.data.maximumSize * 1e6,
     within: (description) => (client.trusted ? null : fenceOf(description, client.folders)),
   };
-  const computer = host.computer(log);
   return { access, computer, workspace: createWorkspace(access, computer) };
 }
 

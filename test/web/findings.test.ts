@@ -80,9 +80,7 @@ describe("findings in a worker of a page", () => {
       return JSON.stringify(last?.params).includes("up to date");
     });
     // The log would say that the worker ended, had it not started.
-    assert.deepEqual(
-      worker.said.filter(({ method }) => method === "window/logMessage"),
-      [],
-    );
+    const log = worker.said.filter(({ method }) => method === "window/logMessage").map(({ params }) => params);
+    assert.doesNotMatch(JSON.stringify(log), /ended/);
   });
 });
