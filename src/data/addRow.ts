@@ -1,4 +1,6 @@
-import { numberOf } from "./numberCell.js";
+import type { FaultKind } from "./columns.js";
+import { elapsed } from "./elapsedTime.js";
+import { numberOf, wordKind } from "./numberCell.js";
 import { addFault, makeRoom, type RowStore } from "./rowStore.js";
 
 /**
@@ -12,13 +14,24 @@ export function addRow(store: RowStore, cells: readonly string[], decimalComma: 
   while (count > width && cells[count - 1] === "") count--;
   for (let column = 0; column < width; column++) {
     const cell = cells[column];
-    const value = cell === undefined ? null : numberOf(cell, decimalComma);
-    values[column]![rows] = value ?? Number.NaN;
-    if (value === null && cell !== undefined)
-      addFault(store, cell.trim() === "" ? "empty" : "word", column, cell.trim());
+    const value = cell === undefined ? Number.NaN : cellValue(store, column, cell, decimalComma);
+    if (typeof value === "number") values[column]![rows] = value;
+    else {
+      values[column]![rows] = Number.NaN;
+      addFault(store, value, column, (cell ?? "").trim());
+    }
   }
   if (count < width) addFault(store, "short", count, "");
   if (count > width) addFault(store, "long", width, (cells[width] ?? "").trim());
   store.lines[rows] = line;
   store.rows++;
+}
+
+function cellValue(store: RowStore, column: number, cell: string, decimalComma: boolean): number | FaultKind {
+  const time = store.times?.[column] ?? null;
+  const value = time === null ? numberOf(cell, decimalComma) : null;
+  if (value !== null) return value;
+  const text = cell.trim();
+  if (text === "") return "empty";
+  return time === null ? wordKind(text, decimalComma) : elapsed(time, text, store.rows);
 }

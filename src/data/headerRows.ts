@@ -162,7 +162,9 @@ function isUnitsUnder(
 ): boolean {
   if (upper.length !== width || lower.length > width || upper.some((name) => name === "")) return false;
   if (upper.some((name) => lineLook(name, delimiter === " " ? ";" : delimiter, 2).kind !== "text")) return false;
-  const stated = lower.map(bareUnit).filter((unit) => !/^(?:|-|–|1)$/.test(unit));
+  const stated = lower
+    .map(bareUnit)
+    .filter((unit) => !/^(?:|-|–|1|[-a-z/. ]*\bh{1,2}:m{1,2}\S*|m{1,2}:s{1,2}\S*)$/i.test(unit));
   return stated.length > 0 && stated.every((unit) => readUnit(`x / ${unit}`).unit !== null);
 }
 

@@ -5,6 +5,7 @@ import { type DataRefusal, type Limits, refused } from "./dataOptions.js";
 import { type RowStore, rowStore } from "./rowStore.js";
 import type { TableLayout } from "./tableLayout.js";
 import { linesFrom } from "./textLines.js";
+import { timeReaders } from "./timeColumns.js";
 
 export type BodyReading =
   | { readonly kind: "rows"; readonly store: RowStore }
@@ -20,7 +21,7 @@ export function irregularBody(text: string, layout: TableLayout, limits: Limits,
   const long = lineBeyond(body, limits.lineLength);
   const line = (inBody: number): number => layout.bodyLine + inBody - 1;
   if (long !== null) return refused("data-line-too-long", { line: line(long), limit: limits.lineLength });
-  const store = rowStore(layout.width, 256);
+  const store = rowStore(layout.width, 256, timeReaders(layout.times, layout.headerWords));
   let tooMany = false;
   const end = eachRecord(body, layout.delimiter, (cells, endLine) => {
     if (cells.every((cell) => cell === "")) return "go on";

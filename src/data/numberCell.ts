@@ -1,3 +1,5 @@
+import { timeShape } from "./timeText.js";
+
 /**
  * A cell as a number, exactly as JavaScript reads the same digits with a decimal point; null where it is none. Taken:
  * a sign (`+`, `-`, U+2212), digits with the file's decimal mark, an exponent. Not taken: thousands marks, the other
@@ -32,7 +34,7 @@ export function lookOf(cell: string): CellLook {
   if (pointNumber.test(text)) return text.includes(".") ? pointed : whole;
   if (commaNumber.test(text)) return commaed;
   if (gapWord.test(text)) return gap;
-  return clockTime.test(text) || dateTime.test(text) ? time : word;
+  return timeShape(text) === null ? word : time;
 }
 
 const whole: CellLook = { kind: "number", mark: null };
@@ -43,9 +45,6 @@ const time: CellLook = { kind: "time", mark: null };
 const word: CellLook = { kind: "word", mark: null };
 
 const gapWord = /^(?:|[-+]?(?:nan|inf|infinity)|n\/?a|null|none|over(?:flow|range)?|[-–—]{1,3}|\?+|\*+|#n\/a)$/i;
-const clockTime = /^\d{1,3}:\d\d(?::\d\d)?(?:[.,]\d{1,9})?$/;
-const dateTime =
-  /^\d{1,4}[-./]\d{1,2}[-./]\d{1,4}(?:[T ]\d{1,2}:\d\d(?::\d\d(?:[.,]\d{1,9})?)?)?(?: ?[AaPp][Mm])?(?:Z|[+-]\d\d:?\d\d)?$/;
 
 /** How a cell that is no number went wrong, as far as it shows; thousands marks are told from a decimal mark by place. */
 export function wordKind(cell: string, decimalComma: boolean): "thousands" | "other mark" | "word" {

@@ -1,5 +1,6 @@
 import { addRow } from "./addRow.js";
 import { notTextAt } from "./decodeText.js";
+import { quotedCells } from "./quotedCells.js";
 import type { RowStore } from "./rowStore.js";
 
 /** What is known of the layout when one line among plain numbers is not plain. */
@@ -11,30 +12,45 @@ export interface OddRowLayout {
   readonly markCertain: boolean;
 }
 
-const quote = 0x22;
 const decoder = new TextDecoder("utf-8", { fatal: true, ignoreBOM: true });
 
 /**
- * One line of UTF-8 without its end, without quotes: a comment, a row of separators alone, or a row with gaps or words.
- * False where only csv-parse and the whole text can tell what it is: a quote, another encoding, what is no text.
+ * One line of UTF-8 without its end: a comment, a row of separators alone, or a row with gaps, words, times or quotes
+ * that open and close around whole cells. False where only csv-parse and the whole text can tell what it is: other
+ * quotes, another encoding, what is no text.
  */
 export function addOddRow(store: RowStore, bytes: Uint8Array, layout: OddRowLayout, line: number): boolean {
-  if (bytes.includes(quote)) return false;
   const content = decoded(bytes);
   if (content === null || notTextAt(content, 0, content.length) >= 0) return false;
   if (!layout.markCertain && /\d[.,]\d/.test(content)) return false;
-  if (/^\s*#/.test(content)) return true;
-  const byBlanks = layout.delimiter === " ";
-  const split = content.split(byBlanks ? /[ \t]/ : layout.delimiter).map((cell) => cell.trim());
-  const cells = byBlanks ? split.filter((cell) => cell !== "") : split;
+  const quoted = content.includes('"');
+  if (/^\s*#/.test(content)) return !quoted;
+  const cells = quoted ? quotedCells(content, layout.delimiter) : bareCells(content, layout.delimiter);
+  if (cells === null) return false;
   if (cells.some((cell) => cell !== "")) addRow(store, cells, layout.decimalComma, line);
   return true;
 }
 
+function bareCells(content: string, delimiter: string): string[] {
+  if (delimiter !== " ") return content.split(delimiter).map((cell) => cell.trim());
+  return content
+    .split(/[ \t]/)
+    .map((cell) => cell.trim())
+    .filter((cell) => cell !== "");
+}
+
+/** Longer lines go through the decoder. */
+const short = 256;
+
 function decoded(bytes: Uint8Array): string | null {
+  if (bytes.length <= short && bytes.every(isAscii)) return String.fromCharCode(...bytes);
   try {
     return decoder.decode(bytes);
   } catch {
     return null;
   }
+}
+
+function isAscii(byte: number): boolean {
+  return byte < 0x80;
 }

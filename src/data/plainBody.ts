@@ -2,9 +2,11 @@ import type { Polling } from "../contract/polling.js";
 import type { Limits } from "./dataOptions.js";
 import { addOddRow, type OddRowLayout } from "./oddRow.js";
 import { makeRoom, type RowStore, rowStore } from "./rowStore.js";
+import type { TableLayout } from "./tableLayout.js";
+import { timeReaders } from "./timeColumns.js";
 
 /** What the byte loop needs to know of the layout. */
-export interface PlainLayout extends OddRowLayout {
+export interface PlainLayout extends OddRowLayout, Pick<TableLayout, "times" | "headerWords"> {
   readonly width: number;
   /** the line the body begins on, from 1 */
   readonly bodyLine: number;
@@ -12,7 +14,7 @@ export interface PlainLayout extends OddRowLayout {
 
 export type PlainReading =
   | { readonly kind: "rows"; readonly store: RowStore }
-  /** quotes, another encoding, beyond a limit: the body is for csv-parse */
+  /** quotes inside cells or over several lines, another encoding, beyond a limit: the body is for csv-parse */
   | { readonly kind: "irregular" }
   | { readonly kind: "stopped" };
 
@@ -20,6 +22,7 @@ const tab = 9;
 const lineFeed = 10;
 const carriageReturn = 13;
 const blank = 32;
+const quote = 34;
 const plus = 43;
 const minus = 45;
 const point = 46;
@@ -37,8 +40,8 @@ const roomForDigit = 900_719_925_474_098;
 
 /**
  * The rows of a body of numbers, `width` in every row, read byte by byte; blank lines and blanks around cells are
- * allowed, and one separator at the end of a row. A line of another kind is taken by itself as long as it has no quotes
- * (see `addOddRow`). Anything else makes the body "irregular", and so does one beyond the limits: csv-parse then reads
+ * allowed, quotes right around numbers, and one separator at the end of a row. A line of another kind, and each line with
+ * dates or clock times, is taken by itself as long as its quotes are plain (see `addOddRow`). Anything else makes the body "irregular", and so does one beyond the limits: csv-parse then reads
  * it from the start and says what it is. A test keeps the two equal.
  *
  * A number of at most 53 bits times or over a power of ten that a double holds exactly is one operation, which IEEE 754
@@ -57,8 +60,12 @@ export function plainBody(
   const separator = layout.delimiter.charCodeAt(0);
   const byBlanks = separator === blank;
   const decimal = layout.decimalComma ? comma : point;
-  if (layout.delimiter.length !== 1 || separator > 126 || separator === decimal) return irregular;
-  const store = rowStore(width, expectedRows(bytes, start));
+  // between cells that commas separate, a decimal comma stands in quotes alone
+  const bareDecimal = separator === decimal ? -1 : decimal;
+  if (layout.delimiter.length !== 1 || separator > 126) return irregular;
+  const times = timeReaders(layout.times, layout.headerWords);
+  const timed = times !== null;
+  const store = rowStore(width, expectedRows(bytes, start), times);
   let { values, lines } = store;
   let line = layout.bodyLine;
   let at = start;
@@ -77,8 +84,10 @@ export function plainBody(
       values = store.values;
       lines = store.lines;
     }
-    let regular = true;
-    for (let column = 0; column < width; column++) {
+    let regular = !timed;
+    for (let column = timed ? width : 0; column < width; column++) {
+      const quoted = byte === quote;
+      if (quoted) byte = bytes[++at] ?? lineFeed;
       const cellStart = at;
       const negative = byte === minus;
       if (negative || byte === plus) byte = bytes[++at] ?? lineFeed;
@@ -92,7 +101,7 @@ export function plainBody(
         digits++;
         byte = bytes[++at] ?? lineFeed;
       }
-      if (byte === decimal) {
+      if (byte === (quoted ? decimal : bareDecimal)) {
         byte = bytes[++at] ?? lineFeed;
         while (byte >= zero && byte <= nine) {
           if (mantissa > roomForDigit) exact = false;
@@ -133,6 +142,13 @@ export function plainBody(
         break;
       }
       values[column]![row] = value;
+      if (quoted) {
+        if (byte !== quote || byBlanks) {
+          regular = false;
+          break;
+        }
+        byte = bytes[++at] ?? lineFeed;
+      }
       const cellEnd = at;
       while (byte === blank || (byte === tab && separator !== tab)) byte = bytes[++at] ?? lineFeed;
       if (column < width - 1) {

@@ -1,6 +1,7 @@
 import type { Column, Columns } from "./columns.js";
 import { type DataOptions, type DataReading, limitsOf, refused } from "./dataOptions.js";
 import { decodeText, notTextAt, withoutEndMark } from "./decodeText.js";
+import { columnTime } from "./elapsedTime.js";
 import { bareUnit, type HeaderRows, type HeaderUnitReader } from "./headerRows.js";
 import { irregularBody } from "./irregularBody.js";
 import { plainBody } from "./plainBody.js";
@@ -63,19 +64,39 @@ export function readAnyTable(bytes: Uint8Array, options: DataOptions, readUnit: 
 function columnsOf(layout: TableLayout, store: RowStore, readUnit: HeaderUnitReader): Columns {
   const { values, lines } = trimmed(store);
   return {
-    columns: values.map((column, index) => ({ ...headerOf(layout.header, index, readUnit), values: column })),
+    columns: values.map((column, index) => columnOf(layout, store, index, column, readUnit)),
     rows: store.rows,
     lines,
     faults: store.faults,
     faultCount: store.faultCount,
+    tallies: store.tallies,
     delimiter: layout.delimiter,
     decimalComma: layout.decimalComma,
     headerLine: layout.header?.line ?? null,
   };
 }
 
+function columnOf(
+  layout: TableLayout,
+  store: RowStore,
+  index: number,
+  values: Float64Array,
+  readUnit: HeaderUnitReader,
+): Column {
+  const header = headerOf(layout.header, index, readUnit);
+  const time = store.times?.[index] ?? null;
+  if (time === null) return { kind: "number", ...header, values, time: null };
+  // whatever the header says of the unit, such as (hh:mm:ss): elapsed times are in seconds
+  const inSeconds = { header: header.header, unit: readUnit("t / s").unit, unreadUnit: null };
+  return { kind: time.kind, ...inSeconds, values, time: columnTime(time) };
+}
+
 /** The header of a column; a unit in the header itself goes before one in the row of units. */
-function headerOf(rows: HeaderRows | null, index: number, readUnit: HeaderUnitReader): Omit<Column, "values"> {
+function headerOf(
+  rows: HeaderRows | null,
+  index: number,
+  readUnit: HeaderUnitReader,
+): Pick<Column, "header" | "unit" | "unreadUnit"> {
   const header = rows?.headers[index] ?? "";
   if (header === "") return { header, unit: null, unreadUnit: null };
   const own = readUnit(header);

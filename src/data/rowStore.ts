@@ -1,4 +1,5 @@
-import type { CellFault } from "./columns.js";
+import type { CellFault, FaultKind } from "./columns.js";
+import type { ElapsedTime } from "./elapsedTime.js";
 
 /** Rows read so far, in arrays that grow. */
 export interface RowStore {
@@ -8,10 +9,20 @@ export interface RowStore {
   lines: Uint32Array;
   readonly faults: CellFault[];
   faultCount: number;
+  readonly tallies: GrowingTally[];
+  /** the same, by kind and column */
+  readonly tallyOf: Map<FaultKind, GrowingTally[]>;
+  /** readers of the columns that hold times; null where none does */
+  readonly times: readonly (ElapsedTime | null)[] | null;
 }
 
-/** Room for about `expected` rows of `width` columns. */
-export function rowStore(width: number, expected: number): RowStore {
+interface GrowingTally {
+  readonly first: CellFault;
+  count: number;
+}
+
+/** Room for about `expected` rows of `width` columns; `times` reads those that hold times. */
+export function rowStore(width: number, expected: number, times: RowStore["times"]): RowStore {
   const capacity = Math.max(16, Math.ceil(expected));
   return {
     width,
@@ -20,6 +31,9 @@ export function rowStore(width: number, expected: number): RowStore {
     lines: new Uint32Array(capacity),
     faults: [],
     faultCount: 0,
+    tallies: [],
+    tallyOf: new Map(),
+    times,
   };
 }
 
@@ -41,10 +55,25 @@ export function makeRoom(store: RowStore): void {
 const keptFaults = 1_000;
 const keptText = 40;
 
-export function addFault(store: RowStore, kind: CellFault["kind"], column: number, text: string): void {
+export function addFault(store: RowStore, kind: FaultKind, column: number, text: string): void {
   store.faultCount++;
-  if (store.faults.length >= keptFaults) return;
-  store.faults.push({ kind, row: store.rows, column, text: text.slice(0, keptText) });
+  const byColumn = store.tallyOf.get(kind);
+  const tally = byColumn?.[column];
+  if (tally !== undefined) tally.count++;
+  if (tally !== undefined && store.faults.length >= keptFaults) return;
+  const found = { kind, row: store.rows, column, text: text.slice(0, keptText) };
+  if (store.faults.length < keptFaults) store.faults.push(found);
+  if (tally !== undefined) return;
+  const begun = { first: found, count: 1 };
+  store.tallies.push(begun);
+  if (byColumn === undefined) store.tallyOf.set(kind, sparse(column, begun));
+  else byColumn[column] = begun;
+}
+
+function sparse<T>(index: number, item: T): T[] {
+  const items: T[] = [];
+  items[index] = item;
+  return items;
 }
 
 /** The arrays at their final length; room that was not used is given back where it is more than an eighth. */

@@ -4,6 +4,7 @@ import { headedTable, wordTable } from "./headedTable.js";
 import type { HeaderRows, HeaderUnitReader } from "./headerRows.js";
 import { collectBlocks } from "./numericBlocks.js";
 import type { Table } from "./table.js";
+import { type TimeColumns, timeColumns } from "./timeColumns.js";
 
 /** How a delimited text is laid out: what stands between its cells, and where its header and its body are. */
 export interface TableLayout {
@@ -20,6 +21,10 @@ export interface TableLayout {
   readonly numeric: boolean;
   /** whether the decimal mark is stated, shown by the first rows, or cannot be a comma */
   readonly markCertain: boolean;
+  /** which columns hold dates or clock times, length `width` */
+  readonly times: TimeColumns["kinds"];
+  /** the header of each column and the unit under it, as one text */
+  readonly headerWords: readonly string[];
   /** whether the text up to here decided it, so that more text would change nothing but the decimal mark */
   readonly settled: boolean;
 }
@@ -57,6 +62,7 @@ export function tableLayout(
   const decimalComma = options.decimalComma ?? hasDecimalComma(text, found);
   const { delimiter, header, start } = found;
   const numeric = found.block !== null;
+  const times = timeColumns(text, start, delimiter, width);
   return {
     kind: "layout",
     delimiter,
@@ -67,8 +73,14 @@ export function tableLayout(
     bodyLine: start.number,
     numeric,
     markCertain,
-    settled: collected.settled,
+    times: times.kinds,
+    headerWords: Array.from({ length: width }, (_, index) => wordsAbove(header, index)),
+    settled: collected.settled && times.complete,
   };
+}
+
+function wordsAbove(header: HeaderRows | null, index: number): string {
+  return `${header?.headers[index] ?? ""} ${header?.units?.[index] ?? ""}`.trim();
 }
 
 const usualDelimiters = ["\t", ";", ",", " "];
@@ -89,7 +101,8 @@ function hasDecimalComma(text: string, table: Table): boolean {
   const { block, delimiter } = table;
   if (block !== null && block.commas + block.points > 0) return block.commas > block.points;
   if (delimiter === ",") return false;
-  const mark = /\d([.,])\d/g;
+  // neither the points of a date nor what follows a colon
+  const mark = /(?<![\d.:/])\d+([.,])\d+(?!\d*[.:/]\d)/g;
   mark.lastIndex = table.start.start;
   return mark.exec(text)?.[1] === ",";
 }

@@ -137,7 +137,7 @@ describe("reading a delimited file: cells that are no number", () => {
       { kind: "short", row: 2, column: 1, text: "" },
       { kind: "word", row: 3, column: 1, text: "NaN" },
       { kind: "word", row: 4, column: 1, text: "inf" },
-      { kind: "word", row: 5, column: 1, text: "1 234" },
+      { kind: "thousands", row: 5, column: 1, text: "1 234" },
       { kind: "word", row: 6, column: 1, text: "-" },
       { kind: "long", row: 7, column: 2, text: "5" },
     ]);

@@ -129,11 +129,57 @@ export const dataMessages = {
         ? `${file}, line ${line}: “${text}” under ${header} is not a number. The point is left out.`
         : `${file}, line ${line}: “${text}” under ${header} is not a number, nor ${others(count)}. These points are left out.`,
   ),
-  "data-thousands-mark": message<{ file: string; line: number; header: string; text: string }>(
+  "data-thousands-mark": message<{ file: string; line: number; header: string; text: string; count: number }>(
     "warning",
     "A number is written with a mark between its thousands. Such a mark is never guessed away; the point is left out.",
+    ({ file, line, header, text, count }) =>
+      count === 1
+        ? `${file}, line ${line}: “${text}” under ${header} has a mark between its thousands. Write it without one; until then the point is left out.`
+        : `${file}, line ${line}: “${text}” under ${header} has a mark between its thousands, and so ${have(count)}. Write them without one; until then these points are left out.`,
+  ),
+  "data-date-order": message<{ file: string; line: number; header: string; text: string; count: number }>(
+    "error",
+    "Dates that begin with the day or the month, of which it is not certain which. They are used only where all are the same day, or where a number above 12 shows the order.",
+    ({ file, line, header, text, count }) =>
+      `${file}, line ${line}: “${text}” under ${header} is another day than the first, and nothing shows whether day or month stands in front. Write dates with the year first, as 2026-11-03; until then ${count === 1 ? "the point is" : `${count} points are`} left out.`,
+  ),
+  "data-clock-parts": message<{ file: string; line: number; header: string; text: string }>(
+    "error",
+    "A time of two numbers such as 1:30 can be hours and minutes or minutes and seconds; it is not guessed.",
     ({ file, line, header, text }) =>
-      `${file}, line ${line}: “${text}” under ${header} has a mark between its thousands. Write it without one; until then the point is left out.`,
+      `${file}, line ${line}: “${text}” under ${header} can be hours and minutes or minutes and seconds. Write (mm:ss) or (hh:mm) in the header, or all three numbers, as 00:01:30.`,
+  ),
+  "data-cell-time": message<{
+    file: string;
+    line: number;
+    header: string;
+    text: string;
+    count: number;
+    start: string;
+  }>(
+    "warning",
+    "Cells of a column of dates or clock times hold no such time; their points are left out.",
+    ({ file, line, header, text, count, start }) =>
+      `${file}, line ${line}: “${text}” under ${header} is not a time written like ${start}${count === 1 ? ". The point is left out." : `, nor ${others(count)}. These points are left out.`}`,
+  ),
+  "data-time-offset": message<{
+    file: string;
+    line: number;
+    header: string;
+    text: string;
+    count: number;
+    start: string;
+  }>(
+    "warning",
+    "Some times of a column state their offset from UTC (Z, +01:00) and others do not, so that they cannot be compared.",
+    ({ file, line, header, text, count, start }) =>
+      `${file}, line ${line}: “${text}” under ${header} cannot be compared with the first time, “${start}”: only one of them states its offset from UTC. Write all with it or all without; until then ${count === 1 ? "the point is" : `${count} points are`} left out.`,
+  ),
+  "data-midnight-passed": message<{ file: string; line: number; header: string; after: string; count: number }>(
+    "information",
+    "A clock time is more than twelve hours lower than the one before; this is taken for midnight.",
+    ({ file, line, header, after, count }) =>
+      `${file}, line ${line}: ${header} falls to ${after}, which is taken for the next day${count === 1 ? "" : `; this happens ${count} times`}. If it is not, keep the two runs in two files.`,
   ),
   "data-row-short": message<{ file: string; line: number; header: string; count: number }>(
     "warning",
@@ -147,7 +193,7 @@ export const dataMessages = {
     "warning",
     "Rows have more cells than the file has columns: a comma inside a number or a text without quotes is the usual cause.",
     ({ file, line, text, columns, count }) =>
-      `${file}, line ${line}: the row has more cells than the ${columns} columns${count === 1 ? "" : `, and so ${count === 2 ? "has one other" : `have ${count - 1} others`}`}; the first too many is “${text}”. Look for a separator inside a number or a text.`,
+      `${file}, line ${line}: the row has more cells than the ${columns} columns${count === 1 ? "" : `, and so ${have(count)}`}; the first too many is “${text}”. Look for a separator inside a number or a text.`,
   ),
   "data-time-backwards": message<{ file: string; line: number; header: string; before: string; after: string }>(
     "error",
@@ -216,6 +262,10 @@ export const dataMessages = {
       `${file}, line ${line} has more than ${limit} columns. Keep the columns that are used, with time running down the rows.`,
   ),
 } as const;
+
+function have(count: number): string {
+  return count === 2 ? "has one other" : `have ${count - 1} others`;
+}
 
 function others(count: number): string {
   return count === 2 ? "is one other" : `are ${count - 1} others`;
