@@ -21,8 +21,29 @@ export function calendarDay({ yearFirst, fields }: DateText, order: DateOrder): 
   const [a, b, c] = fields;
   const [year, month, day] = order === "year first" ? [a, b, c] : order === "day first" ? [c, b, a] : [c, a, b];
   if (year < 1000) return null;
-  const found = new Date(Date.UTC(year, month - 1, day));
-  // a day or month beyond the last runs over into the next
-  if (found.getUTCMonth() !== month - 1 || found.getUTCDate() !== day) return null;
-  return found.getTime() / 86_400_000;
+  if (month < 1 || month > 12 || day < 1 || day > daysBefore(year, month + 1) - daysBefore(year, month)) return null;
+  return daysBefore(year, month) + day - 1;
 }
+
+/** A day counted from 1970-01-01 as `2026-11-03`. */
+export function dayText(days: number): string {
+  // no year is longer than 366 days, so this is the year or one before
+  let year = 1970 + Math.floor(days / 366);
+  while (daysBefore(year + 1, 1) <= days) year++;
+  let month = 1;
+  while (daysBefore(year, month + 1) <= days) month++;
+  const two = (part: number): string => String(part).padStart(2, "0");
+  return `${year}-${two(month)}-${two(days - daysBefore(year, month) + 1)}`;
+}
+
+/** Days from 1970-01-01 to the first of a month, from 1; month 13 is the next January. Own code: Date is a clock. */
+function daysBefore(year: number, month: number): number {
+  const leap = year % 4 === 0 && (year % 100 !== 0 || year % 400 === 0) && month > 2 ? 1 : 0;
+  const past = year - 1;
+  const leapYears = Math.floor(past / 4) - Math.floor(past / 100) + Math.floor(past / 400);
+  return past * 365 + leapYears + (beforeMonth[month - 1] ?? 0) + leap - daysTo1970;
+}
+
+/** Days of an ordinary year before each month, and the days from 0001-01-01 to 1970-01-01. */
+const beforeMonth = [0, 31, 59, 90, 120, 151, 181, 212, 243, 273, 304, 334, 365];
+const daysTo1970 = 719_162;

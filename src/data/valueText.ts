@@ -1,3 +1,4 @@
+import { dayText } from "./calendarDay.js";
 import type { Column } from "./columns.js";
 
 /**
@@ -11,7 +12,7 @@ export function valueText({ kind, time }: Pick<Column, "kind" | "time">, value: 
   const days = Math.floor(total / 86_400);
   const wraps = time.day !== null || time.midnights > 0 || total < 0;
   const clock = clockText(wraps ? total - days * 86_400 : total);
-  return time.day === null ? clock : `${dateText(time.day + days)} ${clock}`;
+  return time.day === null ? clock : `${dayText(time.day + days)} ${clock}`;
 }
 
 function clockText(total: number): string {
@@ -19,8 +20,4 @@ function clockText(total: number): string {
   const two = (part: number): string => String(part).padStart(2, "0");
   const decimals = (total - whole).toFixed(6).replace(/0+$/, "").slice(1).replace(/^\.$/, "");
   return `${two(Math.floor(whole / 3600))}:${two(Math.floor(whole / 60) % 60)}:${two(whole % 60)}${decimals}`;
-}
-
-function dateText(day: number): string {
-  return new Date(day * 86_400_000).toISOString().slice(0, 10);
 }
