@@ -110,4 +110,33 @@ export const chemistryMessages = {
     ({ facts }: { facts: string }) =>
       `${facts} More than one set of coefficients would do, so this is a sum of reactions: write the coefficients you mean.`,
   ),
+  "share-beyond-whole": message(
+    "error",
+    "A share of a mixture lies between 0 and 100 %.",
+    ({ share }: { share: string }) => `A share lies between 0 and 100 %; ${share} cannot be one.`,
+  ),
+  "stock-needs-molar-mass": message(
+    "error",
+    "To turn a mass into an amount the molar mass is needed: of a formula, or stated under the species.",
+    ({ what, species }: { what: string; species: string }) =>
+      `${what} needs the molar mass of ${species}: declare species ${species} with its formula or its molar mass.`,
+  ),
+  "stock-needs-density": message(
+    "error",
+    "To turn a share by mass or by amount into a concentration the density of the solution is needed.",
+    ({ what, species }: { what: string; species: string }) =>
+      `A solution of ${species}, ${what}, needs its density: add it to the line, as in density 1.11 g/mL.`,
+  ),
+  "stock-needs-pure-density": message(
+    "error",
+    "A share by volume is the volume of the pure substance in that of the solution; its density is not known here.",
+    ({ what, species }: { what: string; species: string }) =>
+      `${what} needs the density of pure ${species}, which is not known here: give the share by mass with the density of the solution, or its concentration.`,
+  ),
+  "stock-needs-solvent": message(
+    "error",
+    "A share by amount becomes a concentration only where it is known what the rest of the solution is.",
+    ({ what, species }: { what: string; species: string }) =>
+      `${what} of ${species} needs the molar mass of what it is dissolved in: give the share by mass with the density of the solution, or its concentration.`,
+  ),
 } as const;
