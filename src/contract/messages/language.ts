@@ -52,6 +52,11 @@ export const languageMessages = {
     "A quotation mark is not closed on its line.",
     (_: Record<string, never>) => "The quotation mark is not closed. Text in quotes ends on the line where it begins.",
   ),
+  "format-refused": message(
+    "error",
+    "A description was not formatted, because that would have changed what it says.",
+    ({ line }: { line: number }) => `The formatter would change the meaning of line ${line}; nothing was changed.`,
+  ),
   "name-malformed": message(
     "error",
     "A name holds a character that names cannot have, or is one of the language's connecting words.",
