@@ -33,7 +33,7 @@ export async function analyse(
 ): Promise<{ runs: RunFinding[]; notes: readonly Note[] }> {
   const notes: Notes = { all: [] };
   const runs: RunFinding[] = [];
-  for (const run of runsOf(study, notes)) {
+  for (const run of runsOf(study)) {
     if (input.stopped()) break;
     const columns = run.data === null ? null : (input.files.get(fileKey(run.data)) ?? null);
     runs.push(analyseRun(run, { ...input, columns }, notes));

@@ -1,4 +1,5 @@
 import type { Run as RunFinding } from "../contract/findings.js";
+import { problem } from "../contract/problem.js";
 import { monitors } from "../monitor/monitors.js";
 import { noUnit } from "../quantity/unitOf.js";
 import type { Follow, Run } from "../study/run.js";
@@ -37,20 +38,30 @@ export function analyseRun(run: Run, input: RunInput, notes: Notes): RunFinding 
     const read = input.columns === null ? null : readSignal(run, follow, input.columns, notes);
     const context = read === null ? null : contextOf(run, follow, read, amounts, notes);
     finding.follow.push(followFinding(follow, read, context, input));
-    // Without a word to the contrary rates and fits are those of the first signal.
-    if (run.follow[0] !== follow) continue;
     const fits = fitsOf(run, follow, context, input, notes);
     const change = fits.find((fit) => fit.change !== null)?.change ?? null;
     finding.fits.push(...fits.map((fit) => fit.finding));
-    finding.rates.push(...ratesOf(run, context, change, input, notes));
+    finding.rates.push(...ratesOf(run, follow, context, change, input, notes));
   }
+  // In the order of the text, whichever signal they are of.
+  const order = (a: { id: string }, b: { id: string }): number => placeOfId(a.id) - placeOfId(b.id);
+  finding.rates.sort(order);
+  finding.fits.sort(order);
   return finding;
+}
+
+/** The number at the end of an id such as `run A/fit 2`. */
+function placeOfId(id: string): number {
+  return Number(id.slice(id.lastIndexOf(" ") + 1));
 }
 
 function conditionsOf(run: Run): RunFinding["conditions"] {
   const conditions: RunFinding["conditions"] = {};
   if (run.volume !== null) conditions["volume"] = shownQuantity(run.volume.value);
   if (run.temperature !== null) conditions["temperature"] = shownQuantity(run.temperature.value);
+  if (run.pressure !== null) conditions["pressure"] = shownQuantity(run.pressure.value);
+  if (run.ionicStrength !== null) conditions["ionic strength"] = shownQuantity(run.ionicStrength.value);
+  if (run.headSpace !== null) conditions["head space"] = shownQuantity(run.headSpace.value);
   return conditions;
 }
 
@@ -76,8 +87,13 @@ function contextOf(
 ): EndContext | null {
   const monitor = monitors.get(follow.monitor);
   const number = run.reaction?.numbers.get(follow.species.key) ?? 0;
+  if (monitor === undefined) {
+    const what = `“${follow.species.key} as ${follow.monitor}”`;
+    note(notes, follow.id, problem("not-computed-yet", { what }, follow.origin));
+    return null;
+  }
   // A reaction that is broken, or that does not change the species, has been said to be so on its line.
-  if (monitor === undefined || number === 0) return null;
+  if (number === 0) return null;
   const relation = monitor.relate(run, follow, read.signal);
   if (!relation.ok) {
     note(notes, follow.id, relation.problem);

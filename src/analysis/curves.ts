@@ -72,8 +72,9 @@ function spread({ covariance, free }: FirstOrderFit["fit"], slopes: readonly num
 }
 
 /** Reading minus curve at each reading used. */
-export function residualCurve({ signal }: EndContext, { fit }: FirstOrderFit): Block {
-  return { unit: signal.unit.text, values: Array.from(fit.residuals, (r) => intervalFromSI(r, signal.unit)) };
+export function residualCurve({ signal }: EndContext, { fit, used }: FirstOrderFit): Block {
+  const residuals = fit.residuals.subarray(0, used.value.length);
+  return { unit: signal.unit.text, values: Array.from(residuals, (r) => intervalFromSI(r, signal.unit)) };
 }
 
 function block(values: Float64Array, unit: Unit): Block {

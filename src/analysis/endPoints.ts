@@ -4,13 +4,21 @@ import type { Relation } from "../monitor/monitor.js";
 import type { Signal } from "../monitor/signal.js";
 import { scatter } from "../numerics/noise.js";
 import { sameDimension } from "../quantity/dimension.js";
-import { combined } from "../quantity/quantity.js";
+import { combined, type Quantity } from "../quantity/quantity.js";
+import type { Fact } from "../study/fact.js";
 import type { EndPoint, Follow, Run } from "../study/run.js";
 import { exact, plusTimes, type Stoichiometry, standardUncertainty, type Uncertain } from "./stoichiometry.js";
 
 /** The signal at time zero or at infinity, as a fit takes it; SI. */
 export type ResolvedEnd =
   | { readonly kind: "free"; readonly low: number; readonly high: number }
+  | {
+      readonly kind: "measured";
+      readonly low: number;
+      readonly high: number;
+      readonly value: number;
+      readonly u: number | null;
+    }
   | { readonly kind: "fixed"; readonly value: Uncertain };
 
 export interface EndContext {
@@ -21,10 +29,12 @@ export interface EndContext {
   readonly stoichiometry: Stoichiometry;
 }
 
-/** The start: free unless said; fixed at its stated value, else at what was taken. */
+/** The start: free unless said; fixed at its stated value, else at the stated reading, else at what was taken. */
 export function resolveStart(context: EndContext, wish: EndPoint): ResolvedEnd | Problem {
   if (wish.kind !== "fixed") return { kind: "free", low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
-  if (wish.value !== null) return statedEnd(context, "start", wish);
+  if (wish.value !== null) return statedEnd(context, "start", wish.value, wish.origin, false);
+  const reading = context.follow.readingAtStart;
+  if (reading !== null) return statedEnd(context, "start", reading.value, reading.origin, true);
   const { follow, stoichiometry } = context;
   const initial = stoichiometry.initial.get(follow.species.key);
   if (initial !== undefined) return { kind: "fixed", value: signalOf(context, initial) };
@@ -39,8 +49,15 @@ export function resolveStart(context: EndContext, wish: EndPoint): ResolvedEnd |
 export function resolveInfinity(context: EndContext, wish: EndPoint): ResolvedEnd | Problem {
   const { run, follow, stoichiometry } = context;
   const exhausted = stoichiometry.limiting === follow.species.key && run.reaction?.reversible === false;
+  const reading = follow.readingAtInfinity;
+  if (wish.kind === "measured" || (wish.kind === "default" && reading !== null)) {
+    if (reading !== null) return measuredEnd(context, reading);
+    const origin = wish.kind === "measured" ? wish.origin : follow.origin;
+    return unknownEnd(context, "infinity", origin, "no reading at infinity is stated");
+  }
   if (wish.kind === "fixed") {
-    if (wish.value !== null) return statedEnd(context, "infinity", wish);
+    if (wish.value !== null) return statedEnd(context, "infinity", wish.value, wish.origin, false);
+    if (reading !== null) return statedEnd(context, "infinity", reading.value, reading.origin, true);
     if (run.reaction?.reversible === true) {
       return unknownEnd(context, "infinity", wish.origin, "the reaction goes back, so it does not come to a full end");
     }
@@ -95,18 +112,49 @@ function signalOf({ relation }: EndContext, concentration: Uncertain): Uncertain
 }
 
 function statedEnd(
+  context: EndContext,
+  end: "start" | "infinity",
+  quantity: Quantity,
+  origin: Problem["origin"],
+  /** as the instrument shows it, the blank in it */
+  raw: boolean,
+): ResolvedEnd | Problem {
+  const wrong = wrongUnit(context, end, quantity, origin);
+  if (wrong !== null) return wrong;
+  const u = combined(quantity.sources);
+  const stated: Uncertain = { value: quantity.value, causes: new Map(u === null ? [] : [[`${end} stated`, u]]) };
+  return { kind: "fixed", value: raw ? plusTimes(stated, -1, blankOf(context)) : stated };
+}
+
+/** A reading at infinity counts as an observation with its uncertainty; without one, as one reading more. */
+function measuredEnd(context: EndContext, { value: quantity, origin }: Fact<Quantity>): ResolvedEnd | Problem {
+  const wrong = wrongUnit(context, "infinity", quantity, origin);
+  if (wrong !== null) return wrong;
+  const anywhere = { low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
+  return {
+    kind: "measured",
+    ...anywhere,
+    value: quantity.value - blankOf(context).value,
+    u: combined(quantity.sources),
+  };
+}
+
+/** What the instrument shows without reaction: it is in stated readings as it is in the column. */
+function blankOf({ follow }: EndContext): Uncertain {
+  const blank = follow.blank?.value;
+  const u = blank === undefined ? null : combined(blank.sources);
+  return { value: blank?.value ?? 0, causes: new Map(u === null ? [] : [["blank", u]]) };
+}
+
+function wrongUnit(
   { follow, signal }: EndContext,
   end: "start" | "infinity",
-  wish: EndPoint & { kind: "fixed" },
-): ResolvedEnd | Problem {
-  const quantity = wish.value;
-  if (quantity === null) return { kind: "fixed", value: exact(0) };
-  if (!sameDimension(quantity.unit.dimension, signal.unit.dimension)) {
-    const args = { end, unit: quantity.unit.text, column: follow.column, columnUnit: signal.unit.text };
-    return problem("fit-end-wrong-unit", args, wish.origin);
-  }
-  const u = combined(quantity.sources);
-  return { kind: "fixed", value: { value: quantity.value, causes: new Map(u === null ? [] : [[`${end} stated`, u]]) } };
+  quantity: Quantity,
+  origin: Problem["origin"],
+): Problem | null {
+  if (sameDimension(quantity.unit.dimension, signal.unit.dimension)) return null;
+  const args = { end, unit: quantity.unit.text, column: follow.column, columnUnit: signal.unit.text };
+  return problem("fit-end-wrong-unit", args, origin);
 }
 
 function unknownEnd(

@@ -31,7 +31,7 @@ export function estimatesOf(result: FirstOrderFit, stopped: () => boolean): Esti
 }
 
 function estimateOf(
-  { fit, model, start, infinity, used, common }: FirstOrderFit,
+  { fit, model, start, infinity, used, observed, common }: FirstOrderFit,
   index: 0 | 1 | 2,
   variance: number | null,
   quantile: number | null,
@@ -49,12 +49,12 @@ function estimateOf(
   const uCommon = common.size === 0 ? null : rootOfSquares([...common.values()].map((shift) => shift[index]));
   const base = { value, uRandom, uCommon, fixed: false, bound: fit.bound[index] ?? null };
   if (uRandom === null || quantile === null) return { ...base, randomInterval: null, by: null };
-  if (infinity.kind === "fixed") {
+  if (infinity.kind !== "free") {
     const half = quantile * uRandom;
     return { ...base, randomInterval: [value - half, value + half], by: "t" };
   }
   const scale = used.weights === null ? "scaled" : "absolute";
   const options = { tSquared: quantile * quantile, scale, stopped } as const;
-  const { low, high } = profileInterval(used.value, used.weights, model, fit, index, options);
+  const { low, high } = profileInterval(observed.value, observed.weights, model, fit, index, options);
   return { ...base, randomInterval: low === null || high === null ? null : [low, high], by: "profile" };
 }

@@ -1,6 +1,7 @@
 import type { Problem } from "../contract/problem.js";
 import { firstOrderModel } from "../law/firstOrder.js";
 import { fitLeastSquares, type LeastSquaresFit, type SeparableModel, sensitivities } from "../numerics/leastSquares.js";
+import { scatter } from "../numerics/noise.js";
 import type { FitWish } from "../study/run.js";
 import { type EndContext, isProblem, type ResolvedEnd, resolveInfinity, resolveStart } from "./endPoints.js";
 import { type FitData, refuseAfter, refuseBefore, refuseBeyond } from "./fitRefusals.js";
@@ -13,6 +14,8 @@ export interface FirstOrderFit {
   readonly start: ResolvedEnd;
   readonly infinity: ResolvedEnd;
   readonly used: UsedReadings;
+  /** what was fitted: the readings used, and behind them the reading at infinity where one was measured */
+  readonly observed: Observed;
   /** shift of start, infinity and k′ when a common cause is off by one standard uncertainty, by cause */
   readonly common: ReadonlyMap<string, readonly [number, number, number]>;
 }
@@ -25,6 +28,12 @@ export interface UsedReadings {
   readonly weights: Float64Array | null;
   /** index of each in the signal */
   readonly indices: readonly number[];
+}
+
+/** Observations of a fit and their weights, SI. */
+export interface Observed {
+  readonly value: Float64Array;
+  readonly weights: Float64Array | null;
 }
 
 /** Fits order 1 to the signal of a follow line. A refusal is a result; a problem means that a line has to be mended. */
@@ -41,19 +50,42 @@ export function fitFirstOrder(
   const number = context.run.reaction?.numbers.get(context.follow.species.key) ?? 0;
   const data: FitData = {
     ...used,
-    wanted: 1 + (start.kind === "free" ? 1 : 0) + (infinity.kind === "free" ? 1 : 0),
+    wanted: 1 + (start.kind === "free" ? 1 : 0) + (infinity.kind === "fixed" ? 0 : 1),
     fixedStart: start.kind === "fixed" ? start.value.value : null,
     species: context.follow.species.key,
     direction: Math.sign(number * context.relation.slope),
   };
   const before = refuseBefore(data);
   if (before !== null) return { refused: before, used };
-  const model = firstOrderModel(used.time, parameterOf("start", start), parameterOf("infinity", infinity));
-  const fit = fitLeastSquares(used.value, used.weights, model, { stopped });
+  const measured = infinity.kind === "measured";
+  const model = firstOrderModel(used.time, parameterOf("start", start), parameterOf("infinity", infinity), measured);
+  const observed = observedOf(context, used, infinity);
+  const fit = fitLeastSquares(observed.value, observed.weights, model, { stopped });
   const after = refuseAfter(data, fit, fit.values[0] ?? 0, fit.values[1] ?? 0);
   const beyond = after ?? (fit.bound[1] === null ? null : refuseBeyond(data, fit, unbounded(used, start, stopped)));
   if (beyond !== null) return { refused: beyond, used };
-  return { fit, model, start, infinity, used, common: commonShifts(context, used, model, fit, start, infinity) };
+  const common = commonShifts(context, used, observed, model, fit, start, infinity);
+  return { fit, model, start, infinity, used, observed, common };
+}
+
+/**
+ * The readings, and a measured infinity as one observation more with its own uncertainty; where the readings state none
+ * the scatter of the readings stands for theirs, and an infinity without one weighs as one reading.
+ */
+function observedOf({ signal }: EndContext, used: UsedReadings, infinity: ResolvedEnd): Observed {
+  if (infinity.kind !== "measured") return used;
+  const n = used.value.length;
+  const value = new Float64Array(n + 1);
+  value.set(used.value);
+  value[n] = infinity.value;
+  const weights = new Float64Array(n + 1).fill(1);
+  if (used.weights !== null) weights.set(used.weights);
+  const typical = used.weights === null ? scatter(signal.time, signal.value) : null;
+  const mean = used.weights === null ? 1 : used.weights.reduce((sum, w) => sum + w, 0) / Math.max(1, n);
+  if (infinity.u === null || infinity.u === 0) weights[n] = mean;
+  else if (used.weights !== null) weights[n] = 1 / (infinity.u * infinity.u);
+  else weights[n] = typical === null ? 1 : (typical * typical) / (infinity.u * infinity.u);
+  return { value, weights };
 }
 
 /** The same fit with nothing known of the infinity. */
@@ -97,47 +129,57 @@ function parameterOf(name: string, end: ResolvedEnd) {
 function commonShifts(
   { signal }: EndContext,
   used: UsedReadings,
+  observed: Observed,
   model: SeparableModel,
   fit: LeastSquaresFit,
   start: ResolvedEnd,
   infinity: ResolvedEnd,
 ): ReadonlyMap<string, readonly [number, number, number]> {
-  const n = used.time.length;
-  const observed = new Map<string, Float64Array>();
+  const n = observed.value.length;
+  const shifts = new Map<string, Float64Array>();
   const own = new Map<string, [number, number, number]>();
   const shiftOf = (name: string): Float64Array => {
-    const known = observed.get(name) ?? new Float64Array(n);
-    observed.set(name, known);
+    const known = shifts.get(name) ?? new Float64Array(n);
+    shifts.set(name, known);
     return known;
   };
-  for (const { name, shift } of signal.common) {
+  const add = (name: string, i: number, size: number): void => {
     const total = shiftOf(name);
-    used.indices.forEach((index, i) => {
-      total[i] = (total[i] as number) + (shift[index] as number);
-    });
+    total[i] = (total[i] as number) + size;
+  };
+  for (const { name, shift, of } of signal.common) {
+    for (const [i, index] of used.indices.entries()) add(name, i, shift[index] as number);
+    if (n > used.indices.length) add(name, n - 1, of(observed.value[n - 1] as number));
   }
-  const basis = [new Float64Array(n), new Float64Array(n)];
-  model.evaluate(Float64Array.of(fit.values[2] ?? 0), basis, null);
+  const basis = [new Float64Array(n), new Float64Array(n)] as const;
+  const slopes = [new Float64Array(n), new Float64Array(n)] as const;
+  const rate = fit.values[2] ?? 0;
+  model.evaluate(Float64Array.of(rate), basis, [slopes]);
+  if (signal.uTimeZero !== null) {
+    // Where the reaction began later, every reading is that of an earlier time: the slope of the curve times u.
+    const change = (fit.values[1] ?? 0) - (fit.values[0] ?? 0);
+    for (const i of used.indices.keys())
+      add("time zero", i, change * rate * (basis[0][i] as number) * signal.uTimeZero);
+  }
   [start, infinity].forEach((end, which) => {
     if (end.kind !== "fixed") return;
     for (const [name, size] of end.value.causes) {
-      const total = shiftOf(name);
       const column = basis[which] as Float64Array;
-      for (let i = 0; i < n; i++) total[i] = (total[i] as number) - size * (column[i] as number);
+      for (let i = 0; i < n; i++) add(name, i, -size * (column[i] as number));
       const direct = own.get(name) ?? [0, 0, 0];
       direct[which] = (direct[which] ?? 0) + size;
       own.set(name, direct);
     }
   });
-  const names = [...observed.keys()];
-  const moved = sensitivities(fit, used.weights, [...observed.values()]);
+  const names = [...shifts.keys()];
+  const moved = sensitivities(fit, observed.weights, [...shifts.values()]);
   return new Map(
     names.map((name, which) => {
-      const shifts: [number, number, number] = [...(own.get(name) ?? ([0, 0, 0] as const))];
+      const result: [number, number, number] = [...(own.get(name) ?? ([0, 0, 0] as const))];
       fit.free.forEach((parameter, place) => {
-        shifts[parameter] = (shifts[parameter] ?? 0) + (moved[which]?.[place] ?? 0);
+        result[parameter] = (result[parameter] ?? 0) + (moved[which]?.[place] ?? 0);
       });
-      return [name, shifts] as const;
+      return [name, result] as const;
     }),
   );
 }

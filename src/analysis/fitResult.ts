@@ -1,5 +1,6 @@
 import type { Run } from "../contract/findings.js";
 import type { Origin } from "../contract/problem.js";
+import type { Species } from "../study/reaction.js";
 import type { FitWish, Follow } from "../study/run.js";
 
 export type FitFinding = Run["fits"][number];
@@ -10,8 +11,8 @@ export function emptyFit(wish: FitWish, follow: Follow, place: (origin: Origin) 
     id: wish.id,
     place: place(wish.origin),
     problems: [],
-    law: `order ${wish.order} in ${wish.species.key}`,
-    orders: [{ species: wish.species.key, value: wish.order, u: null, fixed: true }],
+    law: wish.lawText,
+    orders: ordersOf(wish),
     follow: follow.id,
     on: "signal",
     weights: "constant",
@@ -35,6 +36,21 @@ export function emptyFit(wish: FitWish, follow: Follow, place: (origin: Origin) 
     stop: "refused",
     verdict: "",
   };
+}
+
+/** The orders that the line fixes; a free one has no value before it is fitted. */
+function ordersOf({ law }: FitWish): FitFinding["orders"] {
+  if (law.kind !== "orders") return [];
+  return law.orders.flatMap(({ order, species }) =>
+    order === "free" ? [] : [{ species: species.key, value: order, u: null, fixed: true }],
+  );
+}
+
+/** The species of a plain first-order law; null for any other law, which is kept but not computed yet. */
+export function firstOrderIn({ law, reversible }: FitWish): Species | null {
+  if (law.kind !== "orders" || law.joined !== "alone" || reversible !== null) return null;
+  const [only] = law.orders;
+  return only?.order === 1 ? only.species : null;
 }
 
 /** Why a fit gives no rate constant, and what to do. */

@@ -1,12 +1,13 @@
 import { problem } from "../contract/problem.js";
+import type { Species } from "../study/reaction.js";
 import type { FitWish, Follow, Run } from "../study/run.js";
 import { curveOf, residualCurve } from "./curves.js";
 import type { EndContext } from "./endPoints.js";
 import { fitFirstOrder, type UsedReadings } from "./fitFirstOrder.js";
-import { emptyFit, type FitFinding, type Refusal } from "./fitResult.js";
+import { emptyFit, type FitFinding, firstOrderIn, type Refusal } from "./fitResult.js";
 import { judgeFit } from "./judgeFit.js";
 import { type Notes, note } from "./notes.js";
-import { lineIn, type RunInput } from "./runInput.js";
+import { isOf, lineIn, type RunInput } from "./runInput.js";
 import { resultUnits, shown } from "./shown.js";
 
 /** A fit as findings show it, and the change of the signal over the whole reaction that it found (SI). */
@@ -23,19 +24,29 @@ export function fitsOf(
   input: RunInput,
   notes: Notes,
 ): FitOutcome[] {
-  return run.fits.map((wish) => {
-    const empty = emptyFit(wish, follow, input.place);
-    if (wish.order !== 1) return without({ ...empty, verdict: "This law is kept; not computed yet." });
-    if (context === null) return without({ ...empty, verdict: "No rate constant: there is no signal to fit." });
-    return fitOf(wish, context, empty, input, notes);
-  });
+  return run.fits
+    .filter((wish) => isOf(run, follow, wish))
+    .map((wish) => {
+      const empty = emptyFit(wish, follow, input.place);
+      const species = firstOrderIn(wish);
+      if (species === null) return without({ ...empty, verdict: "This law is kept; not computed yet." });
+      if (context === null) return without({ ...empty, verdict: "No rate constant: there is no signal to fit." });
+      return fitOf(wish, species, context, empty, input, notes);
+    });
 }
 
 function without(finding: FitFinding): FitOutcome {
   return { finding, change: null };
 }
 
-function fitOf(wish: FitWish, context: EndContext, empty: FitFinding, input: RunInput, notes: Notes): FitOutcome {
+function fitOf(
+  wish: FitWish,
+  species: Species,
+  context: EndContext,
+  empty: FitFinding,
+  input: RunInput,
+  notes: Notes,
+): FitOutcome {
   const { run, signal } = context;
   const result = fitFirstOrder(context, wish, input.stopped);
   const started = { ...empty, ...usedFinding(context, result.used) };
@@ -45,7 +56,7 @@ function fitOf(wish: FitWish, context: EndContext, empty: FitFinding, input: Run
   }
   if ("refused" in result) return refuse(run, wish, started, result.refused, notes);
   const units = resultUnits(run, signal.timeUnit, signal.unit);
-  const judged = judgeFit(context, wish, result, started, units, notes, input.stopped);
+  const judged = judgeFit(context, wish, species, result, started, units, notes, input.stopped);
   if ("reason" in judged) return refuse(run, wish, started, judged, notes);
   const { estimates, finding } = judged;
   const change = estimates.infinity.value - estimates.start.value;

@@ -3,6 +3,7 @@ import { halfLife } from "../law/firstOrder.js";
 import { expm1, log } from "../numerics/elementary.js";
 import { fromSI } from "../quantity/conversion.js";
 import { formatNumber, formatQuantity } from "../quantity/formatNumber.js";
+import type { Species } from "../study/reaction.js";
 import type { FitWish } from "../study/run.js";
 import type { EndContext } from "./endPoints.js";
 import { type Estimates, estimatesOf } from "./estimates.js";
@@ -19,6 +20,7 @@ import { type ResultUnits, rateConstantUnit, shown } from "./shown.js";
 export function judgeFit(
   context: EndContext,
   wish: FitWish,
+  species: Species,
   result: FirstOrderFit,
   empty: FitFinding,
   units: ResultUnits,
@@ -30,7 +32,7 @@ export function judgeFit(
   const undetermined = refuseUndetermined(estimates.kPrime.value, estimates.kPrime.uRandom);
   if (undetermined !== null) return undetermined;
   const { signal } = context;
-  const number = Math.abs(context.run.reaction?.numbers.get(wish.species.key) ?? 1);
+  const number = Math.abs(context.run.reaction?.numbers.get(species.key) ?? 1);
   const kUnit = rateConstantUnit(1, units);
   const k = shownParameter(scaled(estimates.kPrime, 1 / number), "rate constant", kUnit);
   const kPrime = estimates.kPrime.value;
@@ -50,7 +52,7 @@ export function judgeFit(
     budget: budgetOf(result, estimates),
     halfLife: {
       ...shown(life, u === null ? null : (life * u) / kPrime, signal.timeUnit),
-      species: wish.species.key,
+      species: species.key,
     },
     conversion: -expm1(-kPrime * last),
     ...residualFindings(result, signal.unit),

@@ -5,11 +5,11 @@ import { type LocalFit, localSlope } from "../numerics/localRegression.js";
 import { scatter } from "../numerics/noise.js";
 import { fromSI } from "../quantity/conversion.js";
 import { formatQuantity } from "../quantity/formatNumber.js";
-import type { RateWish, Run } from "../study/run.js";
+import type { Follow, RateWish, Run } from "../study/run.js";
 import type { EndContext } from "./endPoints.js";
 import { type Notes, note } from "./notes.js";
 import { rootOfSquares } from "./parameter.js";
-import { lineIn, type RunInput } from "./runInput.js";
+import { isOf, lineIn, type RunInput } from "./runInput.js";
 import { perTime, type ResultUnits, resultUnits, shown, shownQuantity } from "./shown.js";
 
 export type RateFinding = RunFinding["rates"][number];
@@ -31,13 +31,15 @@ interface Slope {
 /** The rates that a run wants of one signal, in the order of the text. */
 export function ratesOf(
   run: Run,
+  followed: Follow,
   context: EndContext | null,
   /** change of the signal over the whole reaction as a fit found it, SI */
   fittedChange: number | null,
   input: RunInput,
   notes: Notes,
 ): RateFinding[] {
-  const empty = run.rates.map((wish) => emptyRate(wish, input));
+  const wishes = run.rates.filter((wish) => isOf(run, followed, wish));
+  const empty = wishes.map((wish) => emptyRate(wish, input));
   if (context === null) return empty;
   const { signal, relation, follow, stoichiometry } = context;
   const number = run.reaction?.numbers.get(follow.species.key) ?? 0;
@@ -49,7 +51,7 @@ export function ratesOf(
     stopped: input.stopped,
     wholeChange: fittedChange ?? (byAmounts === null ? null : number * byAmounts.value * relation.slope),
   };
-  return run.rates.map((wish, index) => rateOf(work, wish, empty[index] ?? emptyRate(wish, input)));
+  return wishes.map((wish, index) => rateOf(work, wish, empty[index] ?? emptyRate(wish, input)));
 }
 
 function emptyRate(wish: RateWish, { place }: RunInput): RateFinding {

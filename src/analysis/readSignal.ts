@@ -5,7 +5,7 @@ import type { CommonCause, Signal } from "../monitor/signal.js";
 import { fromSI, intervalToSI, toSI } from "../quantity/conversion.js";
 import { sameDimension } from "../quantity/dimension.js";
 import { isKind, kinds } from "../quantity/kinds.js";
-import type { Quantity } from "../quantity/quantity.js";
+import { combined, type Quantity } from "../quantity/quantity.js";
 import type { Unit } from "../quantity/unit.js";
 import type { Fact } from "../study/fact.js";
 import type { ColumnFact, Follow, Run } from "../study/run.js";
@@ -35,13 +35,20 @@ export function readSignal(run: Run, follow: Follow, file: Columns, notes: Notes
     return null;
   }
   if (!sayWhatIsWrong(run, follow, file, time, readings, notes)) return null;
-  const rows = usableRows(time.values, readings.values);
-  const value = Float64Array.from(rows, (row) => toSI(readings.values[row] ?? 0, readings.unit as Unit));
+  const left = excludedRows(run, file, time);
+  const rows = usableRows(time.values, readings.values, left);
+  const zero = run.data.timeZero;
+  const blank = blankOf(follow, readings.unit, notes);
+  const value = Float64Array.from(
+    rows,
+    (row) => toSI(readings.values[row] ?? 0, readings.unit as Unit) - (blank?.value ?? 0),
+  );
   const signal: Signal = {
-    time: Float64Array.from(rows, (row) => toSI(time.values[row] ?? 0, time.unit as Unit)),
+    time: Float64Array.from(rows, (row) => toSI(time.values[row] ?? 0, time.unit as Unit) - (zero?.value.value ?? 0)),
+    uTimeZero: zero === null ? null : combined(zero.value.sources),
     value,
     random: randomOf(follow, readings, value, notes),
-    common: commonOf(follow, readings, value, notes),
+    common: [...commonOf(follow, readings, value, notes), ...blankCause(blank, value.length)],
     timeUnit: time.unit as Unit,
     unit: readings.unit,
     rows,
@@ -95,8 +102,24 @@ function sayWhatIsWrong(
   });
 }
 
+/** Rows that the description leaves out, by the line of the file or by a span of its times. */
+function excludedRows(run: Run, file: Columns, time: FoundColumn): ReadonlySet<number> {
+  const rows = new Set<number>();
+  for (const { value } of run.data?.exclusions ?? []) {
+    for (let row = 0; row < file.rows; row++) {
+      if ("line" in value) {
+        if (file.lines[row] === value.line) rows.add(row);
+        continue;
+      }
+      const t = toSI(time.values[row] as number, time.unit as Unit);
+      if (t >= value.from.value && t <= value.to.value) rows.add(row);
+    }
+  }
+  return rows;
+}
+
 /** Rows with both a time and a reading, down to the first that goes back in time: what follows may be another run. */
-function usableRows(time: Float64Array, readings: Float64Array): Uint32Array {
+function usableRows(time: Float64Array, readings: Float64Array, excluded: ReadonlySet<number>): Uint32Array {
   const rows: number[] = [];
   let before = Number.NEGATIVE_INFINITY;
   for (let row = 0; row < time.length; row++) {
@@ -104,7 +127,7 @@ function usableRows(time: Float64Array, readings: Float64Array): Uint32Array {
     if (Number.isNaN(t)) continue;
     if (t < before) break;
     before = t;
-    if (!Number.isNaN(readings[row] as number)) rows.push(row);
+    if (!Number.isNaN(readings[row] as number) && !excluded.has(row)) rows.push(row);
   }
   return Uint32Array.from(rows);
 }
@@ -123,6 +146,21 @@ function randomOf(follow: Follow, readings: FoundColumn, value: Float64Array, no
   return value.map((reading) => Math.abs(reading) * size.u);
 }
 
+/** The blank, where it is in a unit that can be taken off the readings. */
+function blankOf(follow: Follow, unit: Unit, notes: Notes): Quantity | null {
+  if (follow.blank === null) return null;
+  const { value, origin } = follow.blank;
+  if (sameDimension(value.unit.dimension, unit.dimension)) return value;
+  const args = { end: "blank", unit: value.unit.text, column: follow.column, columnUnit: unit.text };
+  note(notes, follow.id, problem("fit-end-wrong-unit", args, origin));
+  return null;
+}
+
+function blankCause(blank: Quantity | null, length: number): CommonCause[] {
+  const u = blank === null ? null : combined(blank.sources);
+  return u === null ? [] : [{ name: "blank", shift: new Float64Array(length).fill(-u), of: () => -u }];
+}
+
 function commonOf(follow: Follow, readings: FoundColumn, value: Float64Array, notes: Notes): CommonCause[] {
   const { common } = readings.fact;
   if (common === null || common.value.value === 0) return [];
@@ -130,9 +168,11 @@ function commonOf(follow: Follow, readings: FoundColumn, value: Float64Array, no
   if (size === null) return [];
   const column = readings.fact.name;
   if (size.kind === "offset") {
-    return [{ name: `offset of ${column}`, shift: new Float64Array(value.length).fill(size.u) }];
+    const shift = new Float64Array(value.length).fill(size.u);
+    return [{ name: `offset of ${column}`, shift, of: () => size.u }];
   }
-  return [{ name: `scale of ${column}`, shift: value.map((reading) => reading * size.u) }];
+  const of = (reading: number): number => reading * size.u;
+  return [{ name: `scale of ${column}`, shift: value.map(of), of }];
 }
 
 type Size = { readonly kind: "offset" | "share"; readonly u: number };

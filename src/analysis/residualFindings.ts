@@ -10,13 +10,15 @@ type ResidualFindings = Pick<FitFinding, "residual" | "reducedChiSquare" | "aicc
 /** What the residuals of a fit say: how large they are, and whether they look like chance. */
 export function residualFindings({ fit, used }: FirstOrderFit, unit: Unit): ResidualFindings {
   const { weights } = used;
-  const { degreesOfFreedom: left, residuals } = fit;
+  const { degreesOfFreedom: left } = fit;
+  // A measured infinity stands behind the readings and is none of their sequence.
+  const residuals = fit.residuals.subarray(0, used.value.length);
   const squares = residuals.reduce((sum, residual) => sum + residual * residual, 0);
   const standardised = weights === null ? residuals : residuals.map((r, i) => r * Math.sqrt(weights[i] ?? 1));
   return {
     residual: left > 0 ? shown(Math.sqrt(squares / left), null, unit) : null,
     reducedChiSquare: weights === null || left <= 0 ? null : fit.chiSquare / left,
-    aicc: correctedAkaike(fit.chiSquare, residuals.length, fit.free.length, weights !== null),
+    aicc: correctedAkaike(fit.chiSquare, fit.residuals.length, fit.free.length, weights !== null),
     tests: residualTests(standardised),
     correlation: lagOneCorrelation(standardised),
   };

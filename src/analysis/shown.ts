@@ -16,6 +16,12 @@ export function shown(value: number, u: number | null, unit: Unit): Q {
   return { value: inUnit, u: uInUnit, unit: unit.text, text: formatQuantity(inUnit, uInUnit, unit.text) };
 }
 
+/** A difference or an uncertainty, SI, in `unit`: the zero point of °C plays no part. */
+export function shownDifference(difference: number, unit: Unit): Q {
+  const value = intervalFromSI(difference, unit);
+  return { value, u: null, unit: unit.text, text: formatQuantity(value, null, unit.text) };
+}
+
 /** A quantity of the description in the unit it was written in. */
 export function shownQuantity(quantity: Quantity): Q {
   return shown(quantity.value, combined(quantity.sources), quantity.unit);
@@ -30,10 +36,12 @@ export interface ResultUnits {
 }
 
 /**
- * Time in the unit of the time column; concentration in the unit of the first `taken` line that is a concentration, else
+ * Those of the `results in` line; else time in the unit of the time column, and concentration in the unit of the first `taken` line that is a concentration, else
  * of the signal where that is one, else mol/L.
  */
 export function resultUnits(run: Run, time: Unit, signal: Unit): ResultUnits {
+  if (run.resultsIn !== null)
+    return { ...run.resultsIn, rate: perTime(run.resultsIn.concentration, run.resultsIn.time) };
   const taken = run.taken.find(({ given }) => isKind(given.unit, "concentration"));
   const concentration = taken?.given.unit ?? (isKind(signal, "concentration") ? signal : moleOnLitre);
   return { time, concentration, rate: perTime(concentration, time) };

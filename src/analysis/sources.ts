@@ -1,6 +1,7 @@
 import type { Run } from "../contract/findings.js";
+import { combined } from "../quantity/quantity.js";
 import type { EndContext } from "./endPoints.js";
-import { shownQuantity } from "./shown.js";
+import { shownDifference, shownQuantity } from "./shown.js";
 
 type FollowSource = Run["follow"][number]["sources"][number];
 
@@ -12,7 +13,13 @@ export function sourcesOf({ run, follow, signal }: EndContext): FollowSource[] {
     sources.push({ name: `readings of ${follow.column}`, kind: "random", u: shownQuantity(fact.random.value) });
   }
   for (const { name } of signal.common) {
+    if (name === "blank") continue;
     if (fact?.common) sources.push({ name, kind: "common", u: shownQuantity(fact.common.value) });
+  }
+  const blank = follow.blank?.value;
+  const uBlank = blank === undefined ? null : combined(blank.sources);
+  if (blank !== undefined && uBlank !== null) {
+    sources.push({ name: "blank", kind: "common", u: shownDifference(uBlank, blank.unit) });
   }
   return sources;
 }

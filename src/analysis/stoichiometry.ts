@@ -1,5 +1,5 @@
 import { ionsOf } from "../chemistry/handbook/dissociation.js";
-import { molarMass } from "../chemistry/molarMass.js";
+import { molarMassOf } from "../monitor/molarMassOf.js";
 import { isKind } from "../quantity/kinds.js";
 import { combined } from "../quantity/quantity.js";
 import type { Run, Taken } from "../study/run.js";
@@ -45,7 +45,7 @@ export function takenConcentration(run: Run, taken: Taken): Uncertain | null {
 }
 
 function amountOfMass(mass: Uncertain, { species }: Taken): Uncertain | null {
-  const molar = species.formula === null ? null : molarMass(species.formula);
+  const molar = molarMassOf(species);
   if (molar === null) return null;
   const value = mass.value / molar.value;
   const causes = new Map([...mass.causes].map(([cause, shift]) => [cause, shift / molar.value] as const));

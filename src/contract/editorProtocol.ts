@@ -10,6 +10,8 @@ export interface InitializationOptions {
   readonly theme: ThemeKind;
   /** whether the workspace is trusted; in one that is not, data files must stay in the opened folder */
   readonly trusted: boolean;
+  /** URI of the folder with the pages of codes and of the language, without a slash at its end */
+  readonly docs: string;
 }
 
 /** Notification from the client: the theme changed. */

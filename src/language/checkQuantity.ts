@@ -8,6 +8,7 @@ export interface WrittenQuantity {
   readonly quantity: Quantity;
   readonly number: Span;
   readonly unit: Span | null;
+  readonly basis: "mass" | "amount" | "volume" | null;
 }
 
 /** Units that say a share of a mixture, but not of what. */
@@ -20,7 +21,12 @@ export function checkQuantity(written: WrittenQuantity, text: string, kind: Quan
   if (dimensions !== null) {
     const span = written.unit ?? written.number;
     const shown = written.unit === null ? undefined : text.slice(written.unit.start, written.unit.end);
-    if (kind === "taken" && shown !== undefined && sharesOfMixture.has(quantity.unit.text)) {
+    if (
+      (kind === "taken" || kind === "stock") &&
+      written.basis === null &&
+      shown !== undefined &&
+      sharesOfMixture.has(quantity.unit.text)
+    ) {
       return fault(
         "share-of-what",
         { share: `${text.slice(written.number.start, written.number.end)} ${shown}` },

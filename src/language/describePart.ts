@@ -1,3 +1,4 @@
+import { quantityKinds } from "./quantityKinds.js";
 import type { Part } from "./shape.js";
 
 /** What the parts are, in words for a message: `“from” or “at”`. */
@@ -31,22 +32,22 @@ function describePart(part: Part): string {
     case "unit":
       return "a unit";
     case "quantity":
-      return quantityWords[part.kind];
+      return quantityKinds[part.kind].words;
+    case "charge":
+      return "a charge such as 2+";
+    case "run reference":
+      return "the name of a run or a path in quotes";
+    case "orders":
+      return "an order such as order 1 in A";
+    case "list":
+      return describePart(part.of);
     case "optional":
       return part.parts[0] === undefined ? "the end of the line" : describePart(part.parts[0]);
+    case "any":
     case "either":
       return describeParts(part.options.flatMap((option) => option.slice(0, 1)));
   }
 }
-
-const quantityWords = {
-  time: "a time with its unit, such as 60 s,",
-  volume: "a volume with its unit, such as 50.00 mL,",
-  temperature: "a temperature with its unit, such as 25.0 °C,",
-  taken: "a concentration, an amount or a mass with its unit, such as 0.100 mol/L,",
-  reading: "a reading with its unit, such as 0.100 mol/L,",
-  uncertainty: "an uncertainty with its unit, such as 0.002 mol/L or 1 %,",
-} as const;
 
 /** Fixed words that the parts can begin with. */
 export function firstWords(parts: readonly Part[]): string[] {
@@ -54,7 +55,10 @@ export function firstWords(parts: readonly Part[]): string[] {
     if (part.part === "keyword") return [part.word];
     if (part.part === "words") return [part.phrase];
     if (part.part === "optional") return firstWords(part.parts.slice(0, 1));
-    if (part.part === "either") return part.options.flatMap((option) => firstWords(option.slice(0, 1)));
+    if (part.part === "orders") return ["order"];
+    if (part.part === "list") return firstWords([part.of]);
+    if (part.part === "either" || part.part === "any")
+      return part.options.flatMap((option) => firstWords(option.slice(0, 1)));
     return [];
   });
 }

@@ -1,7 +1,7 @@
 import type { Origin, Span } from "../contract/problem.js";
 import type { Quantity } from "../quantity/quantity.js";
 import type { Unit } from "../quantity/unit.js";
-import type { Field, Statement } from "./syntax.js";
+import type { Field, OrderTerm, Statement } from "./syntax.js";
 
 /** The field a line holds under a label, or null where the line has none. */
 export function fieldOf(statement: Statement, label: string): Field | null {
@@ -22,6 +22,17 @@ export function numberOf(statement: Statement, label: string): number | null {
   return field?.kind === "number" ? field.value : null;
 }
 
+/** The items of a list, none where the line has no such list. */
+export function itemsOf(statement: Statement, label: string): readonly Field[] {
+  const field = fieldOf(statement, label);
+  return field?.kind === "list" ? field.items : [];
+}
+
+export function ordersOf(statement: Statement, label: string): readonly OrderTerm[] {
+  const field = fieldOf(statement, label);
+  return field?.kind === "orders" ? field.items : [];
+}
+
 export function unitOf(statement: Statement, label: string): Unit | null {
   const field = fieldOf(statement, label);
   return field?.kind === "unit" ? field.unit : null;
@@ -31,6 +42,11 @@ export function unitOf(statement: Statement, label: string): Unit | null {
 export function spanOf(statement: Statement, label?: string): Span {
   const span = (label === undefined ? null : fieldOf(statement, label)?.span) ?? statement.line.span;
   return { start: span.start + statement.offset, end: span.end + statement.offset };
+}
+
+/** Where a piece of a line stands in the text, from its place in the line. */
+export function originIn(uri: string, statement: Statement, span: Span): Origin {
+  return { uri, start: span.start + statement.offset, end: span.end + statement.offset };
 }
 
 export function originOf(uri: string, statement: Statement, label?: string): Origin {

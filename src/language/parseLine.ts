@@ -37,11 +37,11 @@ function readLine(text: string, meant: StatementRow | null = null): ParsedLine {
       break;
     }
     readParts(cursor, row.parts, row);
-    const end = cursor.fault === null ? cursor.at : endAfterFault(cursor);
+    const end = cursor.fault === null ? cursor.at : endAfterFault(cursor, row);
     const next = tokens[end];
-    if (cursor.fault === null && next !== undefined && !beginsLine(next)) leftOver(cursor, next, row);
+    if (cursor.fault === null && next !== undefined && !beginsLine(next, row)) leftOver(cursor, next, row);
     if (cursor.fault !== null && row.slips !== undefined) cursor.fault = slip(cursor, row, first) ?? cursor.fault;
-    const last = cursor.fault === null ? end : endAfterFault(cursor);
+    const last = cursor.fault === null ? end : endAfterFault(cursor, row);
     statements.push(statement(text, row, first, cursor, last));
     at = last;
   }
@@ -97,14 +97,17 @@ function leadingSpace(text: string): number {
 }
 
 /** After a fault the rest of the line is passed over, down to a word that begins a line of its own. */
-function endAfterFault(cursor: Cursor): number {
+function endAfterFault(cursor: Cursor, row: StatementRow): number {
   let at = Math.max(cursor.at, 1);
-  while (at < cursor.tokens.length && !beginsLine(cursor.tokens[at] as Token)) at++;
+  while (at < cursor.tokens.length && !beginsLine(cursor.tokens[at] as Token, row)) at++;
   return at;
 }
 
-function beginsLine(token: Token): boolean {
-  return token.kind === "word" && statementByHead.has(token.text);
+/** Whether a word begins a line that could stand behind one of `row`: beside it, below it, or as a header. */
+function beginsLine(token: Token, row: StatementRow): boolean {
+  const next = token.kind === "word" ? statementByHead.get(token.text) : undefined;
+  if (next === undefined) return false;
+  return next.owners.some((owner) => owner === "file" || owner === row.opens || row.owners.includes(owner));
 }
 
 function statement(text: string, row: StatementRow | null, first: Token, cursor: Cursor, end: number): LineStatement {

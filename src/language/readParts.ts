@@ -9,7 +9,7 @@ import { describeParts, firstWords } from "./describePart.js";
 import type { Token } from "./lexer.js";
 import type { Part } from "./shape.js";
 import { type StatementRow, statementByHead } from "./statements.js";
-import type { Field } from "./syntax.js";
+import type { Field, OrderTerm } from "./syntax.js";
 
 /** Where the reading of a line stands. */
 export interface Cursor {
@@ -38,6 +38,14 @@ function readPart(cursor: Cursor, part: Part, row: StatementRow): void {
     else if (part.parts[0] !== undefined) cursor.wanted.push(part.parts[0]);
     return;
   }
+  if (part.part === "any") {
+    readAny(cursor, part.options, row);
+    return;
+  }
+  if (part.part === "list") {
+    readList(cursor, part.label, part.of, row);
+    return;
+  }
   if (part.part === "either") {
     const option = part.options.find((candidate) => begins(cursor, candidate));
     if (option !== undefined) readParts(cursor, option, row);
@@ -52,6 +60,40 @@ function readPart(cursor: Cursor, part: Part, row: StatementRow): void {
   const from = cursor.at;
   readLeaf(cursor, part);
   if (cursor.at > from) cursor.before = textOf(cursor, from, cursor.at);
+}
+
+/** Options in any order; what is left of them could still come. */
+function readAny(cursor: Cursor, options: readonly (readonly Part[])[], row: StatementRow): void {
+  let left = [...options];
+  for (;;) {
+    const option = left.find((candidate) => begins(cursor, candidate));
+    if (option === undefined || cursor.fault !== null) break;
+    left = left.filter((candidate) => candidate !== option);
+    readParts(cursor, option, row);
+  }
+  cursor.wanted.push(...left.map((candidate) => candidate[0]).filter(isPart));
+}
+
+/** Items with commas between; each is read as the part says and kept in order. */
+function readList(cursor: Cursor, label: string, of: Part, row: StatementRow): void {
+  const first = cursor.tokens[cursor.at];
+  const items: Field[] = [];
+  const own = "label" in of ? of.label : label;
+  do {
+    readPart(cursor, of, row);
+    if (cursor.fault !== null) return;
+    const item = cursor.fields.get(own);
+    if (item !== undefined) items.push(item);
+    cursor.fields.delete(own);
+  } while (skipComma(cursor));
+  if (first !== undefined) keep(cursor, label, { kind: "list", items, ...slice(cursor, first, cursor.at) });
+}
+
+function skipComma(cursor: Cursor): boolean {
+  const token = cursor.tokens[cursor.at];
+  if (token?.kind !== "operator" || token.text !== ",") return false;
+  cursor.at++;
+  return true;
 }
 
 function isPart(part: Part | undefined): part is Part {
@@ -80,13 +122,28 @@ function fits(cursor: Cursor, part: Part, at: number): boolean {
       return token.kind !== "string";
     case "integer":
       return token.kind === "word" && /^\d+$/.test(token.text);
+    case "number":
+      return beginsNumber(token);
+    case "quantity":
+      return beginsNumber(token) || (token.text === "from" && cursor.tokens[at + 1]?.kind === "string");
     case "optional":
       return begins(cursor, part.parts);
     case "either":
+    case "any":
       return part.options.some((option) => begins(cursor, option));
+    case "list":
+      return fits(cursor, part.of, at);
+    case "orders":
+      return token.kind === "word" && token.text === "order";
+    case "run reference":
+      return token.kind === "word" || token.kind === "string";
     default:
       return token.kind === "word";
   }
+}
+
+function beginsNumber(token: Token): boolean {
+  return token.kind === "word" && /^[\d.,+−-]/.test(token.text);
 }
 
 function readLeaf(cursor: Cursor, part: Part): void {
@@ -129,12 +186,86 @@ function readLeaf(cursor: Cursor, part: Part): void {
       readUnitWords(cursor, part.label, token);
       return;
     case "quantity":
-      readQuantityWords(cursor, part, token);
+      if (token.text === "from" && cursor.tokens[cursor.at + 1]?.kind === "string") readFromHeader(cursor, part.label);
+      else readQuantityWords(cursor, part, token);
+      return;
+    case "orders":
+      readOrders(cursor, part.label);
+      return;
+    case "charge":
+      cursor.at++;
+      if (!/^\d*[+\-−]$/.test(token.text)) wantedButFound(cursor, [part], null, token);
+      keep(cursor, part.label, { kind: "text", text: token.text, span: token });
+      return;
+    case "run reference":
+      cursor.at++;
+      if (token.open) cursor.fault = fault("string-open", {}, token, [closeQuote(token)]);
+      keep(cursor, part.label, { kind: "text", text: token.text, span: token });
       return;
     default:
       cursor.at++;
       keep(cursor, (part as { label: string }).label, { kind: "text", text: token.text, span: token });
   }
+}
+
+/** `from "header"` in place of a quantity. */
+function readFromHeader(cursor: Cursor, label: string): void {
+  const first = cursor.tokens[cursor.at] as Token;
+  const header = cursor.tokens[cursor.at + 1] as Token;
+  cursor.at += 2;
+  if (header.open) cursor.fault = fault("string-open", {}, header, [closeQuote(header)]);
+  keep(cursor, label, { kind: "header", header: header.text, ...slice(cursor, first, cursor.at) });
+}
+
+/** `order 1 in A`, then more of them behind a comma, `, then` or `beside`. */
+function readOrders(cursor: Cursor, label: string): void {
+  const first = cursor.tokens[cursor.at] as Token;
+  const items: OrderTerm[] = [];
+  let joined: OrderTerm["joined"] | null = "first";
+  while (joined !== null) {
+    const before = cursor.fields.size;
+    readParts(cursor, orderParts, fitRow);
+    if (cursor.fault !== null) return;
+    const order = cursor.fields.get("order");
+    const species = cursor.fields.get("orderSpecies");
+    cursor.fields.delete("order");
+    cursor.fields.delete("orderSpecies");
+    if (cursor.fields.size !== before || order === undefined || species === undefined) return;
+    items.push({ joined, order: order.kind === "number" ? order.value : "free", species });
+    joined = readJoin(cursor);
+  }
+  keep(cursor, label, { kind: "orders", items, ...slice(cursor, first, cursor.at) });
+}
+
+const orderParts: readonly Part[] = [
+  { part: "keyword", word: "order" },
+  {
+    part: "either",
+    options: [
+      [{ part: "words", label: "order", phrase: "free" }],
+      [{ part: "number", label: "order", what: "the order, a number" }],
+    ],
+  },
+  { part: "keyword", word: "in" },
+  { part: "species", label: "orderSpecies" },
+];
+
+/** Only its example is used, where the line ends too early. */
+const fitRow = { example: "fit order 1 in H2O2" } as StatementRow;
+
+function readJoin(cursor: Cursor): OrderTerm["joined"] | null {
+  const token = cursor.tokens[cursor.at];
+  if (token?.kind === "word" && token.text === "beside") {
+    cursor.at++;
+    return "beside";
+  }
+  if (!skipComma(cursor)) {
+    cursor.wanted.push({ part: "keyword", word: "beside" });
+    return null;
+  }
+  if (cursor.tokens[cursor.at]?.text !== "then") return "and";
+  cursor.at++;
+  return "then";
 }
 
 const connectives = new Set(
@@ -155,8 +286,7 @@ function readName(cursor: Cursor, label: string, what: string, token: Token): vo
 function readPlainNumber(cursor: Cursor, label: string, token: Token, part: Part): void {
   const number = readNumber(token.text);
   if (isFault(number)) {
-    if (/^[\d.,+−-]/.test(token.text)) cursor.fault = shifted(number, token.start);
-    else wantedButFound(cursor, [part], null, token);
+    cursor.fault = shifted(number, token.start);
   } else if (number.end < token.text.length) {
     wantedButFound(cursor, [part], null, token);
   } else {
@@ -174,10 +304,6 @@ function readUnitWords(cursor: Cursor, label: string, token: Token): void {
 }
 
 function readQuantityWords(cursor: Cursor, part: Part & { part: "quantity" }, token: Token): void {
-  if (!/^[\d.+−-]/.test(token.text)) {
-    wantedButFound(cursor, [part], null, token);
-    return;
-  }
   const end = endOfWords(cursor, cursor.at);
   const written = slice(cursor, token, end);
   const reading = readQuantity(written.text, part.label);
@@ -189,7 +315,8 @@ function readQuantityWords(cursor: Cursor, part: Part & { part: "quantity" }, to
   const wrong = checkQuantity(reading, written.text, part.kind);
   if (wrong !== null) cursor.fault = shifted(wrong, token.start);
   const unitSpan = reading.unit === null ? null : moved(reading.unit, token.start);
-  keep(cursor, part.label, { kind: "quantity", quantity: reading.quantity, unitSpan, ...written });
+  const { quantity, basis } = reading;
+  keep(cursor, part.label, { kind: "quantity", quantity, unitSpan, basis, ...written });
 }
 
 /** Words that end a quantity or a unit. `within` does not: it belongs to the quantity. */
@@ -226,8 +353,20 @@ function wantedButFound(cursor: Cursor, parts: readonly Part[], row: StatementRo
 
 /** A fixed word that is near; a text put in quotes where one is wanted; a name taken out of its quotes. */
 function mendsOf(cursor: Cursor, wanted: readonly Part[], token: Token): Mend[] {
-  const [near] = token.kind === "word" ? nearest(token.text, firstWords(wanted)) : [];
-  if (near !== undefined) return [replacement(token, near)];
+  if (token.kind === "word") {
+    const phrases = firstWords(wanted);
+    for (const count of [2, 1]) {
+      const words = cursor.tokens.slice(cursor.at, cursor.at + count);
+      const end = words[count - 1];
+      if (words[0] !== token || end === undefined) continue;
+      const said = words.map(({ text }) => text).join(" ");
+      const [near] = nearest(
+        said,
+        phrases.filter((phrase) => phrase.split(" ").length === count),
+      );
+      if (near !== undefined) return [replacement({ start: token.start, end: end.end }, near)];
+    }
+  }
   const only = wanted.length === 1 ? wanted[0]?.part : undefined;
   if (only === "string" && token.kind === "word") {
     const last = cursor.tokens[cursor.tokens.length - 1] ?? token;

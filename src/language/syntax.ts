@@ -9,8 +9,25 @@ export type Field = { readonly text: string; readonly span: Span } & (
   | { readonly kind: "text" }
   | { readonly kind: "number"; readonly value: number }
   | { readonly kind: "unit"; readonly unit: Unit }
-  | { readonly kind: "quantity"; readonly quantity: Quantity; readonly unitSpan: Span | null }
+  | {
+      readonly kind: "quantity";
+      readonly quantity: Quantity;
+      readonly unitSpan: Span | null;
+      /** what a share is a share of: `30 % by mass` */
+      readonly basis: "mass" | "amount" | "volume" | null;
+    }
+  /** `from "header"`: the value stands in a column of a table of runs */
+  | { readonly kind: "header"; readonly header: string }
+  | { readonly kind: "list"; readonly items: readonly Field[] }
+  | { readonly kind: "orders"; readonly items: readonly OrderTerm[] }
 );
+
+/** One `order 1 in A` of a rate law, and how it is joined to the one before. */
+export interface OrderTerm {
+  readonly joined: "first" | "and" | "then" | "beside";
+  readonly order: number | "free";
+  readonly species: { readonly text: string; readonly span: Span };
+}
 
 /** One statement of a line. It does not know where its line stands, so the same line is read once however often. */
 export interface LineStatement {
@@ -39,9 +56,4 @@ export interface Statement {
   readonly offset: number;
   readonly owner: Owner;
   readonly children: Statement[];
-}
-
-/** A whole description as it is written. `orphans` stand where nothing takes them. */
-export interface Tree {
-  readonly statements: readonly Statement[];
 }

@@ -6,10 +6,15 @@ import type { LinearParameter, SeparableModel } from "../numerics/separableModel
  * time zero to `infinity` as S = start e^(−k′t) + infinity (1 − e^(−k′t)). Needs no calibration: only k′ is inside the
  * exponential (IUPAC Gold Book, "rate constant, k" and "order of reaction").
  *
- * `time` in s, length n. The one nonlinear parameter is k′ in s⁻¹, from where a millionth reacts in the longest time to where the reaction is over
+ * `time` in s, length n; with `measured` one observation more, the last, is the reading at infinity. The one nonlinear parameter is k′ in s⁻¹, from where a millionth reacts in the longest time to where the reaction is over
  * before the first interval is.
  */
-export function firstOrderModel(time: Float64Array, start: LinearParameter, infinity: LinearParameter): SeparableModel {
+export function firstOrderModel(
+  time: Float64Array,
+  start: LinearParameter,
+  infinity: LinearParameter,
+  measured = false,
+): SeparableModel {
   const n = time.length;
   const { shortest, longest } = spacing(time);
   return {
@@ -23,6 +28,7 @@ export function firstOrderModel(time: Float64Array, start: LinearParameter, infi
         left[i] = 1 + decay;
         gone[i] = -decay;
       }
+      if (measured) gone[n] = 1;
       const slopes = derivative?.[0];
       if (slopes === undefined) return;
       const [leftSlope, goneSlope] = slopes as [Float64Array, Float64Array];

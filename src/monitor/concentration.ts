@@ -1,7 +1,7 @@
-import { molarMass } from "../chemistry/molarMass.js";
 import { problem } from "../contract/problem.js";
 import { failure, success } from "../contract/result.js";
 import { isKind, kinds, unitInWords } from "../quantity/kinds.js";
+import { molarMassOf } from "./molarMassOf.js";
 import type { Monitor } from "./monitor.js";
 
 /** The readings are the concentration itself: c = S; of a mass concentration c = S/M. */
@@ -20,7 +20,7 @@ export const concentration: Monitor = {
       };
       return failure(problem("signal-wrong-unit", args, origin));
     }
-    const molar = species.formula === null ? null : molarMass(species.formula);
+    const molar = molarMassOf(species);
     if (molar === null) {
       const args = { column, unit: signal.unit.text, species: species.key };
       return failure(problem("signal-needs-formula", args, origin));

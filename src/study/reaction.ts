@@ -1,11 +1,13 @@
 import type { Formula } from "../chemistry/formula.js";
 import type { State } from "../chemistry/readSpecies.js";
 import type { Origin } from "../contract/problem.js";
+import type { Quantity } from "../quantity/quantity.js";
+import type { Fact } from "./fact.js";
 
 /** A chemical reaction as it is written; rates and rate constants belong to this way of writing it. */
 export interface Reaction {
   readonly name: string | null;
-  /** the equation in the writer's words */
+  /** the equation in its one ASCII form */
   readonly text: string;
   /** keys of what stands on the left, in order, each once */
   readonly reactants: readonly string[];
@@ -20,6 +22,10 @@ export interface Reaction {
   readonly balance: "balanced" | "unbalanced" | "unchecked";
   /** false where the line is broken and only the species' names could be kept */
   readonly whole: boolean;
+  /** keeps up with the others at once */
+  readonly fast: boolean;
+  /** for the equation as it is written, J/mol */
+  readonly enthalpy: Fact<Quantity> | null;
   readonly origin: Origin;
 }
 
@@ -29,4 +35,22 @@ export interface Species {
   readonly key: string;
   /** null where it goes by a name only */
   readonly formula: Formula | null;
+  /** stated, kg/mol; null: follows from the formula where there is one */
+  readonly molarMass: Fact<Quantity> | null;
+  /** stated charge, in elementary charges */
+  readonly charge: number | null;
+  readonly pKa: number | null;
+  /** molar absorptivity, m² mol⁻¹, at a wavelength, m */
+  readonly absorptivities: readonly { readonly value: Quantity; readonly wavelength: Quantity }[];
+}
+
+/** How readings follow the concentration of a species. */
+export interface Calibration {
+  readonly name: string;
+  readonly species: Species;
+  readonly standards: readonly { readonly concentration: Quantity; readonly readings: readonly Quantity[] }[];
+  readonly quadratic: boolean;
+  readonly slope: Fact<Quantity> | null;
+  readonly intercept: Fact<Quantity> | null;
+  readonly origin: Origin;
 }

@@ -1,87 +1,101 @@
 import type { Origin } from "../contract/problem.js";
 import type { Quantity } from "../quantity/quantity.js";
 import type { Unit } from "../quantity/unit.js";
+import type { DataFile } from "./dataFile.js";
 import type { Fact, StudyItem } from "./fact.js";
+import type { Follow } from "./follow.js";
 import type { Reaction, Species } from "./reaction.js";
+import type { FitWish, RateWish } from "./wish.js";
+
+export type { ColumnFact, DataFile } from "./dataFile.js";
+export type { Follow } from "./follow.js";
+export type { EndPoint, FitWish, RateWish } from "./wish.js";
 
 export type Role = "catalyst" | "inert" | "buffer";
 
-/** What was put in: an amount-of-substance concentration in the mixture, an amount or a mass, SI. */
+/** A share of a mixture, and of what: 30 % by mass. */
+export interface Share {
+  readonly value: Quantity;
+  readonly basis: "mass" | "amount" | "volume";
+}
+
+/** What was put in: a concentration in the mixture, an amount, a mass, or a volume of a stock; SI. */
 export interface Taken {
   readonly species: Species;
   readonly given: Quantity;
+  /** of the stock, where `given` is a volume of one: a concentration, or a share of it */
+  readonly stock:
+    | { readonly kind: "concentration"; readonly value: Quantity }
+    | ({ readonly kind: "share" } & Share)
+    | null;
+  /** share of the substance in what was weighed, by mass */
+  readonly purity: Quantity | null;
+  readonly density: Quantity | null;
+  /** ions it gives in water, where the line names them */
+  readonly ions: readonly Species[] | null;
   readonly role: Role | null;
   readonly origin: Origin;
 }
 
-/** A column of the run's data file, found by its header cell or by its number. */
-export interface ColumnFact {
-  readonly name: string;
-  readonly by: Fact<{ readonly header: string } | { readonly number: number }>;
-  /** as the line states it; null where the header must */
-  readonly unit: Fact<Unit> | null;
-  /** uncertainty of each reading; in the column's unit, or a share of the reading (`%`) */
-  readonly random: Fact<Quantity> | null;
-  /** uncertainty all readings share: an offset in the column's unit, or a share (`%`) that scales them */
-  readonly common: Fact<Quantity> | null;
-  readonly origin: Origin;
+/** A timed event: when it was seen, and what it means. */
+export interface TimedEvent extends StudyItem {
+  readonly what: string;
+  readonly times: readonly Quantity[];
+  readonly after:
+    | { readonly kind: "used up"; readonly species: Species }
+    | {
+        readonly kind: "collected" | "consumed" | "formed";
+        readonly species: Species;
+        readonly amount: Quantity;
+      }
+    | null;
 }
 
-/** The data file of a run; `path` is as written, relative to the description. */
-export interface DataFile {
-  readonly path: string;
-  /** where the path stands, with its quotes */
-  readonly pathOrigin: Origin;
-  readonly columns: readonly ColumnFact[];
-  /** how the file is to be read where detection is not enough; null: as detected */
-  readonly delimiter: string | null;
-  readonly decimalComma: boolean | null;
-  readonly skip: number | null;
-  readonly encoding: string | null;
-  readonly origin: Origin;
+/** What is known from elsewhere, or expected. `species` null: as v = (1/ν) dc/dt. */
+export type Given = Fact<{ readonly what: "rate" | "k"; readonly value: Quantity; readonly species: Species | null }>;
+export type Expected = Fact<
+  | { readonly what: "k" | "half-life"; readonly value: Quantity }
+  | { readonly what: "readings"; readonly every: Quantity; readonly to: Quantity }
+>;
+
+/** Conditions of a run; null where they are not stated. */
+export interface Conditions {
+  readonly volume: Fact<Quantity> | null;
+  readonly temperature: Fact<Quantity> | null;
+  /** name of the column that holds the temperature */
+  readonly temperatureColumn: Fact<string> | null;
+  readonly pressure: Fact<Quantity> | null;
+  readonly ionicStrength: Fact<Quantity> | null;
+  readonly headSpace: Fact<Quantity> | null;
+  readonly purgedWith: Fact<Species> | null;
+  readonly activationEnergy: Fact<Quantity> | null;
 }
 
-export interface Follow extends StudyItem {
-  readonly species: Species;
-  readonly monitor: string;
-  /** name of the column */
-  readonly column: string;
-}
-
-export type RateWish = StudyItem &
-  (
-    | { readonly kind: "average"; readonly from: Quantity; readonly to: Quantity }
-    | { readonly kind: "instantaneous"; readonly at: Quantity }
-    | { readonly kind: "initial" }
-  );
-
-/** How the signal at time zero or at infinity enters a fit. */
-export type EndPoint =
-  | { readonly kind: "free" }
-  | { readonly kind: "default" }
-  | { readonly kind: "fixed"; readonly value: Quantity | null; readonly origin: Origin };
-
-export interface FitWish extends StudyItem {
-  readonly order: number;
-  readonly species: Species;
-  /** times, SI */
-  readonly window: { readonly from: Quantity; readonly to: Quantity; readonly origin: Origin } | null;
-  readonly start: EndPoint;
-  readonly infinity: EndPoint;
+/** Units in which results come out, where the description sets them. */
+export interface ResultsIn {
+  readonly concentration: Unit;
+  readonly time: Unit;
 }
 
 /** One run: what was mixed, under which conditions, what was followed and what is wanted of it. */
-export interface Run extends StudyItem {
+export interface Run extends StudyItem, Conditions {
   readonly name: string;
   readonly title: string | null;
   readonly date: Fact<string> | null;
+  readonly operator: Fact<string> | null;
+  readonly instrument: Fact<string> | null;
+  readonly solvent: Fact<string> | null;
   readonly notes: readonly Fact<string>[];
+  readonly resultsIn: ResultsIn | null;
   readonly reaction: Reaction | null;
-  readonly volume: Fact<Quantity> | null;
-  readonly temperature: Fact<Quantity> | null;
   readonly taken: readonly Taken[];
   readonly data: DataFile | null;
   readonly follow: readonly Follow[];
+  readonly events: readonly TimedEvent[];
   readonly rates: readonly RateWish[];
   readonly fits: readonly FitWish[];
+  readonly given: readonly Given[];
+  readonly expected: readonly Expected[];
+  /** name of the run whose signal is taken off */
+  readonly background: Fact<string> | null;
 }

@@ -185,9 +185,9 @@ const cases: readonly Case[] = [
     mend: null,
   },
   {
-    put: ["run A", "series x\nrun A"],
-    said: ["word-unknown “series”: “series” begins no line here."],
-    mend: "species x\nrun A",
+    put: ["run A", "sries x\nrun A"],
+    said: ["word-unknown “sries”: “sries” begins no line here."],
+    mend: "series x\nrun A",
   },
   { put: ["  volume 50 mL", "  date 3.11.2026"], said: ["date-malformed “3.11.2026”"], mend: null },
   { put: ["  volume 50 mL", "  date 2026-02-30"], said: ["date-malformed “2026-02-30”"], mend: null },

@@ -63,7 +63,8 @@ function mutated(text: string, random: Random): string {
   }
 }
 
-describe("10,000 random mutations of the samples", () => {
+describe("10,000 random mutations of the samples", function () {
+  this.timeout(60_000);
   it("nothing throws, nothing hangs, every problem lies inside the text and has words", () => {
     const random = seededRandom(20_261_201);
     let slowest = 0;

@@ -1,9 +1,7 @@
 import assert from "node:assert/strict";
-import { runsOf } from "../../src/analysis/runsOf.js";
 import type { Description } from "../../src/contract/findings.js";
 import { changedWhileRead } from "../../src/contract/messages/data.js";
 import type { Reader, ReadOutcome } from "../../src/contract/reader.js";
-import { messageOf } from "../../src/contract/words.js";
 import { exp } from "../../src/numerics/elementary.js";
 import { type Computer, inlineComputer } from "../../src/workspace/computer.js";
 import { createWorkspace } from "../../src/workspace/workspace.js";
@@ -159,28 +157,32 @@ describe("a workspace", () => {
     assert.equal(description?.data.length, 1);
   });
 
-  it("tables of runs and runs of other files stay as they are in the study: not-computed-yet", () => {
-    const origin = { uri: document.uri, start: 0, end: 3 };
-    const notes = { all: [] as { problem: Parameters<typeof messageOf>[0]; item: string | null }[] };
-    const runs = runsOf(
-      {
-        uri: document.uri,
-        reactions: [],
-        species: [],
-        runs: [
-          { kind: "table", path: "runs.csv", like: "A", origin },
-          { kind: "files", pattern: "more/*.raterun", origin },
-        ],
-      },
-      notes,
-    );
-    assert.deepEqual(runs, []);
+  it("tables of runs and runs of other files stay as they are in the study, and say so: not-computed-yet", async () => {
+    const { workspace } = workspaceOf(() => ({ kind: "bytes", bytes: csv }));
+    const more = `${text}rows of "runs.csv" like A
+  named by "run"
+  taken H2O2 from "c(H2O2) / mol/L"
+series all
+  across A, "more/*.raterun", "other.raterun:B"
+  order in H2O2
+`;
+    const description = await workspace.describe({ ...document, text: more }, { curves: false, signal: never });
     assert.deepEqual(
-      notes.all.map(({ problem }) => `${problem.code}: ${messageOf(problem)}`),
-      [
-        "not-computed-yet: The table of runs runs.csv is understood and kept; not computed yet.",
-        "not-computed-yet: The runs of more/*.raterun is understood and kept; not computed yet.",
-      ],
+      description?.diagnostics.map(({ code, line }) => `${code}@${line}`),
+      ["not-computed-yet@10", "not-computed-yet@13"],
+    );
+    const { study } = workspace.bound({ ...document, text: more });
+    const table = study.runs.find(({ kind }) => kind === "table");
+    assert.ok(table?.kind === "table");
+    assert.deepEqual(table.values, [{ head: "taken", key: "H2O2", header: "c(H2O2) / mol/L" }]);
+    assert.deepEqual([table.namedBy, table.like, table.path], ["run", "A", "runs.csv"]);
+    assert.deepEqual(
+      study.series[0]?.across.map(({ kind }) => kind),
+      ["here", "files", "file"],
+    );
+    assert.deepEqual(
+      description?.runs.map(({ name }) => name),
+      ["A"],
     );
   });
 });

@@ -160,6 +160,18 @@ export const languageMessages = {
     ({ species }: { species: string }) =>
       `The amount of ${species} does not follow from its mass without its formula. Declare it (species ${species} is C4H8O2, say), or give an amount or a concentration.`,
   ),
+  "taken-volume-of-what": message(
+    "error",
+    "A volume was taken, but not of what strength.",
+    ({ species, volume }: { species: string; volume: string }) =>
+      `${volume} of ${species} of what strength? Add it, for example: ${volume} of 0.500 mol/L, or: ${volume} of 30 % by mass density 1.11 g/mL`,
+  ),
+  "stock-without-volume": message(
+    "error",
+    "The strength of a stock stands behind something that is no volume.",
+    ({ stock }: { stock: string }) =>
+      `“of ${stock}” says the strength of a stock, so a volume stands before it: 10.0 mL of ${stock}.`,
+  ),
   "taken-takes-no-part": message(
     "information",
     "Something was put in that does not stand in the reaction and has no role.",
@@ -200,6 +212,25 @@ export const languageMessages = {
     "information",
     "A rate law is written that is not computed yet.",
     ({ law }: { law: string }) => `“${law}” is understood and kept; not computed yet. Order 1 is.`,
+  ),
+  "results-units": message(
+    "error",
+    "The units of the results are one of concentration and one of time.",
+    (_: Record<string, never>) => "Results come out in a unit of concentration and one of time: results in mmol/L, min",
+  ),
+  "header-outside-table": message(
+    "error",
+    "A value is taken from a column of a table of runs, but the line stands in none.",
+    ({ header }: { header: string }) =>
+      `from “${header}” takes a value from a table of runs, so it stands below a line rows of "…" like A. Write the value itself here.`,
+  ),
+  "blank-ambiguous": message(
+    "error",
+    "A bare blank line belongs to the one signal that is followed, but several are.",
+    ({ count }: { count: number }) =>
+      count === 0
+        ? "No signal is followed here that the blank could belong to. Write it below a follow line."
+        : `${count} signals are followed here, and the blank could belong to each. Write it below the follow line it belongs to.`,
   ),
   "span-empty": message(
     "error",

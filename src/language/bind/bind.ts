@@ -7,12 +7,18 @@ import type { RunSource, Study } from "../../study/study.js";
 import { isBroken, numberOf, originOf, textOf } from "../fields.js";
 import type { Parsed } from "../parse.js";
 import type { Statement } from "../syntax.js";
+import { bindCalibrations } from "./bindCalibrations.js";
 import { type Binding, type NameUse, report } from "./binding.js";
 import { bindReactions } from "./bindReaction.js";
+import { bindResultsIn } from "./bindResultsIn.js";
 import { bindRun } from "./bindRun.js";
+import { bindMechanism, bindSeries } from "./bindSeries.js";
+import { bindTable } from "./bindTable.js";
+import { withBlankJoined } from "./blankLine.js";
 import { checkRun } from "./checkRun.js";
 import { declareSpecies } from "./declareSpecies.js";
 import { checkRepeats, type KeyOf, mergeLines } from "./effectiveLines.js";
+import { sayHeadersOutside, sayKept } from "./keptLines.js";
 import { withOrderInNumbers } from "./orderInNumbers.js";
 
 /** What a description means, and everything the text alone can tell is wrong with it, in the order of the text. */
@@ -30,14 +36,27 @@ export function bind(parsed: Parsed): Bound {
   const problems = new Map<string, Problem>();
   const uses: NameUse[] = [];
   const declared = declareSpecies(uri, problems, uses, withHead("species"));
-  const gathering: Binding = { uri, problems, uses, declared, salvaged: new Set<string>() };
+  const calibrations = new Set(withHead("calibration").flatMap((line) => textOf(line, "calibration") ?? []));
+  const gathering: Binding = { uri, problems, uses, declared, calibrations, salvaged: new Set<string>() };
   const { reactions, salvaged } = bindReactions(gathering, withHead("reaction"));
   const binding: Binding = { ...gathering, salvaged };
   const keyOf = speciesKeys(binding);
   checkVersion(binding, parsed);
   checkRepeats(binding, parsed.index, statements, keyOf);
   const runs = bindRuns(binding, parsed, reactions, keyOf);
-  const study: Study = { uri, reactions, species: [...declared.values()], runs };
+  const names = new Set(runs.flatMap((source) => (source.kind === "run" ? [source.run.name] : [])));
+  const together = { binding, reactions, runs: names, tables: runs.some(({ kind }) => kind === "table") };
+  const study: Study = {
+    uri,
+    reactions,
+    species: [...declared.values()],
+    calibrations: bindCalibrations(binding, withHead("calibration")),
+    runs,
+    series: withHead("series").flatMap((line) => bindSeries(together, line) ?? []),
+    mechanisms: withHead("mechanism").flatMap((line) => bindMechanism(together, line) ?? []),
+  };
+  sayKept(binding, parsed, statements);
+  sayHeadersOutside(binding, statements);
   const fromLines = parsed.problems.map((found) => withOrderInNumbers(found, parsed.text, reactions));
   const all = [...fromLines, ...problems.values()];
   all.sort((a, b) => a.origin.start - b.origin.start || a.origin.end - b.origin.end);
@@ -48,21 +67,27 @@ function bindRuns(binding: Binding, parsed: Parsed, reactions: readonly Reaction
   const defaults: Statement[] = [];
   const effective = new Map<string, readonly Statement[]>();
   const runs: RunSource[] = [];
-  const headers = parsed.statements.filter(({ line }) => line.row?.head === "run");
-  const reactionWritten = parsed.statements.some(({ line }) => line.row?.head === "reaction");
-  for (const statement of parsed.statements) {
+  const { statements } = parsed;
+  const headers = statements.filter(({ line }) => line.row?.head === "run");
+  const reactionWritten = statements.some(({ line }) => line.row?.head === "reaction");
+  const resultsIn = bindResultsIn(binding, statements);
+  for (const statement of statements) {
     const { row } = statement.line;
-    if (row?.opens !== "run") {
+    if (row?.opens !== "run" && row?.opens !== "rows") {
       if (row?.owners.includes("run")) defaults.push(statement);
       continue;
     }
-    const name = textOf(statement, "run");
-    if (name !== null) declareRun(binding, statement, name);
+    const name = row.opens === "run" ? textOf(statement, "run") : "";
+    if (name !== null && row.opens === "run") declareRun(binding, statement, name);
     const base = inheritedLines(binding, statement, headers, effective) ?? defaults;
-    const lines = mergeLines(base, statement.children, keyOf);
+    const lines = mergeLines(base, withBlankJoined(binding, base, statement.children), keyOf);
     if (name === null || isBroken(statement) || effective.has(name)) continue;
+    const run = bindRun(binding, statement, name, lines, reactions, resultsIn);
+    if (row.opens === "rows") {
+      runs.push({ kind: "table", ...bindTable(binding, statement, run, keyOf) });
+      continue;
+    }
     effective.set(name, lines);
-    const run = bindRun(binding, statement, lines, reactions);
     checkRun(binding, run, lines, reactionWritten);
     runs.push({ kind: "run", run });
   }

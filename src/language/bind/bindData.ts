@@ -1,9 +1,10 @@
 import type { Quantity } from "../../quantity/quantity.js";
+import type { ColumnFact, DataFile, Exclusion } from "../../study/dataFile.js";
 import type { Fact } from "../../study/fact.js";
-import type { ColumnFact, DataFile } from "../../study/run.js";
 import { isBroken, numberOf, originOf, quantityOf, textOf, unitOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import type { Binding } from "./binding.js";
+import { linesWith, quantityFact } from "./facts.js";
 
 /** The `data` line of a run with its columns. */
 export function bindData(binding: Binding, run: string, statement: Statement): DataFile | null {
@@ -13,6 +14,8 @@ export function bindData(binding: Binding, run: string, statement: Statement): D
   const skip = statement.children.find((child) => child.line.row?.head === "skip" && !isBroken(child));
   return {
     path,
+    exclusions: linesWith(statement.children, "exclude").flatMap((line) => bindExclusion(binding.uri, line)),
+    timeZero: quantityFact(binding.uri, statement.children, "time"),
     pathOrigin: originOf(binding.uri, statement, "path"),
     columns: columns.flatMap((column) => bindColumn(binding, run, column)),
     delimiter: childText(statement, "delimiter", "delimiter"),
@@ -21,6 +24,16 @@ export function bindData(binding: Binding, run: string, statement: Statement): D
     encoding: childText(statement, "encoding", "encoding"),
     origin: originOf(binding.uri, statement),
   };
+}
+
+function bindExclusion(uri: string, statement: Statement): Exclusion[] {
+  const reason = textOf(statement, "reason") ?? "";
+  const origin = originOf(uri, statement);
+  const line = numberOf(statement, "line");
+  if (line !== null) return [{ value: { reason, line }, origin }];
+  const from = quantityOf(statement, "from");
+  const to = quantityOf(statement, "to");
+  return from === null || to === null ? [] : [{ value: { reason, from, to }, origin }];
 }
 
 function childText(statement: Statement, head: string, label: string): string | null {

@@ -8,6 +8,7 @@ import type { Reaction } from "../../study/reaction.js";
 import { fieldOf, isBroken, originOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import { type Binding, report, reportIn } from "./binding.js";
+import { hasLine, quantityFact } from "./facts.js";
 
 /** The reactions of a file, and the species on their lines that could be read though the line is broken. */
 export function bindReactions(
@@ -16,21 +17,35 @@ export function bindReactions(
 ): { reactions: Reaction[]; salvaged: ReadonlySet<string> } {
   const salvaged = new Set<string>();
   const reactions = lines.flatMap((statement): Reaction[] => {
-    const field = fieldOf(statement, "equation");
-    if (field === null || isBroken(statement)) return [];
-    const reading = readEquation(field.text, (name) => binding.declared.has(name));
-    const origin = originOf(binding.uri, statement, "equation");
-    const name = textOf(statement, "reaction");
-    if (reading.equation === null) {
-      for (const fault of reading.faults) reportIn(binding, statement, field.span.start, fault);
-      for (const key of reading.species) salvaged.add(key);
-      return [{ ...nothing, name, text: field.text, origin }];
-    }
-    useNames(binding, statement, field.span.start, reading.equation);
-    const result = checkBalance(binding, statement, field.text, field.span.start, reading.equation);
-    return [reactionOf(reading.equation, name, result, origin)];
+    const found = bindEquation(binding, statement, textOf(statement, "reaction"), salvaged);
+    return found === null ? [] : [found];
   });
   return { reactions, salvaged };
+}
+
+/** The reaction that a line states; null where the line is broken. What could be read of it goes into `salvaged`. */
+export function bindEquation(
+  binding: Binding,
+  statement: Statement,
+  name: string | null,
+  salvaged: Set<string>,
+): Reaction | null {
+  const field = fieldOf(statement, "equation");
+  if (field === null || isBroken(statement)) return null;
+  const reading = readEquation(field.text, (name) => binding.declared.has(name));
+  const origin = originOf(binding.uri, statement, "equation");
+  if (reading.equation === null) {
+    for (const fault of reading.faults) reportIn(binding, statement, field.span.start, fault);
+    for (const key of reading.species) salvaged.add(key);
+    return { ...nothing, name, text: field.text, origin };
+  }
+  useNames(binding, statement, field.span.start, reading.equation);
+  const result = checkBalance(binding, statement, field.text, field.span.start, reading.equation);
+  return {
+    ...reactionOf(reading.equation, name, result, origin),
+    fast: hasLine(statement.children, "fast"),
+    enthalpy: quantityFact(binding.uri, statement.children, "enthalpy"),
+  };
 }
 
 /** A reaction of which nothing is known. */
@@ -42,6 +57,8 @@ const nothing = {
   reversible: false,
   balance: "unchecked",
   whole: false,
+  fast: false,
+  enthalpy: null,
 } as const;
 
 function reactionOf(
@@ -63,6 +80,8 @@ function reactionOf(
     balance: result,
     reversible: equation.arrow === "<=>",
     whole: true,
+    fast: false,
+    enthalpy: null,
     origin,
   };
 }

@@ -1,54 +1,89 @@
-import { problem, replacement } from "../../contract/problem.js";
-import { nearest } from "../../quantity/nearest.js";
-import type { Quantity } from "../../quantity/quantity.js";
-import type { Fact } from "../../study/fact.js";
+import { problem } from "../../contract/problem.js";
 import type { Reaction } from "../../study/reaction.js";
-import type { DataFile, Follow, Run } from "../../study/run.js";
-import { blockOf, isBroken, originOf, quantityOf, textOf } from "../fields.js";
+import type { Conditions, ResultsIn, Run } from "../../study/run.js";
+import { blockOf, isBroken, originOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import { bindData } from "./bindData.js";
-import { bindFits, bindRates } from "./bindFit.js";
+import { bindEvents, bindExpected, bindGiven } from "./bindElsewhere.js";
+import { bindFollow, useColumn } from "./bindFollow.js";
 import { type Binding, report } from "./binding.js";
 import { bindTaken } from "./bindTaken.js";
-import { changed, describeSpecies } from "./reactionSpecies.js";
+import { bindFits, bindRates, type WishContext } from "./bindWishes.js";
+import { linesWith, lineWith, quantityFact, textFact } from "./facts.js";
 import { resolveSpecies } from "./resolveSpecies.js";
 
 /** Makes a run of its header and its effective lines: its own and those it starts from. */
 export function bindRun(
   binding: Binding,
   header: Statement,
+  name: string,
   lines: readonly Statement[],
   reactions: readonly Reaction[],
+  resultsIn: ResultsIn | null,
 ): Run {
   const { uri } = binding;
-  const name = textOf(header, "run") ?? "";
   const withHead = (head: string): Statement[] => lines.filter((statement) => statement.line.row?.head === head);
   const follows = withHead("follow");
   const reaction = reactionOf(binding, follows, reactions);
-  const dataLine = withHead("data")[0];
-  const data = dataLine === undefined ? null : bindData(binding, name, dataLine);
+  const own = reaction === null ? [] : [reaction];
+  const dataLine = withHead("data")[0] ?? null;
+  const data = dataLine === null ? null : bindData(binding, name, dataLine);
+  const context: WishContext = { binding, run: name, reaction, data, dataLine };
+  const text = (head: string, label = "text") => textFact(uri, lines, head, label);
   return {
     id: `run ${name}`,
     name,
     title: textOf(header, "title"),
     origin: originOf(uri, header, "run"),
     block: blockOf(uri, header),
-    date: textFact(uri, withHead("date")[0], "date"),
-    notes: withHead("note").flatMap((statement) => textFact(uri, statement, "text") ?? []),
+    date: text("date", "date"),
+    operator: text("operator"),
+    instrument: text("instrument"),
+    solvent: text("solvent"),
+    notes: linesWith(lines, "note").flatMap((statement) => textFact(uri, [statement], "note", "text") ?? []),
+    resultsIn,
     reaction,
-    volume: quantityFact(uri, withHead("volume")[0], "volume"),
-    temperature: quantityFact(uri, withHead("temperature")[0], "temperature"),
+    ...conditionsOf(context, lines, own),
     taken: bindTaken(binding, withHead("taken"), reaction),
     data,
     follow: follows.flatMap((statement) => bindFollow(binding, name, statement, reaction, data, dataLine)),
-    rates: bindRates(binding, name, withHead("rate")),
-    fits: bindFits(binding, name, withHead("fit"), reaction),
+    events: bindEvents(binding, name, lines, own),
+    rates: bindRates(context, withHead("rate")),
+    fits: bindFits(context, withHead("fit")),
+    given: bindGiven(binding, lines, own),
+    expected: bindExpected(binding, lines),
+    background: backgroundOf(binding, lines),
+  };
+}
+
+function conditionsOf(context: WishContext, lines: readonly Statement[], reactions: readonly Reaction[]): Conditions {
+  const { binding, run, data, dataLine } = context;
+  const { uri } = binding;
+  const temperatureColumn = textFact(uri, lines, "temperature", "column");
+  const line = lineWith(lines, "temperature");
+  if (temperatureColumn !== null && line !== null) {
+    useColumn(binding, run, line, "column", temperatureColumn.value, data, dataLine);
+    const what = `temperature from ${temperatureColumn.value}`;
+    report(binding, problem("not-computed-yet", { what: `“${what}”` }, originOf(uri, line)));
+  }
+  const purged = lineWith(lines, "purged");
+  const gas = purged === null ? null : resolveSpecies(binding, purged, "species", reactions);
+  return {
+    volume: quantityFact(uri, lines, "volume"),
+    temperature: quantityFact(uri, lines, "temperature"),
+    temperatureColumn,
+    pressure: quantityFact(uri, lines, "pressure"),
+    ionicStrength: quantityFact(uri, lines, "ionic", "ionicStrength"),
+    headSpace: quantityFact(uri, lines, "head", "headSpace"),
+    purgedWith: purged === null || gas === null ? null : { value: gas, origin: originOf(uri, purged) },
+    activationEnergy: quantityFact(uri, lines, "activation", "energy"),
   };
 }
 
 /** The reaction of a run: the one in which what it follows takes part, else the first. */
 function reactionOf(binding: Binding, follows: readonly Statement[], reactions: readonly Reaction[]): Reaction | null {
   for (const statement of follows) {
+    if (isBroken(statement)) continue;
     const text = textOf(statement, "species") ?? "";
     const key = binding.declared.get(text)?.key ?? text;
     const found = reactions.find(({ numbers }) => numbers.has(key));
@@ -57,63 +92,9 @@ function reactionOf(binding: Binding, follows: readonly Statement[], reactions: 
   return reactions[0] ?? null;
 }
 
-function bindFollow(
-  binding: Binding,
-  run: string,
-  statement: Statement,
-  reaction: Reaction | null,
-  data: DataFile | null,
-  dataLine: Statement | undefined,
-): Follow[] {
-  const { uri } = binding;
-  if (isBroken(statement)) return [];
-  const column = textOf(statement, "column");
-  const monitor = textOf(statement, "monitor");
-  const species = resolveSpecies(binding, statement, "species", reaction === null ? [] : [reaction]);
-  if (column !== null) {
-    const origin = originOf(uri, statement, "column");
-    binding.uses.push({ kind: "column", name: column, run, declares: false, origin });
-    if (dataLine !== undefined && !declaredIn(dataLine, column)) {
-      const names = [...new Set((data?.columns ?? []).map((candidate) => candidate.name))];
-      const known =
-        names.length === 0
-          ? ". Declare it below the data line"
-          : `; there ${names.length === 1 ? "is" : "are"} ${names.join(", ")}`;
-      const mend = nearest(column, names).map((near) => replacement(origin, near));
-      report(binding, problem("name-unknown", { what: "column", name: column, known }, origin, mend));
-    }
-  }
-  if (species === null || column === null || monitor === null) return [];
-  if (reaction?.whole === true) {
-    const number = reaction.numbers.get(species.key);
-    const origin = originOf(uri, statement, "species");
-    const there = changed(reaction);
-    if (number === undefined) {
-      const mend = nearest(species.key, there).map((near) => replacement(origin, near));
-      const args = { species: species.key, there: describeSpecies(there) };
-      report(binding, problem("follow-not-in-reaction", args, origin, mend));
-    } else if (number === 0) {
-      report(binding, problem("follow-blind", { species: species.key }, origin));
-    }
-  }
-  const id = `run ${run}/follow ${column}`;
-  return [{ id, origin: originOf(uri, statement), block: blockOf(uri, statement), species, monitor, column }];
-}
-
-/** Whether a data line declares a column, or may: a line so broken that it lost its name could be the one. */
-function declaredIn(dataLine: Statement, column: string): boolean {
-  const lines = dataLine.children.filter((child) => child.line.row?.head === "column");
-  return lines.some((child) => textOf(child, "column") === column || textOf(child, "column") === null);
-}
-
-function textFact(uri: string, statement: Statement | undefined, label: string): Fact<string> | null {
-  if (statement === undefined || isBroken(statement)) return null;
-  const value = textOf(statement, label);
-  return value === null ? null : { value, origin: originOf(uri, statement, label) };
-}
-
-function quantityFact(uri: string, statement: Statement | undefined, label: string): Fact<Quantity> | null {
-  if (statement === undefined || isBroken(statement)) return null;
-  const value = quantityOf(statement, label);
-  return value === null ? null : { value, origin: originOf(uri, statement, label) };
+function backgroundOf(binding: Binding, lines: readonly Statement[]): Run["background"] {
+  const fact = textFact(binding.uri, lines, "background", "run");
+  if (fact === null) return null;
+  binding.uses.push({ kind: "run", name: fact.value, run: null, declares: false, origin: fact.origin });
+  return fact;
 }

@@ -1,41 +1,82 @@
 import { ionsOf } from "../../chemistry/handbook/dissociation.js";
 import { problem } from "../../contract/problem.js";
-import type { Reaction } from "../../study/reaction.js";
+import { isKind } from "../../quantity/kinds.js";
+import type { Reaction, Species } from "../../study/reaction.js";
 import type { Role, Taken } from "../../study/run.js";
-import { isBroken, originOf, quantityOf, textOf } from "../fields.js";
+import { fieldOf, isBroken, itemsOf, originIn, originOf, quantityOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import { type Binding, report } from "./binding.js";
-import { resolveSpecies } from "./resolveSpecies.js";
+import { resolveSpecies, resolveSpeciesText } from "./resolveSpecies.js";
 
-/** The `taken` lines of a run. */
+/** The `taken` lines of a run. A line that says `none` takes an inherited one out and leaves nothing. */
 export function bindTaken(binding: Binding, lines: readonly Statement[], reaction: Reaction | null): Taken[] {
+  const reactions = reaction === null ? [] : [reaction];
   return lines.flatMap((statement): Taken[] => {
-    if (isBroken(statement)) return [];
-    const species = resolveSpecies(binding, statement, "species", reaction === null ? [] : [reaction]);
+    if (isBroken(statement) || textOf(statement, "none") !== null) return [];
+    const species = resolveSpecies(binding, statement, "species", reactions);
     const given = quantityOf(statement, "given");
     if (species === null || given === null) return [];
-    const role = (textOf(statement, "role") as Role | null) ?? null;
-    const taken: Taken = { species, given, role, origin: originOf(binding.uri, statement) };
-    if (reaction?.whole === true && role === null && !takesPart(taken, reaction)) {
-      const end = originOf(binding.uri, statement).end;
-      const asRole = (word: Role) => ({ text: `as ${word}`, edits: [{ start: end, end, text: ` as ${word}` }] });
-      report(
-        binding,
-        problem(
-          "taken-takes-no-part",
-          { species: species.key },
-          originOf(binding.uri, statement, "species"),
-          (["catalyst", "inert", "buffer"] as const).map(asRole),
-        ),
-      );
-    }
+    const { uri } = binding;
+    const taken: Taken = {
+      species,
+      given,
+      stock: stockOf(statement),
+      purity: quantityOf(statement, "purity"),
+      density: quantityOf(statement, "density"),
+      ions: ionsOnLine(binding, statement, reactions),
+      role: (textOf(statement, "role") as Role | null) ?? null,
+      origin: originOf(uri, statement),
+    };
+    checkStock(binding, statement, taken);
+    if (reaction?.whole === true && taken.role === null && !takesPart(taken, reaction))
+      sayNoPart(binding, statement, taken);
     return [taken];
   });
 }
 
+function stockOf(statement: Statement): Taken["stock"] {
+  const field = fieldOf(statement, "stock");
+  if (field?.kind !== "quantity") return null;
+  if (field.basis === null) return { kind: "concentration", value: field.quantity };
+  return { kind: "share", value: field.quantity, basis: field.basis };
+}
+
+function ionsOnLine(binding: Binding, statement: Statement, reactions: readonly Reaction[]): readonly Species[] | null {
+  const items = itemsOf(statement, "ions");
+  if (items.length === 0) return null;
+  return items.flatMap(({ text, span }) => {
+    const found = resolveSpeciesText(binding, text, originIn(binding.uri, statement, span), reactions);
+    return found === null ? [] : [found];
+  });
+}
+
+/** A volume needs the strength of its stock; anything else has none. */
+function checkStock(binding: Binding, statement: Statement, { species, given, stock }: Taken): void {
+  const isVolume = isKind(given.unit, "volume");
+  const origin = originOf(binding.uri, statement, "given");
+  if (isVolume && stock === null) {
+    report(
+      binding,
+      problem("taken-volume-of-what", { species: species.key, volume: textOf(statement, "given") ?? "" }, origin),
+    );
+  }
+  if (!isVolume && stock !== null) {
+    const of = textOf(statement, "stock") ?? "";
+    report(binding, problem("stock-without-volume", { stock: of }, originOf(binding.uri, statement, "stock")));
+  }
+}
+
+function sayNoPart(binding: Binding, statement: Statement, { species }: Taken): void {
+  const { end } = originOf(binding.uri, statement);
+  const asRole = (word: Role) => ({ text: `as ${word}`, edits: [{ start: end, end, text: ` as ${word}` }] });
+  const mend = (["catalyst", "inert", "buffer"] as const).map(asRole);
+  const origin = originOf(binding.uri, statement, "species");
+  report(binding, problem("taken-takes-no-part", { species: species.key }, origin, mend));
+}
+
 /** Whether a species, or an ion it gives in water, stands in the reaction. */
-function takesPart({ species }: Taken, reaction: Reaction): boolean {
+function takesPart({ species, ions }: Taken, reaction: Reaction): boolean {
   if (reaction.numbers.has(species.key)) return true;
-  const ions = species.formula === null ? null : ionsOf(species.formula.text);
-  return ions?.some(({ key }) => reaction.numbers.has(key)) ?? false;
+  const keys = ions?.map(({ key }) => key) ?? ionsOf(species.formula?.text ?? "")?.map(({ key }) => key) ?? [];
+  return keys.some((key) => reaction.numbers.has(key));
 }

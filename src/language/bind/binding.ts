@@ -21,6 +21,8 @@ export interface Binding {
   readonly uses: NameUse[];
   /** declared names */
   readonly declared: ReadonlyMap<string, Species>;
+  /** names of calibrations */
+  readonly calibrations: ReadonlySet<string>;
   /** names on a broken reaction line: they are not unknown */
   readonly salvaged: ReadonlySet<string>;
 }

@@ -1,6 +1,5 @@
 import { problem } from "../../contract/problem.js";
-import { sameDimension } from "../../quantity/dimension.js";
-import { kinds } from "../../quantity/kinds.js";
+import { isKind } from "../../quantity/kinds.js";
 import type { Run } from "../../study/run.js";
 import type { Statement } from "../syntax.js";
 import { type Binding, report } from "./binding.js";
@@ -22,13 +21,13 @@ export function checkRun(binding: Binding, run: Run, lines: readonly Statement[]
   if (written.has("follow") && !wanted) report(binding, problem("run-wants-nothing", say, origin));
   if (written.has("fit") && !written.has("temperature")) report(binding, problem("run-lacks-temperature", say, origin));
   if (!written.has("volume")) {
-    const needing = run.taken.find(({ given }) => !sameDimension(given.unit.dimension, kinds.concentration.dimension));
+    const needing = run.taken.find(({ given }) => !isKind(given.unit, "concentration"));
     if (needing !== undefined) {
       report(binding, problem("run-lacks-volume", { ...say, species: needing.species.key }, origin));
     }
   }
   for (const { species, given, origin: line } of run.taken) {
-    if (species.formula === null && sameDimension(given.unit.dimension, kinds.mass.dimension)) {
+    if (species.formula === null && species.molarMass === null && isKind(given.unit, "mass")) {
       report(binding, problem("taken-needs-formula", { species: species.key }, line));
     }
   }

@@ -1,11 +1,11 @@
 import { readSpecies } from "../../chemistry/readSpecies.js";
-import { problem, replacement } from "../../contract/problem.js";
+import { type Origin, placed, problem, replacement } from "../../contract/problem.js";
 import { nearest } from "../../quantity/nearest.js";
 import { isFault } from "../../quantity/shifted.js";
 import type { Reaction, Species } from "../../study/reaction.js";
 import { originOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
-import { type Binding, report, reportIn } from "./binding.js";
+import { type Binding, report } from "./binding.js";
 
 /**
  * The species a field names: a declared name wins over a formula. Null where it is neither, which is reported
@@ -19,43 +19,42 @@ export function resolveSpecies(
 ): Species | null {
   const text = textOf(statement, field);
   if (text === null) return null;
-  const origin = originOf(binding.uri, statement, field);
+  return resolveSpeciesText(binding, text, originOf(binding.uri, statement, field), reactions);
+}
+
+/** The same for a text that stands at `origin`. */
+export function resolveSpeciesText(
+  binding: Binding,
+  text: string,
+  origin: Origin,
+  reactions: readonly Reaction[],
+): Species | null {
   const declared = binding.declared.get(withoutState(text));
   if (declared !== undefined) {
     binding.uses.push({ kind: "species", name: declared.key, run: null, declares: false, origin });
     return declared;
   }
   const reading = readSpecies(text);
-  if (!isFault(reading) && reading.end === text.length) return { key: reading.key, formula: reading.formula };
+  if (!isFault(reading) && reading.end === text.length) return bareSpecies(reading.key, reading.formula);
   if (binding.salvaged.has(withoutState(text))) return null;
-  const known = [...binding.declared.keys(), ...reactions.flatMap(({ numbers }) => [...numbers.keys()])];
-  const near = nearest(text, [...new Set(known)]);
   if (isFault(reading)) {
+    const known = [...binding.declared.keys(), ...reactions.flatMap(({ numbers }) => [...numbers.keys()])];
+    const near = nearest(text, [...new Set(known)]);
     // A name of the study that is near is a likelier mend than an element.
     const mend = near.map((name) => replacement(origin, name));
-    if (near.length === 0) reportIn(binding, statement, origin.start - statement.offset, reading);
-    else
-      report(
-        binding,
-        problem(
-          "name-unknown",
-          { what: "species", name: text, known: `; there is ${near.join(" or ")}` },
-          origin,
-          mend,
-        ),
-      );
+    const args = { what: "species", name: text, known: `; there is ${near.join(" or ")}` };
+    if (near.length === 0) report(binding, placed(reading, binding.uri, origin.start));
+    else report(binding, problem("name-unknown", args, origin, mend));
     return null;
   }
-  const rest = { start: origin.start + reading.end, end: origin.end };
-  report(
-    binding,
-    problem(
-      "formula-left-over",
-      { formula: reading.key, rest: text.slice(reading.end) },
-      { uri: binding.uri, ...rest },
-    ),
-  );
+  const rest = { uri: binding.uri, start: origin.start + reading.end, end: origin.end };
+  report(binding, problem("formula-left-over", { formula: reading.key, rest: text.slice(reading.end) }, rest));
   return null;
+}
+
+/** A species of which no more is known than its formula. */
+export function bareSpecies(key: string, formula: Species["formula"]): Species {
+  return { key, formula, molarMass: null, charge: null, pKa: null, absorptivities: [] };
 }
 
 function withoutState(text: string): string {
