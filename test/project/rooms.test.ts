@@ -66,7 +66,7 @@ const mayUse: Readonly<Record<string, readonly string[]>> = {
   ],
   extension: ["report"],
   preview: [],
-  build: ["language", "numerics", "report"],
+  build: ["workspace", "language", "quantity", "numerics", "report"],
 };
 
 /** Rooms that know no file system, editor or clock. */

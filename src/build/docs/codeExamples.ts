@@ -1,0 +1,15 @@
+import type { CodeExamples } from "./codeExample.js";
+import { chemistryExamples } from "./examples/chemistry.js";
+import { dataExamples } from "./examples/data.js";
+import { fitExamples } from "./examples/fit.js";
+import { languageExamples } from "./examples/language.js";
+import { quantityExamples } from "./examples/quantity.js";
+
+/** For each code of the catalogue a text that earns it. All figures are invented. */
+export const codeExamples: CodeExamples = {
+  ...languageExamples,
+  ...quantityExamples,
+  ...chemistryExamples,
+  ...dataExamples,
+  ...fitExamples,
+};
