@@ -1,4 +1,4 @@
-import { type ExtensionContext, type LogOutputChannel, window, workspace } from "vscode";
+import { type ExtensionContext, type LogOutputChannel, Uri, window, workspace } from "vscode";
 import type { BaseLanguageClient, LanguageClientOptions } from "vscode-languageclient";
 import {
   type InitializationOptions,
@@ -21,7 +21,7 @@ export type MakeClient = (options: LanguageClientOptions) => BaseLanguageClient;
 /** Starts everything the extension is. Whatever goes wrong with the server is said in the log and the status item. */
 export async function activateWith(context: ExtensionContext, make: MakeClient): Promise<BaseLanguageClient> {
   const log = window.createOutputChannel("Ratewright", { log: true });
-  const client = make(clientOptions(log));
+  const client = make(clientOptions(context, log));
   const status = createStatusItem(client);
   context.subscriptions.push(
     log,
@@ -46,12 +46,17 @@ export async function activateWith(context: ExtensionContext, make: MakeClient):
   return client;
 }
 
-function clientOptions(log: LogOutputChannel): LanguageClientOptions {
+function clientOptions({ extensionUri }: ExtensionContext, log: LogOutputChannel): LanguageClientOptions {
   return {
     documentSelector: [{ language: "raterun" }],
     outputChannel: log,
     // Asked for at each start, so that a restarted server knows the theme and the trust of that moment.
-    initializationOptions: (): InitializationOptions => ({ theme: themeKind(), trusted: workspace.isTrusted }),
+    initializationOptions: (): InitializationOptions => ({
+      theme: themeKind(),
+      trusted: workspace.isTrusted,
+      // The editor opens a link to a file of its own as it opens any file; on the web the address leads to the same page.
+      docs: Uri.joinPath(extensionUri, "media", "docs").toString(),
+    }),
     markdown: { isTrusted: false, supportHtml: false },
     diagnosticCollectionName: "ratewright",
   };

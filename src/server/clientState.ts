@@ -10,6 +10,8 @@ export interface ClientState {
   /** null until the client tells */
   theme: ThemeKind | null;
   trusted: boolean;
+  /** URI of the folder with the documentation pages; null for a client that brings none */
+  docs: string | null;
   /** URIs of the opened folders */
   folders: string[];
   settings: EditorSettings;
@@ -32,6 +34,7 @@ export function createClientState(): ClientState {
   return {
     theme: null,
     trusted: false,
+    docs: null,
     folders: [],
     settings: defaultSettings,
     abilities: {
@@ -49,6 +52,7 @@ export function readInitializationOptions(state: ClientState, options: unknown):
   const told = isRecord(options) ? (options as Partial<InitializationOptions>) : {};
   state.trusted = told.trusted ?? true;
   state.theme = told.theme ?? null;
+  state.docs = typeof told.docs === "string" ? told.docs.replace(/\/+$/, "") : null;
 }
 
 /** Settings as the client answers, each replaced by its default where it is not a number that makes sense. */

@@ -30,6 +30,8 @@ export interface ClientOptions {
   readonly computer?: EndableComputer;
   readonly trusted?: boolean;
   readonly theme?: ThemeKind;
+  /** URI of the folder of documentation pages */
+  readonly docs?: string;
   /** pause after a keystroke, ms */
   readonly delay?: number;
   readonly maximumSize?: number;
@@ -108,7 +110,7 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
         workspaceEdit: { documentChanges: options.versionedEdits ?? true },
       },
     },
-    initializationOptions: { theme: options.theme ?? "light", trusted: options.trusted ?? true },
+    initializationOptions: { theme: options.theme ?? "light", trusted: options.trusted ?? true, docs: options.docs },
   });
   await connection.sendNotification("initialized", {});
   await until("the settings are asked for", () => registered.length > 0);

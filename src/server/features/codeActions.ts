@@ -27,7 +27,7 @@ function actionsOf(context: ServerContext, document: TextDocument, diagnostic: D
   return diagnostic.mends.map(({ title, edits }, index) => ({
     title,
     kind: CodeActionKind.QuickFix,
-    diagnostics: [protocolDiagnostic(diagnostic)],
+    diagnostics: [protocolDiagnostic(diagnostic, context.client.docs)],
     isPreferred: index === 0,
     edit: workspaceEdit(
       context,

@@ -10,10 +10,11 @@ const severities = {
   information: DiagnosticSeverity.Information,
 } as const;
 
-/** A diagnostic as the protocol has it. */
-export function protocolDiagnostic(diagnostic: Diagnostic): LspDiagnostic {
+/** A diagnostic as the protocol has it. `docs` is the URI of the folder of pages, one of which explains the code. */
+export function protocolDiagnostic(diagnostic: Diagnostic, docs: string | null): LspDiagnostic {
   const { severity, code, message } = diagnostic;
-  return { range: rangeOf(diagnostic), severity: severities[severity], code, source: "ratewright", message };
+  const bare = { range: rangeOf(diagnostic), severity: severities[severity], code, source: "ratewright", message };
+  return docs === null ? bare : { ...bare, codeDescription: { href: `${docs}/codes/${code}.md` } };
 }
 
 /**
@@ -25,7 +26,7 @@ export const diagnostics: Feature = {
   start(context) {
     const sent = new Map<string, string>();
     const send = ({ uri, version }: TextDocument, all: readonly Diagnostic[]): void => {
-      const shown = all.map(protocolDiagnostic);
+      const shown = all.map((one) => protocolDiagnostic(one, context.client.docs));
       const words = JSON.stringify(shown);
       if (sent.get(uri) === words) return;
       sent.set(uri, words);
