@@ -51,6 +51,9 @@ describe("finding the column of a data file", () => {
       "run.csv has no header row, so no column is called “t”. Give the column by its number, counted from 1.",
     );
     assert.equal(found("0,1\n1,2\n", 3), "run.csv has no column 3: it has 2 columns, counted from 1.");
-    assert.equal(found("t,V\n", "t"), "run.csv has headers in line 1 but no readings under them.");
+    assert.equal(
+      found("t,V\n", "t"),
+      "run.csv has headers in line 1 but no readings under them. Check that the instrument saved its readings.",
+    );
   });
 });

@@ -21,7 +21,10 @@ describe("files that give no bytes", () => {
       { kind: "too large", size: 123_456_789 },
       "error: data/a.csv has 123.5 MB, more than the 64.0 MB allowed. Keep fewer readings in it, or raise the limit in the settings.",
     ],
-    [{ kind: "unreadable", reason: "permission is denied" }, "error: data/a.csv cannot be read: permission is denied."],
+    [
+      { kind: "unreadable", reason: "permission is denied" },
+      "error: data/a.csv cannot be read: permission is denied. Check who may read it, and whether another program holds it.",
+    ],
     [
       { kind: "unreadable", reason: "changed while being read" },
       "error: data/a.csv changed while it was being read. Wait until the instrument has finished writing, then try again.",

@@ -101,7 +101,7 @@ describe("a workspace", () => {
       "data-folder@5: ../x.csv is a folder. Name the data file in it.",
     ]);
     assert.deepEqual(await saidOf({ kind: "unreadable", reason: "permission denied" }), [
-      "data-unreadable@5: ../x.csv cannot be read: permission denied.",
+      "data-unreadable@5: ../x.csv cannot be read: permission denied. Check who may read it, and whether another program holds it.",
     ]);
     assert.match(
       (await saidOf({ kind: "unreadable", reason: changedWhileRead })).join(),

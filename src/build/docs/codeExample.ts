@@ -15,6 +15,8 @@ export interface ShownExample {
   readonly write?: readonly [words: string, instead: string];
   /** The right files, where the fault lies in them. */
   readonly rightFiles?: ExampleFiles;
+  /** The right files are readings of another run: nobody changes readings until nothing is said of them. */
+  readonly otherReadings?: true;
   /** a code that never comes without this one does: what else the example earns */
   readonly beside?: ProblemCode;
   /** the description was never saved */

@@ -39,7 +39,7 @@ async function shownBlocks(code: ProblemCode, example: ShownExample): Promise<st
   const [first] = found;
   if (first === undefined) throw new Error("its example does not earn it");
   const messages = [...new Set(found.map(({ message }) => message))].join("\n");
-  const { files = {}, beside, unsaved } = example;
+  const { files = {}, beside } = example;
   return [
     "## What it says, for example",
     fenced("text", messages),
@@ -47,23 +47,28 @@ async function shownBlocks(code: ProblemCode, example: ShownExample): Promise<st
     fenced("raterun", example.text),
     ...fileBlocks(files),
     beside === undefined ? "" : `[${beside}](${beside}.md) comes with it.`,
-    ...(right === null ? [] : ["## Put right"]),
+    ...(right === null ? [] : [example.otherReadings === true ? "## Other readings" : "## Put right"]),
     offered.length === 0 ? "" : `The editor offers: ${offered.map(prose).join(" · ")}.`,
-    ...(right === null ? [] : rightBlocks(example.text, files, right, unsaved === true)),
+    ...(right === null ? [] : rightBlocks(example, files, right)),
     "The figures are invented.",
   ];
 }
 
 function rightBlocks(
-  text: string,
+  { text, unsaved, otherReadings }: ShownExample,
   files: ExampleFiles,
   right: { readonly text: string; readonly files: ExampleFiles },
-  unsaved: boolean,
 ): string[] {
-  if (unsaved) return ["The same text, once it is saved beside the folder `data`."];
+  if (unsaved === true) return ["The same text, once it is saved beside the folder `data`."];
   const changed = Object.entries(right.files).filter(([path, file]) => files[path] !== file);
+  if (otherReadings === true) {
+    return [
+      "Readings are not changed until nothing is said of them. Of these, of another run, nothing is said:",
+      ...fileBlocks(right.files),
+    ];
+  }
   return [
-    right.text === text ? "The text stays as it is; the file is mended." : fenced("raterun", right.text),
+    right.text === text ? "The text stays as it is; the file is put right." : fenced("raterun", right.text),
     ...fileBlocks(Object.fromEntries(changed)),
   ];
 }

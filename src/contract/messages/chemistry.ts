@@ -20,7 +20,7 @@ export const chemistryMessages = {
     "error",
     "Every bracket of a formula is closed by one of its own kind and holds something.",
     ({ bracket }: { bracket: string }) =>
-      `The bracket ${bracket} of this formula is not closed by its partner, or holds nothing.`,
+      `The bracket ${bracket} of this formula is not closed by its partner, or holds nothing. Close it, or take it out.`,
   ),
   "formula-count": message(
     "error",
@@ -28,10 +28,16 @@ export const chemistryMessages = {
     ({ count }: { count: string }) =>
       `A formula cannot count ${count} atoms; counts are whole numbers from 1 to 99999.`,
   ),
+  "hydrate-not-whole": message(
+    "error",
+    "Counts in a formula are whole: a hemihydrate is written as two formula units with one water.",
+    ({ text, mend }: { text: string; mend: string }) =>
+      `Counts in a formula are whole numbers: write ${mend === "" ? "a multiple of it" : mend} for ${text}.`,
+  ),
   "formula-too-deep": message(
     "error",
     "Brackets of a formula stand at most ten deep.",
-    () => "The brackets of this formula stand more than ten deep.",
+    () => "The brackets of this formula stand more than ten deep. Write it with fewer, or give it a name: species dye.",
   ),
   "charge-unreadable": message(
     "error",

@@ -28,7 +28,8 @@ export const dataMessages = {
   "data-unreadable": message<{ file: string; reason: string }>(
     "error",
     "The data file is there but the system does not let it be read.",
-    ({ file, reason }) => `${file} cannot be read: ${reason}.`,
+    ({ file, reason }) =>
+      `${file} cannot be read: ${reason}. Check who may read it, and whether another program holds it.`,
   ),
   "data-changed-while-read": message<{ file: string }>(
     "error",
@@ -87,7 +88,8 @@ export const dataMessages = {
   "data-no-rows": message<{ file: string; line: number }>(
     "error",
     "The data file has a header row and nothing under it.",
-    ({ file, line }) => `${file} has headers in line ${line} but no readings under them.`,
+    ({ file, line }) =>
+      `${file} has headers in line ${line} but no readings under them. Check that the instrument saved its readings.`,
   ),
   "data-no-header": message<{ file: string; header: string }>(
     "error",

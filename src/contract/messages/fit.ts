@@ -94,7 +94,7 @@ export const fitMessages = {
     "warning",
     "The residuals keep their sign for too long: the curve does not follow the readings.",
     ({ p }) =>
-      `The residuals change sign too seldom for chance (runs test, p = ${p}): the law does not follow the readings, or they drift. The stated uncertainty of k is then too small.`,
+      `The residuals change sign too seldom for chance (runs test, p = ${p}): the law does not follow the readings, or they drift. The stated uncertainty of k is then too small. Look at the residuals; another law or another window may fit.`,
   ),
   "fit-end-unknown": message<{ end: string; species: string; missing: string }>(
     "error",

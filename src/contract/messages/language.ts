@@ -39,7 +39,7 @@ export const languageMessages = {
     "error",
     "A line stands where nothing takes it.",
     ({ head, owner }: { head: string; owner: string }) =>
-      `“${head}” belongs below a ${owner} line, and none is open here. Move it there.`,
+      `“${head}” belongs below a ${owner} line, and there is none above it that could take it. Move it below one.`,
   ),
   "line-twice": message(
     "error",
@@ -55,7 +55,8 @@ export const languageMessages = {
   "format-refused": message(
     "error",
     "A description was not formatted, because that would have changed what it says.",
-    ({ line }: { line: number }) => `The formatter would change the meaning of line ${line}; nothing was changed.`,
+    ({ line }: { line: number }) =>
+      `Formatting would change the meaning of line ${line}, so nothing was changed. The text can stay as it is.`,
   ),
   "name-malformed": message(
     "error",

@@ -17,7 +17,8 @@ export const quantityMessages = {
   "number-range": message(
     "error",
     "Numbers lie between about 1e-300 and 1e300.",
-    ({ text }: { text: string }) => `${text} is beyond the numbers that can be computed with; choose another unit.`,
+    ({ text }: { text: string }) =>
+      `${text} is beyond the numbers that can be computed with, about 1e-300 to 1e300; correct it, or choose another unit.`,
   ),
   "uncertainty-unreadable": message(
     "error",
@@ -80,12 +81,15 @@ export const quantityMessages = {
     "error",
     "The symbol is not one of the units known: SI units with their prefixes and the trade's own (M, min, h, d, bar, atm, Torr, mmHg, °C, cal).",
     ({ text, near }: { text: string; near: string }) =>
-      near === "" ? `${text} is not a known unit.` : `${text} is not a known unit; write ${near}.`,
+      near === ""
+        ? `${text} is not a known unit; units go by their symbols, such as mL, mol/L or s^-1.`
+        : `${text} is not a known unit; write ${near}.`,
   ),
   "unit-prefix": message(
     "error",
     "Some units take no prefix: min, h, d, atm, mmHg, °C.",
-    ({ text, unit }: { text: string; unit: string }) => `${text} is not a known unit: ${unit} takes no such prefix.`,
+    ({ text, unit }: { text: string; unit: string }) =>
+      `${text} is not a known unit: ${unit} takes no such prefix. Write ${unit}, with the number that belongs to it.`,
   ),
   "unit-ambiguous": message(
     "error",

@@ -8,6 +8,9 @@ const withPath = (path: string): string => runWith("data/a.csv", path);
 
 /** The sound file with semicolons between the cells and decimal commas. */
 const semicolons = soundFile.replaceAll(",", ";").replaceAll(".", ",");
+/** What is not known is taken out, not made up. */
+const withoutRow = fileWith("60,0.0404\n", "");
+
 /** Time as a column of dates or clock times. */
 const clocked = runWith('"t / s"', '"clock"');
 
@@ -95,8 +98,8 @@ export const dataExamples: CodeExamples = {
     files: soundFiles,
     write: ["column c 3", "column c 2"],
   },
-  "data-cell-empty": { text: soundRun, files: fileWith("60,0.0404", "60,"), rightFiles: soundFiles },
-  "data-cell-word": { text: soundRun, files: fileWith("0.0404", "bubble"), rightFiles: soundFiles },
+  "data-cell-empty": { text: soundRun, files: fileWith("60,0.0404", "60,"), rightFiles: withoutRow },
+  "data-cell-word": { text: soundRun, files: fileWith("0.0404", "bubble"), rightFiles: withoutRow },
   "data-thousands-mark": {
     text: runWith('mol/L"', 'mmol/L"').replace("0.100 mol/L", "1300 mmol/L"),
     files: {
@@ -104,7 +107,7 @@ export const dataExamples: CodeExamples = {
     },
     rightFiles: { "data/a.csv": thousands("1303") },
   },
-  "data-row-short": { text: soundRun, files: fileWith("60,0.0404", "60"), rightFiles: soundFiles },
+  "data-row-short": { text: soundRun, files: fileWith("60,0.0404", "60"), rightFiles: withoutRow },
   "data-row-long": { text: soundRun, files: fileWith("60,0.0404", "60,0.0404,7"), rightFiles: soundFiles },
   "data-time-backwards": {
     text: soundRun,
@@ -126,7 +129,7 @@ export const dataExamples: CodeExamples = {
   "data-cell-time": {
     text: clocked,
     files: { "data/a.csv": timedFile("clock", (clock, index) => (index === 3 ? "late" : clock)) },
-    rightFiles: { "data/a.csv": timedFile("clock", (clock) => clock) },
+    rightFiles: { "data/a.csv": timedFile("clock", (clock) => clock).replace(/^00:01:00.*\n/m, "") },
   },
   "data-time-offset": {
     text: clocked,

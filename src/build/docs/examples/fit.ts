@@ -48,9 +48,9 @@ export const fitExamples: CodeExamples = {
   },
   "column-not-numbers": {
     beside: "data-cell-word",
-    text: soundRun,
-    files: { "data/a.csv": soundFile.replace(/,0.0\d+/g, ",low") },
-    rightFiles: soundFiles,
+    text: runWith('column c "c / mol/L"', 'column c "level" mol/L'),
+    files: { "data/a.csv": soundFile.replace("s,", "s,level,").replace(/^(\d+),/gm, "$1,low,") },
+    write: ['column c "level" mol/L', 'column c "c / mol/L"'],
   },
   "uncertainty-of-zero": {
     text: runWith('"c / mol/L"\n', '"c / mol/L"\n      random 1 %\n'),
@@ -58,8 +58,14 @@ export const fitExamples: CodeExamples = {
     write: ["random 1 %", "random 0.0005 mol/L"],
   },
   "rate-outside-readings": { text: withRate("rate at 300 s"), files: soundFiles, write: ["300 s", "60 s"] },
-  "rate-few-readings": { text: withRate("rate at 20 s"), files: firstReadings(2), rightFiles: soundFiles },
+  "rate-few-readings": {
+    otherReadings: true,
+    text: withRate("rate at 20 s"),
+    files: firstReadings(2),
+    rightFiles: soundFiles,
+  },
   "rate-initial-late": {
+    otherReadings: true,
     text: withRate("rate initial"),
     files: {
       "data/a.csv": "t / s,c / mol/L\n0,0.1003\n60,0.0404\n120,0.0167\n180,0.0067\n240,0.0026\n300,0.0012\n",
@@ -85,6 +91,7 @@ export const fitExamples: CodeExamples = {
     write: ["infinity free", "infinity fixed 0 mol/L"],
   },
   "fit-infinity-at-bound": {
+    otherReadings: true,
     text: `${soundRun}    infinity free\n`,
     files: {
       "data/a.csv":
@@ -93,6 +100,7 @@ export const fitExamples: CodeExamples = {
     rightFiles: soundFiles,
   },
   "fit-residuals-run": {
+    otherReadings: true,
     text: soundRun,
     files: { "data/a.csv": bent(0.00003) },
     rightFiles: { "data/a.csv": bent(0) },
