@@ -11,6 +11,7 @@ export const chemistryExamples: CodeExamples = {
   "species-unknown": { text: taken("Xx2"), write: ["Xx2", "I2"] },
   "formula-bracket": { text: taken("Ca(OH2"), write: ["Ca(OH2", "Ca(OH)2"] },
   "formula-count": { text: taken("CH0"), write: ["CH0", "CH4"] },
+  "hydrate-not-whole": { text: taken("CaSO4·0.5H2O"), write: ["CaSO4·0.5H2O", "(CaSO4)2·H2O"] },
   "formula-too-deep": {
     text: taken("((((((((((((NaCl))))))))))))"),
     write: ["((((((((((((NaCl))))))))))))", "NaCl"],
