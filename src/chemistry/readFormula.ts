@@ -9,10 +9,10 @@ import { recased } from "./recased.js";
 const partner: Readonly<Record<string, string>> = { "(": ")", "[": "]", "{": "}" };
 
 /**
- * The formula at the start of `text`, and where it ends: nested brackets, hydrates (`·`, `.`, `*`), subscripts, charges
+ * The formula at the start of `text`, and where it ends: nested brackets, hydrates (`·`, `.`, `*`; spaces around `·`), subscripts, charges
  * `^2-`, `²⁻`, `+`, `-`, `++`, isotopes D and T, the electron `e-`. A bare `+` with something right behind it is left
  * to the caller, who joins species by it. Refuses unknown symbols, and a digit before a bare sign, which has two
- * readings. States are not part of it (`readSpecies`).
+ * readings, and a share of a water (`·½H2O`). States are not part of it (`readSpecies`).
  */
 export function readFormula(text: string): { formula: Formula; end: number } | Fault {
   const plain = fromSubscript(plainText(text));
@@ -21,7 +21,7 @@ export function readFormula(text: string): { formula: Formula; end: number } | F
   }
   const body = bodyOf(plain);
   if (isFault(body)) return body;
-  const written = plain.slice(0, body.end).replace(/[·*]/g, ".");
+  const written = plain.slice(0, body.end).replace(/ /g, "").replace(/[·*]/g, ".");
   const charge = chargeOf(plain, body.end, written);
   if (isFault(charge)) return charge;
   const formula = { parts: body.parts, charge: charge.charge, text: written + chargeText(charge.charge) };
@@ -41,13 +41,36 @@ function bodyOf(text: string): Counted | Fault {
     const count = at === 0 ? "" : (/^\d*/.exec(text.slice(at))?.[0] ?? "");
     const multiple = count === "" ? 1 : whole(count);
     if (multiple === null) return fault("formula-count", { count }, { start: at, end: at + count.length });
-    const group = groupOf(text, at + count.length, 0);
+    const space = count !== "" && text.charAt(at + count.length) === " " ? 1 : 0;
+    const group = groupOf(text, at + count.length + space, 0);
     if (isFault(group)) return group;
     add(parts, group.parts, multiple);
     at = group.end;
-    if (!/^[·.*](?=\d*[A-Z([{])/.test(text.slice(at))) return { parts, end: at };
-    at += 1;
+    const half = hydrateShare(text, at);
+    if (half !== null) return half;
+    const dot = /^(?:[·.*]| ?· ?)(?=\d* ?[A-Z([{])/.exec(text.slice(at))?.[0];
+    if (dot === undefined) return { parts, end: at };
+    at += dot.length;
   }
+}
+
+const shares: Readonly<Record<string, string>> = { "½": "1/2", "¼": "1/4", "¾": "3/4" };
+
+/** The fault of a hydrate with a share of a water: twice (four times …) the formula has whole counts. */
+function hydrateShare(text: string, at: number): Fault | null {
+  const found = /^[·.*](½|¼|¾|\d{1,2}[./]\d{1,2})([A-Z][A-Za-z0-9]*)/.exec(text.slice(at));
+  if (found === null) return null;
+  const [all, share = "", water = ""] = found;
+  const span = { start: 0, end: at + all.length };
+  const [num = 0, den = 1] = (shares[share] ?? share).split("/").map(Number);
+  const times = [2, 3, 4].find((factor) => Number.isInteger((num / den) * factor)) ?? 0;
+  const body = text.slice(0, at);
+  const count = (num / den) * times;
+  if (times === 0 || count < 1 || /[·.*]/.test(body)) {
+    return fault("hydrate-not-whole", { text: text.slice(0, span.end), mend: "" }, span);
+  }
+  const mend = `(${body})${times}·${count === 1 ? "" : count}${water}`;
+  return fault("hydrate-not-whole", { text: text.slice(0, span.end), mend }, span, [replacement(span, mend)]);
 }
 
 /** Symbols and brackets, each with its count, from `from` up to what is neither. */

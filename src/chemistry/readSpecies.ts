@@ -1,4 +1,4 @@
-import { type Fault, fault } from "../contract/problem.js";
+import { type Fault, fault, replacement } from "../contract/problem.js";
 import { plainText } from "../quantity/plainText.js";
 import { isFault } from "../quantity/shifted.js";
 import type { Formula } from "./formula.js";
@@ -24,14 +24,15 @@ export interface Species {
  */
 export function readSpecies(text: string, isDeclared: (name: string) => boolean = () => false): Species | Fault {
   const name = declaredName(text, isDeclared);
+  const capital = name === null ? /^[A-Za-z0-9()[\]₀-₉]*?[A-Za-z0-9)\]₀-₉](\((?:L|G|AQ|Aq|aQ)\))/.exec(text) : null;
+  if (capital !== null) return notAState(capital[1] ?? "", capital[0].length);
   const formula = name === null ? readFormula(text) : null;
   if (formula !== null && isFault(formula)) return formula;
   const nameEnd = name?.length ?? formula?.end ?? 0;
   const found = /^ ?\((s|l|g|aq)\)/.exec(plainText(text).slice(nameEnd));
   if (found === null) {
-    const other = /^\(([a-z]{1,10})\)/.exec(text.slice(nameEnd));
-    if (other !== null)
-      return fault("state-unknown", { state: other[1] ?? "" }, { start: nameEnd, end: nameEnd + other[0].length });
+    const other = /^\([a-z]{1,10}\.?\)/.exec(text.slice(nameEnd))?.[0];
+    if (other !== undefined) return notAState(other, nameEnd + other.length);
   }
   return {
     key: name ?? formula?.formula.text ?? "",
@@ -40,6 +41,29 @@ export function readSpecies(text: string, isDeclared: (name: string) => boolean 
     nameEnd,
     end: nameEnd + (found?.[0].length ?? 0),
   };
+}
+
+const meant: Readonly<Record<string, State>> = {
+  solid: "s",
+  cr: "s",
+  sol: "s",
+  liq: "l",
+  liquid: "l",
+  gas: "g",
+  vap: "g",
+  aqu: "aq",
+  aqueous: "aq",
+  sln: "aq",
+};
+
+/** The fault of `(liq)` or `(L)`, which ends at `end`, with the state that was meant where that is plain. */
+function notAState(written: string, end: number): Fault {
+  const span = { start: end - written.length, end };
+  const state = written.slice(1, -1);
+  const small = state.toLowerCase().replace(".", "");
+  const plain = (["s", "l", "g", "aq"] as const).find((one) => one === small) ?? meant[small];
+  const mends = plain === undefined ? [] : [replacement(span, `(${plain})`)];
+  return fault("state-unknown", { state }, span, mends);
 }
 
 /** The longest declared name that `text` begins with and that ends at the end of a word. */

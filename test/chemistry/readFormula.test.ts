@@ -1,8 +1,10 @@
 import assert from "node:assert/strict";
 import fc from "fast-check";
-import { printedFormula } from "../../src/chemistry/formula.js";
+import { chargeText, printedFormula } from "../../src/chemistry/formula.js";
+import { anions, cations, otherIons } from "../../src/chemistry/handbook/ions.js";
 import { readFormula } from "../../src/chemistry/readFormula.js";
 import { readSpecies } from "../../src/chemistry/readSpecies.js";
+import { isFault } from "../../src/quantity/shifted.js";
 import { faultOf, mended, valid, words } from "../quantity/faultOf.js";
 
 describe("readFormula", () => {
@@ -22,6 +24,8 @@ describe("readFormula", () => {
     ["[Co(NH3)5Br]^2+", "[Co(NH3)5Br]^2+", { Co: 1, N: 5, H: 15, Br: 1 }, 2],
     ["CuSO4·5H2O", "CuSO4.5H2O", { Cu: 1, S: 1, O: 9, H: 10 }, 0],
     ["CuSO4.5H2O", "CuSO4.5H2O", { Cu: 1, S: 1, O: 9, H: 10 }, 0],
+    ["CuSO4 · 5 H2O", "CuSO4.5H2O", { Cu: 1, S: 1, O: 9, H: 10 }, 0],
+    ["CuSO4 · 5H2O", "CuSO4.5H2O", { Cu: 1, S: 1, O: 9, H: 10 }, 0],
     ["Al2(SO4)3", "Al2(SO4)3", { Al: 2, S: 3, O: 12 }, 0],
     ["K4[Fe(CN)6].3H2O", "K4[Fe(CN)6].3H2O", { K: 4, Fe: 1, C: 6, N: 6, H: 6, O: 3 }, 0],
     ["Co", "Co", { Co: 1 }, 0],
@@ -90,6 +94,15 @@ describe("readFormula", () => {
     ],
     ["H0", "A formula cannot count 0 atoms; counts are whole numbers from 1 to 99999.", []],
     ["H123456", "A formula cannot count 123456 atoms; counts are whole numbers from 1 to 99999.", []],
+    // hydrate-not-whole
+    ["CaSO4·½H2O", "Counts in a formula are whole numbers: write (CaSO4)2·H2O for CaSO4·½H2O.", ["(CaSO4)2·H2O"]],
+    ["CaSO4.0.5H2O", "Counts in a formula are whole numbers: write (CaSO4)2·H2O for CaSO4.0.5H2O.", ["(CaSO4)2·H2O"]],
+    [
+      "Na2CO3·1.5H2O",
+      "Counts in a formula are whole numbers: write (Na2CO3)2·3H2O for Na2CO3·1.5H2O.",
+      ["(Na2CO3)2·3H2O"],
+    ],
+    ["CoCl2·0.17H2O", "Counts in a formula are whole numbers: write a multiple of it for CoCl2·0.17H2O.", []],
     ["Fe^", "After ^ a charge is expected, as in Fe^2- or Fe^+.", []],
     ["Fe^2", "After ^ a charge is expected, as in Fe^2- or Fe^+.", ["^2+", "^2-"]],
     ["Fe²", "After ^ a charge is expected, as in Fe^2- or Fe^+.", ["^2+", "^2-"]],
@@ -107,6 +120,20 @@ describe("readFormula", () => {
       });
     });
   }
+
+  it("offers every listed ion first where its charge is written bare", () => {
+    const bare = new Map<string, string>();
+    for (const { body, charge } of [...cations, ...anions, ...otherIons]) {
+      const written = `${body}${Math.abs(charge) === 1 ? "" : Math.abs(charge)}${charge > 0 ? "+" : "-"}`;
+      if (!bare.has(written)) bare.set(written, body + chargeText(charge));
+    }
+    assert.ok(bare.size > 80);
+    for (const [written, ion] of bare) {
+      const found = readFormula(written);
+      const first = isFault(found) ? found.mend?.[0]?.text : found.formula.text;
+      assert.equal(first, ion, written);
+    }
+  });
 
   it("reads its own normal form as the same formula", () => {
     const symbol = fc.constantFrom("H", "C", "Co", "O", "Na", "Cl", "D", "Fe");
@@ -140,6 +167,23 @@ describe("readSpecies", () => {
     assert.equal(valid(readSpecies("H2O (l)")).state, "l");
     assert.equal(valid(readSpecies("Na+(aq)")).key, "Na^+");
     assert.equal(words(faultOf(readSpecies("H2O(sol)"))), "(sol) is not a state; states are (s), (l), (g) and (aq).");
+    // state-unknown: what was meant is offered, where that is plain
+    const meant: [written: string, mend: string | null][] = [
+      ["H2O(L)", "H2O(l)"],
+      ["H2O(liq)", "H2O(l)"],
+      ["NaCl(aq.)", "NaCl(aq)"],
+      ["CO2(gas)", "CO2(g)"],
+      ["Ca(OH)2(AQ)", "Ca(OH)2(aq)"],
+      ["Mg(foo)", null],
+    ];
+    for (const [written, mend] of meant) {
+      const found = faultOf(readSpecies(written));
+      assert.equal(found.code, "state-unknown");
+      if (mend === null) assert.equal(found.mend, undefined);
+      else assert.equal(mended(written, found), mend);
+    }
+    assert.equal(valid(readSpecies("Ca(OH)2")).state, null);
+    assert.equal(valid(readSpecies("dye(l)", (name) => name === "dye")).state, "l");
   });
 
   it("lets a declared name win over a formula", () => {
