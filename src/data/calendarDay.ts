@@ -27,8 +27,8 @@ export function calendarDay({ yearFirst, fields }: DateText, order: DateOrder): 
 
 /** A day counted from 1970-01-01 as `2026-11-03`. */
 export function dayText(days: number): string {
-  // no year is longer than 366 days, so this is the year or one before
-  let year = 1970 + Math.floor(days / 366);
+  // no year is longer than 366 days nor shorter than 365, so this is the year or one before it
+  let year = 1970 + Math.floor(days / (days < 0 ? 365 : 366));
   while (daysBefore(year + 1, 1) <= days) year++;
   let month = 1;
   while (daysBefore(year, month + 1) <= days) month++;

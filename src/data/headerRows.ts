@@ -151,7 +151,8 @@ function blankSeparated(line: string, width: number): string[] {
 
 /**
  * Whether `lower` is a row of units under the names `upper`: as many names as columns, all of them words, and every
- * cell of `lower` a unit, in brackets or not, empty, or the sign for none; one at least is a unit.
+ * cell of `lower` a unit, in brackets or not, the form of a clock time, empty, or the sign for none; one at least is a
+ * unit.
  */
 function isUnitsUnder(
   upper: readonly string[],
@@ -165,6 +166,8 @@ function isUnitsUnder(
   const stated = lower
     .map(bareUnit)
     .filter((unit) => !/^(?:|-|–|1|[-a-z/. ]*\bh{1,2}:m{1,2}\S*|m{1,2}:s{1,2}\S*)$/i.test(unit));
+  // t / s and V / mL are a time and a volume with their units, though they could be tonnes and volts by something
+  if (stated.every((cell) => readUnit(cell).unit !== null)) return false;
   return stated.length > 0 && stated.every((unit) => readUnit(`x / ${unit}`).unit !== null);
 }
 

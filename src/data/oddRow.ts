@@ -39,11 +39,11 @@ function bareCells(content: string, delimiter: string): string[] {
     .filter((cell) => cell !== "");
 }
 
-/** Longer lines go through the decoder. */
+/** Longer lines go through the decoder, which takes long to start. */
 const short = 256;
 
 function decoded(bytes: Uint8Array): string | null {
-  if (bytes.length <= short && bytes.every(isAscii)) return String.fromCharCode(...bytes);
+  if (bytes.length <= short && isAscii(bytes)) return Reflect.apply(String.fromCharCode, null, bytes);
   try {
     return decoder.decode(bytes);
   } catch {
@@ -51,6 +51,7 @@ function decoded(bytes: Uint8Array): string | null {
   }
 }
 
-function isAscii(byte: number): boolean {
-  return byte < 0x80;
+function isAscii(bytes: Uint8Array): boolean {
+  for (let at = 0; at < bytes.length; at++) if (bytes[at]! >= 0x80) return false;
+  return true;
 }

@@ -19,8 +19,8 @@ export function readTable(bytes: Uint8Array, options: DataOptions, readUnit: Hea
 const headLength = 131_072;
 
 /**
- * A file whose body is plain numbers: the layout from its first lines, the body by the byte loop. Null for every other
- * file. The body needs no decoding, because what the loop takes is ASCII. Where the first lines show no decimal mark,
+ * A file whose rows each stand on a line of their own: the layout from its first lines, the body by the byte loop. Null for
+ * every other file. The body needs no decoding, because what the loop takes as numbers is ASCII. Where the first lines show no decimal mark,
  * a comma further down ends the loop, so that a layout from the whole text would not have been another.
  */
 export function readPlainTable(
@@ -34,7 +34,7 @@ export function readPlainTable(
   const { text, utf8Start } = decoded;
   const limits = limitsOf(options);
   const layout = tableLayout(text, options, limits, readUnit);
-  if (layout.kind !== "layout" || !layout.numeric || layout.width < 2) return null;
+  if (layout.kind !== "layout" || layout.width < 2) return null;
   if (!layout.settled && head.length < bytes.length) return null;
   if (notTextAt(text, 0, layout.bodyStart) >= 0) return null;
   const bodyStart = utf8Start + new TextEncoder().encode(text.slice(0, layout.bodyStart)).length;

@@ -17,8 +17,6 @@ export interface TableLayout {
   /** where the body begins: offset in the text, and the line, from 1 */
   readonly bodyStart: number;
   readonly bodyLine: number;
-  /** false where no row of numbers was found, so that only csv-parse can say what the rows are */
-  readonly numeric: boolean;
   /** whether the decimal mark is stated, shown by the first rows, or cannot be a comma */
   readonly markCertain: boolean;
   /** which columns hold dates or clock times, length `width` */
@@ -61,7 +59,6 @@ export function tableLayout(
   const markCertain = options.decimalComma !== undefined || marks > 0 || found.delimiter === ",";
   const decimalComma = options.decimalComma ?? hasDecimalComma(text, found);
   const { delimiter, header, start } = found;
-  const numeric = found.block !== null;
   const times = timeColumns(text, start, delimiter, width);
   return {
     kind: "layout",
@@ -71,7 +68,6 @@ export function tableLayout(
     width,
     bodyStart: start.start,
     bodyLine: start.number,
-    numeric,
     markCertain,
     times: times.kinds,
     headerWords: Array.from({ length: width }, (_, index) => wordsAbove(header, index)),

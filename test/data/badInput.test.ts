@@ -35,6 +35,22 @@ describe("bad data files: encodings", () => {
     assert.deepEqual(Object.keys(tableOf(latin("t,\x80 \x93x\x94\n0,1\n"))), ["t", "€ “x”"]);
   });
 
+  it("reads a decimal comma in UTF-16 of either order as in UTF-8, with a preamble and comments", () => {
+    const long = `Instrument;"x; y"\n# °C\n\n${text}`;
+    for (const file of [utf16(long, true), utf16(long, false), latin(long), `\ufeff${long}`]) {
+      const { decimalComma, headerLine } = columnsOf(file);
+      assert.deepEqual([tableOf(file), decimalComma, headerLine], [table, true, 4]);
+    }
+  });
+
+  it("says that half a character is missing at the end of UTF-16", () => {
+    const bytes = utf16(text, true);
+    assert.equal(
+      refusalOf(bytes.subarray(0, bytes.length - 1)),
+      "error: run.csv is not written in utf-16le. Leave the encoding out, or state the right one.",
+    );
+  });
+
   it("takes the stated encoding, but a mark goes before it", () => {
     // ISO 8859-5 puts the Cyrillic letter te at 0xE2 (ECMA-113)
     assert.deepEqual(Object.keys(tableOf(latin("\xe2,V\n0,1\n"), { encoding: "iso-8859-5" })), ["т", "V"]);
@@ -57,6 +73,8 @@ describe("bad data files: encodings", () => {
       `error: run.csv is not a text file (line ${line} holds bytes that no text has). Save the readings as text, for example as CSV in UTF-8.`;
     assert.equal(refusalOf("t,V\n0,1\n1,\u0000\n"), words(3));
     assert.equal(refusalOf("\u0000\u0000\u0000"), words(1));
+    // NUL bytes as a system leaves them at the end of a file when power fails, beyond the part that shows the layout too
+    assert.equal(refusalOf(`t,V\n${"0,1\n".repeat(50_000)}${"\u0000".repeat(4096)}`), words(50_002));
     // the first bytes of a ZIP archive, which a workbook is (APPNOTE 4.3.7)
     assert.equal(refusalOf(Uint8Array.from([0x50, 0x4b, 3, 4, 20, 0, 6, 0, 8, 0, 0, 0])), words(1));
     // the signature of a PNG file (PNG specification, 5.2)
@@ -163,6 +181,50 @@ describe("bad data files: what is said of cells and rows", () => {
     assert.deepEqual(said("t;V\n0;1,5\n1;2,5\n2;3.5\n"), [
       "error: run.csv, line 4: “3.5” under V has a point where this file is read with a decimal comma. Write all numbers of the file with the same mark.",
     ]);
+  });
+
+  it("thousands marks of every kind, in a number column and at its end", () => {
+    const words = (text: string): string =>
+      `warning: run.csv, line 3: “${text}” under V has a mark between its thousands. Write it without one; until then the point is left out.`;
+    for (const text of [
+      "1,234.5",
+      "1 234",
+      "1'234",
+      "1’234.5",
+      "1\u00a0234",
+      "1\u202f234",
+      "-12,345,678",
+      "1.234.567",
+    ]) {
+      assert.deepEqual(said(`t;V\n0;1.5\n1;${text}\n2;3.5\n`), [words(text)], text);
+    }
+    for (const text of ["1.234,5", "1 234,5", "1'234,5", "1.234.567"]) {
+      assert.deepEqual(said(`t;V\n0;1,5\n1;${text}\n2;3,5\n`), [words(text)], text);
+    }
+    assert.deepEqual(said("t;V\n0;1.5\n1;1 234\n2;2 234\n3;3 234\n4;1\n"), [
+      "warning: run.csv, line 3: “1 234” under V has a mark between its thousands, and so have 2 others. Write them without one; until then these points are left out.",
+    ]);
+    assert.deepEqual(said("t;V\n0;1.5\n1;1.234\n2;1 23\n"), [
+      "warning: run.csv, line 4: “1 23” under V is not a number. The point is left out.",
+    ]);
+  });
+
+  it("counts beyond the thousand faults that are kept, of every column and kind", () => {
+    const rows = "1,bubble\n".repeat(3000);
+    assert.deepEqual(said(`t,V\n0,1\n${rows}2,\n3\n4\n5,6,7\n${rows}`), [
+      "warning: run.csv, line 3: “bubble” under V is not a number, nor are 5999 others. These points are left out.",
+      "warning: run.csv, line 3003: the cell of V is empty. The point is left out.",
+      "warning: run.csv, line 3004: the row ends before V, and so does one other. These points are left out.",
+      "warning: run.csv, line 3006: the row has more cells than the 2 columns; the first too many is “7”. Look for a separator inside a number or a text.",
+    ]);
+    const columns = columnsOf(`t,V\nx,1\n${rows}x,\n0,1\n`);
+    const counts = columns.tallies.map(({ first: { kind, column }, count }) => [kind, column, count]);
+    assert.deepEqual(counts, [
+      ["word", 0, 2],
+      ["word", 1, 3000],
+      ["empty", 1, 1],
+    ]);
+    assert.equal(columns.faultCount, 3003);
   });
 
   it("stays silent about a sound file, and about other columns", () => {

@@ -41,6 +41,7 @@ function randomFile(seed: number, rare: number): string {
   const pad = (): string => (below(6) === 0 ? pick([" ", "  "]) : "");
   const quotes = below(5) === 0;
   const time = below(3) === 0 ? pick([clockText, dateText]) : null;
+  const words = below(8) === 0 ? pick(["ok", '"a b"', "°", '""']) : null;
   const start = below(80_000);
   const tail = delimiter.trim() !== "" && below(4) === 0 ? delimiter : "";
   const spoils = below(rare) === 0;
@@ -74,6 +75,7 @@ function randomFile(seed: number, rare: number): string {
   const rows = Array.from({ length: 1 + below(40) }, (_, row) => {
     const cells = Array.from({ length: width }, (_, column) => {
       const bare = column === 0 && time !== null ? time(start + row * 37) : numberText(below, pick, mark);
+      if (column === width - 1 && words !== null) return pad() + words + pad();
       return pad() + (quotes && below(3) > 0 ? `"${bare}"` : bare) + pad();
     });
     if (spoils && below(8) === 0) cells[below(width)] = pick(oddities);

@@ -1,4 +1,5 @@
 import assert from "node:assert/strict";
+import { rowOfLine } from "../../src/data/rowOfLine.js";
 import { columnsOf, tableOf } from "./reading.js";
 
 const expected = { "t / s": [0, 10, 20], "V / mL": [0, 1.5, -2.25] };
@@ -115,6 +116,17 @@ describe("reading a delimited file: headers", () => {
     assert.deepEqual([table.headerLine, [...table.lines]], [2, [5, 6]]);
   });
 
+  it("finds the header under a preamble of any length", () => {
+    for (const length of [1, 63, 64, 65, 1000, 20_000]) {
+      const preamble = Array.from({ length }, (_, index) => `Setting ${index};value ${index}`).join("\r\n");
+      const table = columnsOf(`${preamble}\r\nt / s;V / mL\r\n0;1,5\r\n1;2,5\r\n`);
+      assert.deepEqual(
+        [table.headerLine, table.columns.map(({ header }) => header), [...table.lines]],
+        [length + 1, ["t / s", "V / mL"], [length + 2, length + 3]],
+      );
+    }
+  });
+
   it("keeps hostile headers as they are: escaping is for those who show them", () => {
     const hostile = "<img src=x onerror=alert(1)>,[a](javascript:b)\n0,1\n1,2\n";
     assert.deepEqual(Object.keys(tableOf(hostile)), ["<img src=x onerror=alert(1)>", "[a](javascript:b)"]);
@@ -189,5 +201,14 @@ describe("reading a delimited file: cells that are no number", () => {
     const table = columnsOf("run,salt\nA,KI\nB,NaI\n");
     assert.deepEqual(Object.keys(tableOf("run,salt\nA,KI\nB,NaI\n")), ["run", "salt"]);
     assert.equal(table.faultCount, 4);
+  });
+});
+
+describe("the row of a line", () => {
+  it("is the one that begins there, and none elsewhere", () => {
+    const table = columnsOf('Device\nt,V\n0,1\n\n# off\n1,"a\nb"\n2,3\n');
+    const rows = Array.from({ length: 11 }, (_, line) => rowOfLine(table, line));
+    assert.deepEqual(rows, [null, null, null, 0, null, null, 1, null, 2, null, null]);
+    assert.equal(rowOfLine(columnsOf("t,V\n"), 1), null);
   });
 });
