@@ -196,7 +196,12 @@ describe("readQuantity", () => {
     ],
     ["5 s foo", "foo is not a known unit; units go by their symbols, such as mL, mol/L or s^-1.", [4, 7], null],
     ["50 mol/L s", "mol/L s could be mol/(L s) or mol s/L; write the one you mean.", [3, 10], "50 mol/(L s)"],
-    ["1e999 s", "1e999 is beyond the numbers that can be computed with; choose another unit.", [0, 5], null],
+    [
+      "1e999 s",
+      "1e999 is beyond the numbers that can be computed with, about 1e-300 to 1e300; correct it, or choose another unit.",
+      [0, 5],
+      null,
+    ],
   ];
   for (const [text, message, [start, end], mend] of refused) {
     it(`refuses “${text}” in words`, () => {
