@@ -1,6 +1,7 @@
 import type { Command } from "./command.js";
 import { check } from "./commands/check.js";
+import { format } from "./commands/format.js";
 import { report } from "./commands/report.js";
 
 /** Every command, in the order of the help. */
-export const commands: readonly Command[] = [check, report];
+export const commands: readonly Command[] = [check, report, format];

@@ -1,5 +1,5 @@
 import type { Description } from "../contract/findings.js";
-import { expandPaths } from "../host/node/expandPaths.js";
+import { expandPaths, type UnusedPath } from "../host/node/expandPaths.js";
 import { nodeReader } from "../host/node/nodeReader.js";
 import { inlineComputer } from "../workspace/computer.js";
 import { createWorkspace } from "../workspace/workspace.js";
@@ -13,7 +13,7 @@ export interface Described {
 
 /** Greatest size of a data file, and of a description, bytes. */
 const dataLimit = 512e6;
-const textLimit = 16e6;
+export const textLimit = 16e6;
 
 const unusedWords = {
   missing: "there is no such file or folder",
@@ -28,8 +28,7 @@ const unusedWords = {
  */
 export async function describeAll(paths: readonly string[], io: Io, curves: boolean): Promise<Described[] | null> {
   const { found, unused } = await expandPaths(paths, io.cwd);
-  for (const { argument, reason } of unused) io.err(`ratewright: ${argument}: ${unusedWords[reason]}.\n`);
-  if (unused.length > 0) return null;
+  if (sayUnused(unused, io)) return null;
   const reader = nodeReader();
   const access = { reader, sizeLimit: dataLimit, within: () => null };
   const workspace = createWorkspace(
@@ -50,6 +49,12 @@ export async function describeAll(paths: readonly string[], io: Io, curves: bool
     workspace.close(uri);
   }
   return described;
+}
+
+/** Says of each argument that leads to no description why; whether there was one. */
+export function sayUnused(unused: readonly UnusedPath[], io: Io): boolean {
+  for (const { argument, reason } of unused) io.err(`ratewright: ${argument}: ${unusedWords[reason]}.\n`);
+  return unused.length > 0;
 }
 
 export function hasError(described: readonly Described[]): boolean {

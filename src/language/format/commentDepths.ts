@@ -4,7 +4,7 @@ import type { SheetLine } from "./sheet.js";
 /**
  * How deep each comment that has a line of its own stands; null for every other line. It belongs to the line below it
  * and is as deep as that one. One that a blank line, or the end of the file, parts from what follows belongs to what
- * stands above it: there it keeps its own depth, if that is no deeper than the line above.
+ * stands above it: there it keeps its own depth, if that is no deeper than a line there could be.
  */
 export function commentDepths(lines: readonly SheetLine[]): (number | null)[] {
   const depths: (number | null)[] = lines.map(() => null);
@@ -34,11 +34,11 @@ function isComment(text: string): boolean {
   return lexLine(text)[0]?.kind === "comment";
 }
 
-/** The depth of the line that a comment stands below without a blank line between; null where there is none. */
+/** How deep a comment may stand below the line above it; null where there is none, or a blank line between. */
 function depthAbove(lines: readonly SheetLine[], from: number): number | null {
   for (let at = from - 1; at >= 0; at--) {
     const line = lines[at] as SheetLine;
-    if (line.place !== null) return line.place.depth;
+    if (line.place !== null) return line.place.depth + (line.place.row.opens === undefined ? 0 : 1);
     if (isBlank(line.text)) return null;
   }
   return null;

@@ -1,10 +1,10 @@
-import { type Edit, type Problem, problem } from "../../contract/problem.js";
+import type { Edit } from "../../contract/problem.js";
 import { failure, type Result, success } from "../../contract/result.js";
 import { bind } from "../bind/bind.js";
 import { parse } from "../parse.js";
 import { type LaidOutLine, layOut } from "./layOut.js";
-import { sameLine } from "./lineMeaning.js";
 import type { Signs } from "./quantitySigns.js";
+import { refusal } from "./refusal.js";
 import { type Essence, essenceOf, hasEssence } from "./sameMeaning.js";
 
 /** Which of the two notations the formatter writes: `° µ · ± → ⇌ ⁻¹`, or `deg u * +/- -> <=> ^-1`. */
@@ -67,14 +67,4 @@ function edited(text: string, edits: readonly Edit[]): string {
     at = edit.end;
   }
   return result + text.slice(at);
-}
-
-/** Names the first line whose words would say something else; the first that changes where none does by itself. */
-export function refusal(uri: string, lines: readonly LaidOutLine[], offset = 0): Problem {
-  const changed = lines.filter(({ line, text }) => text !== line.text);
-  const wrong = changed.find(({ line, text }) => !sameLine(line.text, text ?? "", () => false)) ?? changed[0];
-  const line = wrong?.line;
-  const start = (line?.start ?? 0) + offset;
-  const number = line === undefined ? 1 : lines.findIndex((candidate) => candidate.line === line) + 1;
-  return problem("format-refused", { line: number }, { uri, start, end: start + (line?.text.length ?? 0) });
 }

@@ -3,12 +3,13 @@ import { fromSuperscript, toSuperscript } from "../../quantity/plainText.js";
 /** Which signs the formatter writes: those of print, those of a keyboard, or the ones that stand there. */
 export type Signs = "unicode" | "ascii" | "as written";
 
+const raised = "[⁺⁻]?[⁰¹²³⁴-⁹]+";
 const digits = String.raw`(?:\d+(?:[\u2009\u202f]\d{3})*(?:\.\d+)?|\.\d+)`;
-const number = String.raw`[-+\u2212]?${digits}(?:\(\d+(?:\.\d+)?\))?(?:[eE][-+\u2212]?\d+)?`;
+const power = String.raw`(?:[eE][-+\u2212]?\d+| ?[×xX*·] ?10(?:\^[-+\u2212]?\d+|${raised}))`;
+const number = String.raw`[-+\u2212]?${digits}(?:\(\d+(?:\.\d+)?\))?${power}?`;
 /** A number with its unit right behind it; neither the exponent of `5e3` nor that of `5x10^3` is a unit. */
 const glued = new RegExp(String.raw`(?<=^|[ (])(${number})(?=[\p{L}%‰°º˚℃℉])(?![eE][-+\u2212]?\d|[xX] ?10)`, "gu");
 const plusMinus = / *(±|\+ ?\/ ?-|\+-(?=[ .\d])) */g;
-const raised = "[⁺⁻]?[⁰¹²³⁴-⁹]+";
 const timesTen = new RegExp(`(?<=[\\d)]) ?[×xX*·] ?10(?=\\^|${raised})`, "gu");
 
 /**
