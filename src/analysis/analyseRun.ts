@@ -10,7 +10,7 @@ import { fitsOf } from "./fits.js";
 import { type Notes, note } from "./notes.js";
 import { ratesOf } from "./rates.js";
 import { type ReadSignal, readSignal } from "./readSignal.js";
-import type { RunInput } from "./runInput.js";
+import { lineIn, type RunInput } from "./runInput.js";
 import { resultUnits, shown, shownQuantity } from "./shown.js";
 import { sourcesOf } from "./sources.js";
 import { type Stoichiometry, standardUncertainty, stoichiometry } from "./stoichiometry.js";
@@ -89,17 +89,14 @@ function contextOf(
   const number = run.reaction?.numbers.get(follow.species.key) ?? 0;
   if (monitor === undefined) {
     const what = `“${follow.species.key} as ${follow.monitor}”`;
-    note(notes, follow.id, problem("not-computed-yet", { what }, follow.origin));
+    note(notes, follow.id, problem("not-computed-yet", { what }, lineIn(run, follow)));
     return null;
   }
   // A reaction that is broken, or that does not change the species, has been said to be so on its line.
   if (number === 0) return null;
-  const relation = monitor.relate(run, follow, read.signal);
-  if (!relation.ok) {
-    note(notes, follow.id, relation.problem);
-    return null;
-  }
-  return { run, follow, signal: read.signal, relation: relation.value, stoichiometry: amounts };
+  const { relation, problems } = monitor.relate(run, follow, read.signal);
+  for (const found of problems) note(notes, follow.id, { ...found, origin: lineIn(run, found) });
+  return relation === null ? null : { run, follow, signal: read.signal, relation, stoichiometry: amounts };
 }
 
 function followFinding(

@@ -71,6 +71,13 @@ export function resolveInfinity(context: EndContext, wish: EndPoint): ResolvedEn
   return { kind: "free", ...boundsOfInfinity(context, exhausted) };
 }
 
+/** The signal when the limiting reactant is used up, SI; null where it does not follow, or the reaction goes back. */
+export function stoichiometricInfinity(context: EndContext): Uncertain | null {
+  if (context.run.reaction?.reversible !== false) return null;
+  const end = endConcentration(context);
+  return end === null ? null : signalOf(context, end);
+}
+
 /** Concentration of the followed species when the limiting reactant is used up. */
 function endConcentration({ run, follow, stoichiometry }: EndContext): Uncertain | null {
   const initial = stoichiometry.initial.get(follow.species.key);
@@ -108,7 +115,10 @@ function commonSize(signal: Signal): number {
 }
 
 function signalOf({ relation }: EndContext, concentration: Uncertain): Uncertain {
-  return plusTimes(exact(relation.zero), relation.slope, concentration);
+  const signal = plusTimes(exact(relation.zero), relation.slope, concentration);
+  const size = relation.slope * concentration.value;
+  const ofSlope = new Map([...relation.causes].map(([name, share]) => [name, share * size] as const));
+  return plusTimes(signal, 1, { value: 0, causes: ofSlope });
 }
 
 function statedEnd(

@@ -5,7 +5,7 @@ import { fromSI } from "../quantity/conversion.js";
 import { formatNumber, formatQuantity } from "../quantity/formatNumber.js";
 import type { Species } from "../study/reaction.js";
 import type { FitWish } from "../study/run.js";
-import type { EndContext } from "./endPoints.js";
+import { type EndContext, stoichiometricInfinity } from "./endPoints.js";
 import { type Estimates, estimatesOf } from "./estimates.js";
 import type { FirstOrderFit } from "./fitFirstOrder.js";
 import { refuseUndetermined } from "./fitRefusals.js";
@@ -15,6 +15,7 @@ import { scaled, shownParameter, totalUncertainty } from "./parameter.js";
 import { residualFindings } from "./residualFindings.js";
 import { lineIn } from "./runInput.js";
 import { type ResultUnits, rateConstantUnit, shown } from "./shown.js";
+import { standardUncertainty } from "./stoichiometry.js";
 
 /** A fit as findings show it, or why it is none after all. What a person should know of it goes into the notes. */
 export function judgeFit(
@@ -62,8 +63,8 @@ export function judgeFit(
     verdict: "",
   };
   warn(context, wish, result, estimates, finding, notes);
-  const balanced = context.run.reaction?.balance !== "unbalanced";
-  return { finding: { ...finding, verdict: verdictOf(finding, (kPrime * last) / log(2), balanced) }, estimates };
+  const verdict = verdictOf(finding, (kPrime * last) / log(2)) + besideVerdict(context, result);
+  return { finding: { ...finding, verdict }, estimates };
 }
 
 /** Covariance of what was fitted, random and common together, in the units of the parameters; k, start, infinity. */
@@ -131,7 +132,7 @@ function warn(
   }
 }
 
-function verdictOf(finding: FitFinding, halfLives: number, balanced: boolean): string {
+function verdictOf(finding: FitFinding, halfLives: number): string {
   const k = finding.parameters["k"];
   if (k === undefined) return "";
   const share = k.u === null ? "" : `, known to ${((100 * k.u) / k.value).toPrecision(2)} %`;
@@ -142,6 +143,15 @@ function verdictOf(finding: FitFinding, halfLives: number, balanced: boolean): s
         : ""
       : ` (95 %: ${k.interval95.map((end) => formatNumber(Number(end.toPrecision(4)), null)).join(" to ")})`;
   const span = `${finding.points} readings over ${halfLives.toPrecision(2)} half-lives`;
-  const doubt = balanced ? "" : " The equation does not balance: k will change with its coefficients.";
-  return `k = ${k.text}${interval}${share}, from ${span}.${doubt}`;
+  return `k = ${k.text}${interval}${share}, from ${span}.`;
+}
+
+/** What stands beside a verdict: the infinity by stoichiometry where another was fitted, and a doubt about the equation. */
+function besideVerdict(context: EndContext, { infinity }: FirstOrderFit): string {
+  const end = infinity.kind === "fixed" ? null : stoichiometricInfinity(context);
+  const { unit } = context.signal;
+  const said =
+    end === null ? "" : ` By stoichiometry the infinity is ${shown(end.value, standardUncertainty(end), unit).text}.`;
+  const balanced = context.run.reaction?.balance !== "unbalanced";
+  return balanced ? said : `${said} The equation does not balance: k will change with its coefficients.`;
 }

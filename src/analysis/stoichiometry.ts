@@ -1,7 +1,9 @@
 import { ionsOf } from "../chemistry/handbook/dissociation.js";
+import { stockConcentration } from "../chemistry/stock.js";
 import { molarMassOf } from "../monitor/molarMassOf.js";
 import { isKind } from "../quantity/kinds.js";
-import { combined } from "../quantity/quantity.js";
+import { combined, type Quantity } from "../quantity/quantity.js";
+import { isFault } from "../quantity/shifted.js";
 import type { Run, Taken } from "../study/run.js";
 import { rootOfSquares } from "./parameter.js";
 
@@ -28,30 +30,62 @@ export function standardUncertainty({ causes }: Uncertain): number | null {
 
 /** Concentration in the mixture of what a `taken` line states, mol m⁻³; null where the volume or the formula lacks. */
 export function takenConcentration(run: Run, taken: Taken): Uncertain | null {
-  const { given, species } = taken;
-  const name = `${species.key} taken`;
-  const stated = combined(given.sources);
-  const own: Uncertain = { value: given.value, causes: stated === null ? new Map() : new Map([[name, stated]]) };
-  if (isKind(given.unit, "concentration")) return own;
+  const { given } = taken;
+  if (isKind(given.unit, "concentration")) return stated(taken, given);
   if (run.volume === null) return null;
-  const amount = isKind(given.unit, "amount") ? own : amountOfMass(own, taken);
-  if (amount === null) return null;
-  const volume = run.volume.value;
-  const uVolume = combined(volume.sources);
-  const value = amount.value / volume.value;
-  const causes = new Map([...amount.causes].map(([cause, shift]) => [cause, shift / volume.value] as const));
-  if (uVolume !== null) causes.set("volume", (-value * uVolume) / volume.value);
-  return { value, causes };
+  const amount = amountTaken(taken);
+  return amount === null ? null : quotient(amount, named("volume", run.volume.value));
 }
 
-function amountOfMass(mass: Uncertain, { species }: Taken): Uncertain | null {
+/** Amount that a `taken` line states: itself, of a mass by purity and molar mass, of a volume by the stock; mol. */
+function amountTaken(taken: Taken): Uncertain | null {
+  const { given, species, purity } = taken;
+  if (isKind(given.unit, "amount")) return stated(taken, given);
+  if (isKind(given.unit, "volume")) {
+    const stock = stockOf(taken);
+    return stock === null ? null : product(stated(taken, given), stock);
+  }
   const molar = molarMassOf(species);
   if (molar === null) return null;
-  const value = mass.value / molar.value;
-  const causes = new Map([...mass.causes].map(([cause, shift]) => [cause, shift / molar.value] as const));
-  const u = combined(molar.sources);
-  if (u !== null) causes.set(`molar mass of ${species.key}`, (-value * u) / molar.value);
-  return { value, causes };
+  const mass = quotient(stated(taken, given), named(`molar mass of ${species.key}`, molar));
+  return purity === null ? mass : product(mass, named(`purity of ${species.key}`, purity));
+}
+
+/** Concentration of the stock a volume was taken of; null where it does not follow, which its line has been told. */
+function stockOf({ species, stock, density }: Taken): Uncertain | null {
+  if (stock === null) return null;
+  const facts = {
+    species: species.key,
+    molarMass: molarMassOf(species),
+    density,
+    pureDensity: stock.kind === "share" && stock.basis === "volume" ? density : null,
+    solventMolarMass: null,
+  };
+  const found = stockConcentration(stock, facts, { start: 0, end: 0 });
+  return isFault(found) ? null : named(`stock of ${species.key}`, found);
+}
+
+function stated({ species }: Taken, given: Quantity): Uncertain {
+  return named(`${species.key} taken`, given);
+}
+
+/** A quantity as one cause. */
+export function named(name: string, { value, sources }: Quantity): Uncertain {
+  const u = combined(sources);
+  return { value, causes: u === null || u === 0 ? new Map() : new Map([[name, u]]) };
+}
+
+/** a · b, to first order (JCGM 100:2008, 5.1.2). */
+function product(a: Uncertain, b: Uncertain): Uncertain {
+  const scaledA = plusTimes(exact(0), b.value, a);
+  const withB = plusTimes(scaledA, a.value, { value: 0, causes: b.causes });
+  return { value: a.value * b.value, causes: withB.causes };
+}
+
+/** a / b, to first order; b is not 0. */
+function quotient(a: Uncertain, b: Uncertain): Uncertain {
+  const inverse = plusTimes(exact(0), -1 / (b.value * b.value), { value: 0, causes: b.causes });
+  return product(a, { value: 1 / b.value, causes: inverse.causes });
 }
 
 /** What was taken against the equation of a run: who runs out first, and how far the reaction can go. */
@@ -77,8 +111,10 @@ export function stoichiometry(run: Run): Stoichiometry {
     initial.set(taken.species.key, concentration);
     // A salt, strong acid or strong base counts as its ions, where the equation names those and not itself.
     const { key, formula } = taken.species;
-    const ions = formula === null || reaction.numbers.has(key) ? null : ionsOf(formula.text);
-    for (const ion of ions ?? []) {
+    if (reaction.numbers.has(key)) continue;
+    for (const ion of taken.ions?.map((stated) => ({ key: stated.key, count: 1 })) ??
+      ionsOf(formula?.text ?? "") ??
+      []) {
       initial.set(ion.key, plusTimes(initial.get(ion.key) ?? exact(0), ion.count, concentration));
     }
   }

@@ -330,10 +330,18 @@ function endOfWords(cursor: Cursor, from: number): number {
     const token = cursor.tokens[at] as Token;
     const partOfIt = token.kind === "word" || (token.kind === "operator" && token.text === "±");
     if (!partOfIt) break;
-    if (at > from && depth === 0 && (stopWords.has(token.text) || statementByHead.has(token.text))) break;
+    if (at > from && beginsBasis(cursor, at - 1)) continue;
+    const ends = stopWords.has(token.text) || statementByHead.has(token.text);
+    if (at > from && depth === 0 && ends && !beginsBasis(cursor, at)) break;
     for (const letter of token.text) depth += letter === "(" ? 1 : letter === ")" ? -1 : 0;
   }
   return at;
+}
+
+/** `by mass` behind a share, or whatever stands in its place: what it is a share of is a part of its unit. */
+function beginsBasis(cursor: Cursor, at: number): boolean {
+  const before = cursor.tokens[at - 1]?.text ?? "";
+  return cursor.tokens[at]?.text === "by" && /(%|‰|ppm|ppb)$/.test(before);
 }
 
 function wantedButFound(cursor: Cursor, parts: readonly Part[], row: StatementRow | null, found?: Token): void {

@@ -52,7 +52,7 @@ export const orders = (label = "orders"): Part => ({ part: "orders", label });
 export const list = (label: string, of: Part): Part => ({ part: "list", label, of });
 export const optional = (...parts: Part[]): Part => ({ part: "optional", parts });
 export const either = (...options: Part[][]): Part => ({ part: "either", options });
-export const any = (...options: Part[][]): Part => ({ part: "any", options });
+export const inAnyOrder = (...options: Part[][]): Part => ({ part: "any", options });
 /** One of several fixed phrases. */
 export const oneOf = (label: string, ...phrases: string[]): Part =>
   either(...phrases.map((phrase) => [words(label, phrase)]));

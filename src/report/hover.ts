@@ -12,8 +12,8 @@ import { readingsUsed } from "./readingsUsed.js";
 type Follow = Run["follow"][number];
 
 /**
- * What resting on a column shows, as Markdown in six lines: what is followed, its picture, every fit with k and its
- * half-life in the order of the text, the rates, the readings used, what to watch. `column` is the name of a column of
+ * What resting on a column shows, as Markdown in six lines: what is followed, every fit with k and its half-life in
+ * the order of the text, its picture, the rates, the readings used, what to watch. `column` is the name of a column of
  * the run, or the id of one of its follow lines; for a column that nothing follows, such as that of the times, the span
  * of the readings. The findings must hold curves for the picture. `k` stands as `parameters.k.text` has it.
  */
@@ -41,10 +41,11 @@ function followLines(run: Run, follow: Follow, theme: Theme): string[] {
   const rates = run.follow[0] === follow ? run.rates.map((rate, index) => rateWords(rate, index + 1)) : [];
   return [
     head,
+    // The editor cuts a hover off below: k stands above the picture.
+    ...fits,
     ...(picture === null || alternative === null
       ? []
       : [markdownPicture(pictureWords(alternative), picture, style.width)]),
-    ...fits,
     ...(rates.length === 0 ? [] : [`Rate of reaction: ${rates.join("; ")}`]),
     `Readings: ${escapeMarkdown(readingsUsed(follow))}`,
   ];

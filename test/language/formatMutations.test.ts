@@ -3,13 +3,18 @@ import { readdirSync, readFileSync } from "node:fs";
 import { join } from "node:path";
 import { type FormatNotation, formatText } from "../../src/language/format/formatText.js";
 import { essenceOf } from "../../src/language/format/sameMeaning.js";
-import { statements } from "../../src/language/statements.js";
+import { sheetOf } from "../../src/language/format/sheet.js";
+import { parse } from "../../src/language/parse.js";
+import { type Owner, statements } from "../../src/language/statements.js";
 import { type Random, seededRandom } from "../../src/numerics/random.js";
 import { boundText, uri } from "../support/checkText.js";
 
 const samples = readdirSync("samples")
   .filter((name) => name.endsWith(".raterun"))
   .map((name) => readFileSync(join("samples", name), "utf8"));
+/** Every example of the language below a header that owns it. */
+const whole = linesBelow("file").join("\n");
+const texts = [...samples, `${whole}\n`];
 const examples = statements.map(({ example }) => example);
 const pieces = [
   ...' |  |\t|\n|\n\n|\r\n|\r|\u00a0|\u2009|\u202f|\ufeff|“|”|"|#|# c|,|, |->|→|⇌|<=>|±|+/-|+-|^|^-|⁻|²|₂|·|*|µ|u|°|deg|×10⁻³|e-3|\u2212'.split(
@@ -43,11 +48,18 @@ function mutated(text: string, random: Random): string {
   }
 }
 
-describe("3,000 random mutations of the samples", () => {
+function linesBelow(owner: Owner): string[] {
+  const rows = statements.filter(
+    ({ owners }) => (owner === "file" ? owners.length === 1 : true) && owners.includes(owner),
+  );
+  return rows.flatMap(({ example, opens }) => [example, ...(opens === undefined ? [] : linesBelow(opens))]);
+}
+
+describe("3,000 random mutations of the samples and of a text with every line of the language", () => {
   it("format to what formats to itself, means the same, and has the same problems and comments", () => {
     const random = seededRandom(20_261_203);
     for (let round = 0; round < 3_000; round++) {
-      let text = samples[round % samples.length] ?? "";
+      let text = texts[round % texts.length] ?? "";
       for (let change = 1 + random.integer(5); change > 0; change--) text = mutated(text, random);
       const notation: FormatNotation = round % 2 === 0 ? "unicode" : "ascii";
       const once = formatText(uri, text, { notation });
@@ -57,6 +69,18 @@ describe("3,000 random mutations of the samples", () => {
       assert.deepEqual(essenceOf(boundText(once.value)), essenceOf(boundText(text)), JSON.stringify(text));
     }
   }).timeout(60_000);
+});
+
+describe("the text with every line of the language", () => {
+  it("has the layout of the table: each line two spaces below its header", () => {
+    const result = formatText(uri, whole, { notation: "ascii" });
+    assert.ok(result.ok);
+    const sheet = sheetOf(parse(uri, result.value));
+    const sound = sheet.filter(({ place }) => place !== null && place.line !== null);
+    assert.ok(sound.length > statements.length * 0.9, `${sound.length} of ${statements.length}`);
+    for (const { text, place } of sound) assert.equal(text.search(/\S/), 2 * (place?.depth ?? 0), text);
+    assert.ok(sound.some(({ place }) => place?.depth === 3));
+  });
 });
 
 describe("every example of the statement table", () => {

@@ -46,7 +46,7 @@ export function inventedRun(count = 21, changes: Partial<Run> = {}): Run {
         monitor: "concentration",
         column: "c",
         timeColumn: "t",
-      points: count,
+        points: count,
         used: count,
         sources: [],
         time: block(time, "s"),

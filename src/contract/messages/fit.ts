@@ -108,6 +108,35 @@ export const fitMessages = {
     ({ end, unit, column, columnUnit }) =>
       `The ${end} is in ${unit === "" ? "no unit" : unit}, the readings of column ${column} are in ${columnUnit}. Give it in ${columnUnit}.`,
   ),
+  "gas-lacks-collected": message<Record<string, never>>(
+    "error",
+    "The amount of a collected gas needs the temperature of the burette and whether the gas is wet.",
+    () =>
+      "How was the gas collected, and at what temperature of the burette? Add below the follow line: collected wet at 22.0 °C, or: collected dried at 22.0 °C",
+  ),
+  "gas-lacks-barometer": message<Record<string, never>>(
+    "error",
+    "The amount of a collected gas needs the barometric pressure.",
+    () => "The amount of gas needs the pressure of the day. Add below the follow line: barometer 101.3 kPa",
+  ),
+  "gas-lacks-volume": message<{ run: string }>(
+    "error",
+    "A rate per volume needs the volume of the mixture the gas comes from.",
+    ({ run }) =>
+      `The rate is counted per volume of mixture, and run ${run} does not state it. Add a line: volume 50.00 mL`,
+  ),
+  "gas-no-pressure": message<Record<string, never>>(
+    "error",
+    "At this pressure and temperature of the burette nothing is left for the gas beside water vapour.",
+    () =>
+      "Beside water vapour no pressure is left for the gas at this temperature of the burette. Check barometer, temperature and level difference.",
+  ),
+  "gas-dissolves": message<{ gas: string; percent: string }>(
+    "warning",
+    "A part of the gas stays dissolved in the mixture and is not collected.",
+    ({ gas, percent }) =>
+      `About ${percent} of what is collected of ${gas} may stay dissolved in the mixture (Henry's law): rates and amounts come out low by as much. Stir well, use less liquid, or saturate it with the gas first.`,
+  ),
   "not-computed-yet": message<{ what: string }>(
     "information",
     "A part of a description that is read and kept but that nothing computes yet.",

@@ -1,11 +1,14 @@
 import { ionsOf } from "../../chemistry/handbook/dissociation.js";
+import { molarMass as molarMassOfFormula } from "../../chemistry/molarMass.js";
+import { stockConcentration } from "../../chemistry/stock.js";
 import { problem } from "../../contract/problem.js";
 import { isKind } from "../../quantity/kinds.js";
+import { isFault } from "../../quantity/shifted.js";
 import type { Reaction, Species } from "../../study/reaction.js";
 import type { Role, Taken } from "../../study/run.js";
 import { fieldOf, isBroken, itemsOf, originIn, originOf, quantityOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
-import { type Binding, report } from "./binding.js";
+import { type Binding, report, reportIn } from "./binding.js";
 import { resolveSpecies, resolveSpeciesText } from "./resolveSpecies.js";
 
 /** The `taken` lines of a run. A line that says `none` takes an inherited one out and leaves nothing. */
@@ -51,7 +54,7 @@ function ionsOnLine(binding: Binding, statement: Statement, reactions: readonly 
 }
 
 /** A volume needs the strength of its stock; anything else has none. */
-function checkStock(binding: Binding, statement: Statement, { species, given, stock }: Taken): void {
+function checkStock(binding: Binding, statement: Statement, { species, given, stock, density }: Taken): void {
   const isVolume = isKind(given.unit, "volume");
   const origin = originOf(binding.uri, statement, "given");
   if (isVolume && stock === null) {
@@ -59,6 +62,15 @@ function checkStock(binding: Binding, statement: Statement, { species, given, st
       binding,
       problem("taken-volume-of-what", { species: species.key, volume: textOf(statement, "given") ?? "" }, origin),
     );
+  }
+  if (isVolume && stock !== null) {
+    const molarMass =
+      species.molarMass?.value ?? (species.formula === null ? null : molarMassOfFormula(species.formula));
+    const pureDensity = stock.kind === "share" && stock.basis === "volume" ? density : null;
+    const facts = { species: species.key, molarMass, density, pureDensity, solventMolarMass: null };
+    const field = fieldOf(statement, "stock");
+    const found = field === null ? null : stockConcentration(stock, facts, field.span);
+    if (found !== null && isFault(found)) reportIn(binding, statement, 0, found);
   }
   if (!isVolume && stock !== null) {
     const of = textOf(statement, "stock") ?? "";

@@ -1,18 +1,21 @@
-import { type Equation, equationText, type Term } from "../../chemistry/equation.js";
+import { type Arrow, equationText, type Term } from "../../chemistry/equation.js";
 import { readEquation } from "../../chemistry/readEquation.js";
 import type { Signs } from "./quantitySigns.js";
 import { type IsDeclared, speciesSigns } from "./speciesSigns.js";
 
+const printedArrow: Readonly<Record<Arrow, string>> = { "->": "→", "<=>": "⇌" };
+
 /**
  * An equation with single spaces and in the signs that are asked for: `2H2O2 -> 2H2O+O2` as `2 H2O2 → 2 H2O + O2`.
- * An equation that cannot be read stays letter by letter.
+ * As written, and where it cannot be read, an equation stays letter by letter.
  */
 export function equationSigns(text: string, signs: Signs, isDeclared: IsDeclared): string {
-  const { equation } = readEquation(text, isDeclared);
+  const equation = signs === "as written" ? null : readEquation(text, isDeclared).equation;
   if (equation === null) return text;
+  const arrow = signs === "ascii" ? equation.arrow : printedArrow[equation.arrow];
   const side = (terms: readonly Term[]): string =>
     terms.map((term) => termSigns(text, term, signs, isDeclared)).join(" + ");
-  const respelled = `${side(equation.left)} ${arrowOf(text, equation, signs)} ${side(equation.right)}`;
+  const respelled = `${side(equation.left)} ${arrow} ${side(equation.right)}`;
   const again = readEquation(respelled, isDeclared).equation;
   return again !== null && equationText(again) === equationText(equation) ? respelled : text;
 }
@@ -29,10 +32,4 @@ function termSigns(text: string, { span, speciesSpan }: Term, signs: Signs, isDe
 
 function plainCount(count: string): string {
   return count.replace("½", "1/2").replace("¼", "1/4").replace("¾", "3/4");
-}
-
-function arrowOf(text: string, { arrow, arrowSpan }: Equation, signs: Signs): string {
-  if (signs === "as written") return text.slice(arrowSpan.start, arrowSpan.end);
-  if (signs === "ascii") return arrow;
-  return arrow === "->" ? "→" : "⇌";
 }

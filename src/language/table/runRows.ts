@@ -1,8 +1,8 @@
 import {
-  any,
   date,
   declared,
   either,
+  inAnyOrder,
   integer,
   keyword,
   list,
@@ -123,7 +123,7 @@ export const runRows: readonly StatementRow[] = [
         [
           quantity("taken", "given"),
           optional(keyword("of"), quantity("stock")),
-          any(
+          inAnyOrder(
             [keyword("purity"), quantity("purity")],
             [keyword("density"), quantity("density")],
             [keyword("giving"), list("ions", species("ion"))],
