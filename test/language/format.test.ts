@@ -74,11 +74,67 @@ run B like A "0.025 M iodide"
     assert.equal(formatted(wild), laidOut);
   });
 
+  it("lines of two words, lists, tables of runs, series and mechanisms", () => {
+    // Invented, as every figure here.
+    const text = `calibration tri of I2
+  standard     10.0 umol/L reads 0.213, 0.215
+  standard     5 umol/L reads 0.1, 0.11
+results in mmol/L, min
+
+run A
+  ionic strength      0.10 mol/L
+  taken               HCl  5.0 mL of 30 % by mass density 1.11 g/mL giving H^+, Cl^- as inert
+  data                "data/a.csv"
+    column            gas  "V / mL"  mL
+    exclude           line 17 because "bubble"
+  follow              O2 as gas volume from gas
+    level difference  35 mm
+  observed            "blue" at 31.2 s, 30.8 s
+    after             S2O3^2- used up
+  fit                 order 1 in H2O2, then order 1 in OH^-
+
+rows of "t.csv" like A
+  taken        KI  from "c(KI) / mol L^-1"
+  temperature  from "T / °C"
+
+series iodide
+  across       A, "more/*.raterun"
+  order        in KI by initial rate
+  salt effect
+
+mechanism m
+  step         one is H2O2 + I^- -> H2O + IO^-
+    forward    2.0e-3 s^-1
+    reverse    free in common
+`;
+    const flat = text
+      .replace(/^ +/gm, "")
+      .replace(/ {2,}/g, " ")
+      .replace(/, (?=\D)/g, " ,  ");
+    assert.equal(formatted(flat), text);
+    const unicode = formatted(flat, "unicode");
+    for (const signs of ["5 µmol/L", "giving H⁺, Cl⁻", "S2O3²⁻ used", "in OH⁻", "H2O2 + I⁻ → H2O + IO⁻", "s⁻¹"]) {
+      assert.ok(unicode.includes(signs), signs);
+    }
+    assert.equal(formatted(unicode), text);
+  });
+
   it("a head longer than usual widens its own section only", () => {
-    const text = formatted("volume 5 mL\ntemperature 25 degC\n\nrun A\nvolume 5 mL\nrun B\nvolume 6 mL\n");
     assert.equal(
-      text,
-      "volume       5 mL\ntemperature  25 degC\n\nrun A\n  volume       5 mL\nrun B\n  volume       6 mL\n",
+      formatted(
+        "volume 5 mL\ndate 2026-11-03\n\nrun A\nactivation energy 52 kJ/mol\nvolume 5 mL\nrun B\nvolume 6 mL\n",
+      ),
+      [
+        "volume  5 mL",
+        "date    2026-11-03",
+        "",
+        "run A",
+        "  activation energy  52 kJ/mol",
+        "  volume             5 mL",
+        "run B",
+        "  volume       6 mL",
+        "",
+      ].join("\n"),
     );
   });
 
