@@ -1,4 +1,4 @@
-import { problem } from "../contract/problem.js";
+import { type Problem, problem } from "../contract/problem.js";
 import { cellProblems, rowProblems, timeProblems } from "../data/columnProblems.js";
 import type { Columns } from "../data/columns.js";
 import type { CommonCause, Signal } from "../monitor/signal.js";
@@ -9,7 +9,7 @@ import { combined, type Quantity } from "../quantity/quantity.js";
 import type { Unit } from "../quantity/unit.js";
 import type { Fact } from "../study/fact.js";
 import type { ColumnFact, Follow, Run } from "../study/run.js";
-import { dataOrigin, type FoundColumn, findColumns } from "./findColumns.js";
+import { dataOrigin, type FoundColumn, findColumns, isWithin } from "./findColumns.js";
 import { type Notes, note } from "./notes.js";
 
 /** Signal of one follow line, and how many rows its file has. */
@@ -90,7 +90,9 @@ function sayWhatIsWrong(
   const path = run.data?.path ?? "";
   for (const found of rowProblems(file, path, dataOrigin(run, null))) note(notes, follow.id, found);
   for (const { fact, index } of [time, readings]) {
-    for (const found of cellProblems(file, index, path, dataOrigin(run, fact))) note(notes, follow.id, found);
+    for (const found of cellProblems(file, index, path, dataOrigin(run, fact))) {
+      note(notes, follow.id, withDecimalOption(run, found));
+    }
   }
   for (const found of timeProblems(file, time.index, path, dataOrigin(run, time.fact))) note(notes, follow.id, found);
   return [time, readings].every(({ fact, values }) => {
@@ -100,6 +102,14 @@ function sayWhatIsWrong(
     note(notes, follow.id, problem("column-not-numbers", args, dataOrigin(run, fact)));
     return false;
   });
+}
+
+/** Readings in the other decimal mark have a mend: the option below the run's own data line. */
+function withDecimalOption(run: Run, found: Problem): Problem {
+  const file = run.data;
+  if (found.code !== "data-decimal-comma" || file === null || !isWithin(run, file.origin)) return found;
+  const { end } = file.origin;
+  return { ...found, mend: [{ text: "decimal comma", edits: [{ start: end, end, text: "\n    decimal comma" }] }] };
 }
 
 /** Rows that the description leaves out, by the line of the file or by a span of its times. */

@@ -19,8 +19,8 @@ interface Case {
   readonly put: readonly [string, string];
   /** what is said, `code “marked words”: message`; only the beginnings are compared */
   readonly said: readonly string[];
-  /** what stands there after the first mend; null: none is offered */
-  readonly mend: string | null;
+  /** what stands there after the first mend; a pair: what it puts in place of what in the broken text; null: none */
+  readonly mend: string | null | readonly [string, string];
 }
 
 const cases: readonly Case[] = [
@@ -91,7 +91,11 @@ const cases: readonly Case[] = [
     said: ["charge-ambiguous “Fe3+”: Fe3+ could be iron(III), Fe^3+, or three irons, Fe3^+."],
     mend: "Fe^3+ 0.1 mol/L as inert",
   },
-  { put: ["H2O2 0.1 mol/L", "Xx 0.1 mol/L"], said: ["species-unknown “Xx”: Xx is no formula"], mend: null },
+  {
+    put: ["H2O2 0.1 mol/L", "Xx 0.1 mol/L"],
+    said: ["species-unknown “Xx”: Xx is no formula"],
+    mend: ["reaction", "species Xx\nreaction"],
+  },
   {
     put: ["H2O2 0.1 mol/L", "KI 0.1 mol/L"],
     said: ["taken-takes-no-part “KI”: KI takes no part in the reaction as it is written."],
@@ -170,19 +174,23 @@ const cases: readonly Case[] = [
   {
     put: ["  follow H2O2 as concentration from c\n", ""],
     said: ["run-lacks-follow “A”: Run A does not say what was followed"],
-    mend: null,
+    mend: ["run A\n", "run A\n  follow H2O2 as concentration from c\n"],
   },
   { put: ["reaction 2 H2O2 -> 2 H2O + O2\n", ""], said: ["run-lacks-reaction “A”: Run A has no reaction"], mend: null },
-  { put: ["  temperature 25 °C\n", ""], said: ["run-lacks-temperature “A”: Run A states no temperature"], mend: null },
+  {
+    put: ["  temperature 25 °C\n", ""],
+    said: ["run-lacks-temperature “A”: Run A states no temperature"],
+    mend: ["run A\n", "run A\n  temperature 25.0 °C\n"],
+  },
   {
     put: ["  volume 50 mL\n  temperature 25 °C\n  taken H2O2 0.1 mol/L", "  temperature 25 °C\n  taken H2O2 5 mmol"],
     said: ["run-lacks-volume “A”: Run A gives H2O2 as an amount or a mass"],
-    mend: null,
+    mend: ["run A\n", "run A\n  volume 50.00 mL\n"],
   },
   {
     put: ["  rate initial\n  fit order 1 in H2O2\n", ""],
     said: ["run-wants-nothing “A”: Nothing is wanted of run A yet."],
-    mend: null,
+    mend: ["run A\n", "run A\n  rate initial\n"],
   },
   {
     put: ["run A", "sries x\nrun A"],
@@ -216,7 +224,9 @@ describe("what is said of a text, and how it is mended", () => {
       assert.equal(found.length, said.length, found.join("\n"));
       for (const [index, words] of said.entries()) assert.ok(found[index]?.startsWith(words), found[index]);
       const after = mended(text);
-      assert.equal(after, mend === null ? text : base.replace(put[0], mend));
+      const expected =
+        mend === null ? text : typeof mend === "string" ? base.replace(put[0], mend) : text.replace(mend[0], mend[1]);
+      assert.equal(after, expected);
     });
   }
 

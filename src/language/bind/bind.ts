@@ -37,7 +37,15 @@ export function bind(parsed: Parsed): Bound {
   const uses: NameUse[] = [];
   const declared = declareSpecies(uri, problems, uses, withHead("species"));
   const calibrations = new Set(withHead("calibration").flatMap((line) => textOf(line, "calibration") ?? []));
-  const gathering: Binding = { uri, problems, uses, declared, calibrations, salvaged: new Set<string>() };
+  const gathering: Binding = {
+    uri,
+    text: parsed.text,
+    problems,
+    uses,
+    declared,
+    calibrations,
+    salvaged: new Set<string>(),
+  };
   const { reactions, salvaged } = bindReactions(gathering, withHead("reaction"));
   const binding: Binding = { ...gathering, salvaged };
   const keyOf = speciesKeys(binding);
@@ -88,7 +96,7 @@ function bindRuns(binding: Binding, parsed: Parsed, reactions: readonly Reaction
       continue;
     }
     effective.set(name, lines);
-    checkRun(binding, run, lines, reactionWritten);
+    checkRun(binding, statement, run, lines, reactionWritten);
     runs.push({ kind: "run", run });
   }
   return runs;

@@ -3,12 +3,13 @@ import { balanceFault } from "../../chemistry/balanceFault.js";
 import { type Equation, equationText, stoichiometricNumbers } from "../../chemistry/equation.js";
 import type { Formula } from "../../chemistry/formula.js";
 import { readEquation } from "../../chemistry/readEquation.js";
-import { problem } from "../../contract/problem.js";
+import { placed, problem } from "../../contract/problem.js";
 import type { Reaction } from "../../study/reaction.js";
 import { fieldOf, isBroken, originOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import { type Binding, report, reportIn } from "./binding.js";
 import { hasLine, quantityFact } from "./facts.js";
+import { withDeclaration } from "./resolveSpecies.js";
 
 /** The reactions of a file, and the species on their lines that could be read though the line is broken. */
 export function bindReactions(
@@ -35,7 +36,10 @@ export function bindEquation(
   const reading = readEquation(field.text, (name) => binding.declared.has(name));
   const origin = originOf(binding.uri, statement, "equation");
   if (reading.equation === null) {
-    for (const fault of reading.faults) reportIn(binding, statement, field.span.start, fault);
+    for (const fault of reading.faults) {
+      const found = placed(fault, binding.uri, statement.offset + field.span.start);
+      report(binding, withDeclaration(binding, found, String(fault.args["word"] ?? "")));
+    }
     for (const key of reading.species) salvaged.add(key);
     return { ...nothing, name, text: field.text, origin };
   }

@@ -1,29 +1,46 @@
-import { problem } from "../../contract/problem.js";
+import { type Mend, problem } from "../../contract/problem.js";
 import { isKind } from "../../quantity/kinds.js";
 import type { Run } from "../../study/run.js";
 import type { Statement } from "../syntax.js";
-import { type Binding, report } from "./binding.js";
+import { type Binding, lineBelow, report } from "./binding.js";
 
 /** Says on the `run` line what the run lacks. A line that is there but broken is not missing. */
-export function checkRun(binding: Binding, run: Run, lines: readonly Statement[], reactionWritten: boolean): void {
+export function checkRun(
+  binding: Binding,
+  header: Statement,
+  run: Run,
+  lines: readonly Statement[],
+  reactionWritten: boolean,
+): void {
   const written = new Set(lines.map((statement) => statement.line.row?.head));
   const wanted = written.has("rate") || written.has("fit");
   const say = { run: run.name };
   const { origin } = run;
-  if (written.has("follow") && !written.has("data")) report(binding, problem("run-lacks-data", say, origin));
+  const below = (line: string): Mend[] => [lineBelow(binding, header, line)];
+  const species = run.reaction?.reactants[0] ?? "A";
+  if (written.has("follow") && !written.has("data")) {
+    report(binding, problem("run-lacks-data", say, origin, below(`data "data/${run.name}.csv"`)));
+  }
   if (wanted && !written.has("follow")) {
-    const species = run.reaction?.reactants[0] ?? "A";
     const column = run.data?.columns.at(-1)?.name ?? "c";
     const example = `follow ${species} as concentration from ${column}`;
-    report(binding, problem("run-lacks-follow", { ...say, example }, origin));
+    report(binding, problem("run-lacks-follow", { ...say, example }, origin, run.data === null ? [] : below(example)));
   }
   if (written.has("follow") && !reactionWritten) report(binding, problem("run-lacks-reaction", say, origin));
-  if (written.has("follow") && !wanted) report(binding, problem("run-wants-nothing", say, origin));
-  if (written.has("fit") && !written.has("temperature")) report(binding, problem("run-lacks-temperature", say, origin));
+  if (written.has("follow") && !wanted) {
+    report(
+      binding,
+      problem("run-wants-nothing", say, origin, [...below("rate initial"), ...below(`fit order 1 in ${species}`)]),
+    );
+  }
+  if (written.has("fit") && !written.has("temperature")) {
+    report(binding, problem("run-lacks-temperature", say, origin, below("temperature 25.0 °C")));
+  }
   if (!written.has("volume")) {
     const needing = run.taken.find(({ given }) => !isKind(given.unit, "concentration"));
     if (needing !== undefined) {
-      report(binding, problem("run-lacks-volume", { ...say, species: needing.species.key }, origin));
+      const args = { ...say, species: needing.species.key };
+      report(binding, problem("run-lacks-volume", args, origin, below("volume 50.00 mL")));
     }
   }
   for (const { species, given, origin: line } of run.taken) {

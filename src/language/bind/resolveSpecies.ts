@@ -1,11 +1,11 @@
 import { readSpecies } from "../../chemistry/readSpecies.js";
-import { type Origin, placed, problem, replacement } from "../../contract/problem.js";
+import { type Origin, type Problem, placed, problem, replacement } from "../../contract/problem.js";
 import { nearest } from "../../quantity/nearest.js";
 import { isFault } from "../../quantity/shifted.js";
 import type { Reaction, Species } from "../../study/reaction.js";
 import { originOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
-import { type Binding, report } from "./binding.js";
+import { type Binding, lineOnTop, report } from "./binding.js";
 
 /**
  * The species a field names: a declared name wins over a formula. Null where it is neither, which is reported
@@ -43,13 +43,19 @@ export function resolveSpeciesText(
     // A name of the study that is near is a likelier mend than an element.
     const mend = near.map((name) => replacement(origin, name));
     const args = { what: "species", name: text, known: `; there is ${near.join(" or ")}` };
-    if (near.length === 0) report(binding, placed(reading, binding.uri, origin.start));
+    if (near.length === 0) report(binding, withDeclaration(binding, placed(reading, binding.uri, origin.start), text));
     else report(binding, problem("name-unknown", args, origin, mend));
     return null;
   }
   const rest = { uri: binding.uri, start: origin.start + reading.end, end: origin.end };
   report(binding, problem("formula-left-over", { formula: reading.key, rest: text.slice(reading.end) }, rest));
   return null;
+}
+
+/** A word that is no formula may be a name that is not declared yet: then its declaration is a mend. */
+export function withDeclaration(binding: Binding, found: Problem, word: string): Problem {
+  if (found.code !== "species-unknown" || !/^[\p{L}\p{N}_\-′]+$/u.test(word)) return found;
+  return { ...found, mend: [...(found.mend ?? []), lineOnTop(binding, `species ${word}`)] };
 }
 
 /** A species of which no more is known than its formula. */
