@@ -72,10 +72,18 @@ function takenOf(run: Run, amounts: Stoichiometry): RunFinding["taken"] {
     return {
       species: taken.species.key,
       given: shownQuantity(taken.given),
+      stock: stockText(taken),
       concentration: initial === undefined ? null : shown(initial.value, standardUncertainty(initial), concentration),
       limiting: amounts.limiting === taken.species.key,
     };
   });
+}
+
+/** `0.5000(50) mol L^-1`, `30 % by mass`. */
+function stockText({ stock }: Run["taken"][number]): string | null {
+  if (stock === null) return null;
+  const { text } = shownQuantity(stock.value);
+  return stock.kind === "share" ? `${text} by ${stock.basis}` : text;
 }
 
 function contextOf(

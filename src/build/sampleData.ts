@@ -8,6 +8,7 @@ export function sampleData(): ReadonlyMap<string, string> {
     ["data/peroxide-b.csv", peroxide(102, 6.2e-4)],
     ["data/ester.csv", ester(103)],
     ["data/planted.csv", planted(104)],
+    ["data/gas.csv", gas(105)],
   ]);
 }
 
@@ -43,6 +44,18 @@ function planted(seed: number): string {
     return `${t},${i === 6 ? "" : i === 11 ? "spilt" : c}`;
   });
   return lines([mark, "time / s,c(H2O2) / mol L^-1", ...rows]);
+}
+
+/** Oxygen in a burette, mL against s, as an instrument with a preamble writes it; a bubble hangs in the tube for a while. */
+function gas(seed: number): string {
+  const random = seededRandom(seed);
+  const rows = Array.from({ length: 61 }, (_, i) => {
+    const t = i <= 20 ? 15 * i : 300 + 45 * (i - 20);
+    const hung = t >= 45 && t <= 60 ? -1.8 : 0;
+    const volume = 1.2 + 62.4 * (1 - exp(-2.5e-3 * t)) + hung + 0.2 * random.normal();
+    return `${t}\t${volume.toFixed(1)}`;
+  });
+  return lines([mark, "gas burette 2", "", "time / s\tV / mL", ...rows]);
 }
 
 function lines(all: readonly string[]): string {

@@ -63,7 +63,14 @@ export interface Run extends Item {
   title: string | null;
   equation: string;
   conditions: { [name: string]: Q };
-  taken: { species: string; given: Q; concentration: Q | null; limiting: boolean }[];
+  taken: {
+    species: string;
+    given: Q;
+    /** the strength of the stock a volume was taken of, ready to show; null where it was none */
+    stock: string | null;
+    concentration: Q | null;
+    limiting: boolean;
+  }[];
   follow: (Item & {
     species: string;
     monitor: string;

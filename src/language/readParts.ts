@@ -143,7 +143,7 @@ function fits(cursor: Cursor, part: Part, at: number): boolean {
 }
 
 function beginsNumber(token: Token): boolean {
-  return token.kind === "word" && /^[\d.,+−-]/.test(token.text);
+  return token.kind === "word" && /^\(?[\d.,+−-]/.test(token.text);
 }
 
 function readLeaf(cursor: Cursor, part: Part): void {

@@ -2,18 +2,18 @@ import type { Run } from "../contract/findings.js";
 import { type Html, html } from "./html.js";
 import { type Cell, factTable } from "./htmlTable.js";
 import { printedEquation, printedSpecies } from "./printedSpecies.js";
-import { printedQuantity } from "./printedText.js";
+import { printedQuantity, printedSentence } from "./printedText.js";
 
 /** What was done: the equation, what was taken, the conditions. */
 export function runDone(run: Run): { gist: string; body: Html } {
   const rows: Cell[][] = [];
   if (run.equation !== "") rows.push(["reaction", printedEquation(run.equation)]);
-  for (const { species, given, concentration, limiting } of run.taken) {
+  for (const { species, given, stock, concentration, limiting } of run.taken) {
     const converted =
       concentration === null || concentration.text === given.text ? "" : `, that is ${printedQuantity(concentration)}`;
     rows.push([
       `taken of ${printedSpecies(species)}`,
-      `${printedQuantity(given)}${converted}${limiting ? "; runs out first" : ""}`,
+      `${printedQuantity(given)}${stock === null ? "" : ` of ${printedSentence(stock)}`}${converted}${limiting ? "; runs out first" : ""}`,
     ]);
   }
   for (const [name, value] of Object.entries(run.conditions)) rows.push([name, printedQuantity(value)]);

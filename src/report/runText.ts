@@ -28,9 +28,10 @@ function whatWasDone(run: Run): string[][] {
   const rows: string[][] = [];
   if (run.equation !== "") rows.push(["reaction", run.equation]);
   for (const [name, value] of Object.entries(run.conditions)) rows.push([name, value.text]);
-  for (const { species, given, concentration, limiting } of run.taken) {
+  for (const { species, given, stock, concentration, limiting } of run.taken) {
     const converted = concentration === null || concentration.text === given.text ? "" : ` = ${concentration.text}`;
-    rows.push(["taken", `${species} ${given.text}${converted}${limiting ? ", runs out first" : ""}`]);
+    const of = stock === null ? "" : ` of ${stock}`;
+    rows.push(["taken", `${species} ${given.text}${of}${converted}${limiting ? ", runs out first" : ""}`]);
   }
   for (const follow of run.follow) {
     const { species, monitor, column, sources } = follow;

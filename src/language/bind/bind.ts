@@ -1,7 +1,5 @@
-import { readSpecies } from "../../chemistry/readSpecies.js";
 import { type Problem, problem, replacement } from "../../contract/problem.js";
 import { nearest } from "../../quantity/nearest.js";
-import { isFault } from "../../quantity/shifted.js";
 import type { Reaction } from "../../study/reaction.js";
 import type { RunSource, Study } from "../../study/study.js";
 import { isBroken, numberOf, originOf, textOf } from "../fields.js";
@@ -20,6 +18,7 @@ import { declareSpecies } from "./declareSpecies.js";
 import { checkRepeats, type KeyOf, mergeLines } from "./effectiveLines.js";
 import { sayHeadersOutside, sayKept } from "./keptLines.js";
 import { withOrderInNumbers } from "./orderInNumbers.js";
+import { speciesKey } from "./resolveSpecies.js";
 
 /** What a description means, and everything the text alone can tell is wrong with it, in the order of the text. */
 export interface Bound {
@@ -155,8 +154,7 @@ function speciesKeys(binding: Binding): KeyOf {
     if (text === null || field !== "species") return text;
     const before = known.get(text);
     if (before !== undefined) return before;
-    const reading = binding.declared.has(text) ? null : readSpecies(text);
-    const key = reading === null || isFault(reading) ? text : reading.key;
+    const key = speciesKey(binding, text);
     known.set(text, key);
     return key;
   };

@@ -7,6 +7,7 @@ import type { Reaction, Species } from "../../study/reaction.js";
 import { blockOf, isBroken, originOf, quantityOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import { type Binding, report } from "./binding.js";
+import { bindEquation } from "./bindReaction.js";
 import { hasLine, linesWith, lineWith, quantityFact, textFact } from "./facts.js";
 import { changed, describeSpecies } from "./reactionSpecies.js";
 import { resolveSpecies } from "./resolveSpecies.js";
@@ -62,7 +63,7 @@ export function bindFollow(
       strayLight: quantity("stray", "strayLight"),
       titrant: titrant(binding, children, reactions),
       aliquot: quantity("aliquot"),
-      titratedBy: textFact(uri, children, "titrated", "equation"),
+      titratedBy: titratedBy(binding, children),
     },
   ];
 }
@@ -143,4 +144,11 @@ function titrant(binding: Binding, lines: readonly Statement[], reactions: reado
   const concentration = quantityOf(statement, "concentration");
   if (species === null || concentration === null) return null;
   return { value: { species, concentration }, origin: originOf(binding.uri, statement) };
+}
+
+/** The equation of a titration in its one ASCII form. */
+function titratedBy(binding: Binding, lines: readonly Statement[]): Fact<string> | null {
+  const statement = lineWith(lines, "titrated");
+  const reaction = statement === null ? null : bindEquation(binding, statement, null, new Set());
+  return reaction === null ? null : { value: reaction.text, origin: reaction.origin };
 }

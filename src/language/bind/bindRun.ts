@@ -10,7 +10,7 @@ import { type Binding, report } from "./binding.js";
 import { bindTaken } from "./bindTaken.js";
 import { bindFits, bindRates, type WishContext } from "./bindWishes.js";
 import { linesWith, lineWith, quantityFact, textFact } from "./facts.js";
-import { resolveSpecies } from "./resolveSpecies.js";
+import { resolveSpecies, speciesKey } from "./resolveSpecies.js";
 
 /** Makes a run of its header and its effective lines: its own and those it starts from. */
 export function bindRun(
@@ -85,7 +85,7 @@ function reactionOf(binding: Binding, follows: readonly Statement[], reactions: 
   for (const statement of follows) {
     if (isBroken(statement)) continue;
     const text = textOf(statement, "species") ?? "";
-    const key = binding.declared.get(text)?.key ?? text;
+    const key = speciesKey(binding, text);
     const found = reactions.find(({ numbers }) => numbers.has(key));
     if (found !== undefined) return found;
   }

@@ -58,6 +58,13 @@ export function withDeclaration(binding: Binding, found: Problem, word: string):
   return { ...found, mend: [...(found.mend ?? []), lineOnTop(binding, `species ${word}`)] };
 }
 
+/** How the study calls what a text names: its declared name, or the normal form of its formula, else the text. */
+export function speciesKey(binding: Pick<Binding, "declared">, text: string): string {
+  if (binding.declared.has(withoutState(text))) return withoutState(text);
+  const reading = readSpecies(text);
+  return isFault(reading) ? text : reading.key;
+}
+
 /** A species of which no more is known than its formula. */
 export function bareSpecies(key: string, formula: Species["formula"]): Species {
   return { key, formula, molarMass: null, charge: null, pKa: null, absorptivities: [] };
