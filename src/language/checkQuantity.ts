@@ -1,4 +1,5 @@
-import { type Fault, fault, type Span } from "../contract/problem.js";
+import { type Fault, fault, type Mend, replacement, type Span } from "../contract/problem.js";
+import { type Basis, bases } from "../quantity/basis.js";
 import { checkDimension } from "../quantity/checkDimension.js";
 import type { Quantity } from "../quantity/quantity.js";
 import { type KindOfQuantity, type QuantityKind, quantityKinds } from "./quantityKinds.js";
@@ -14,6 +15,10 @@ export interface WrittenQuantity {
 /** Units that say a share of a mixture, but not of what. */
 const sharesOfMixture = new Set(["%", "ppm"]);
 
+function shareBy(basis: Basis, shown: string, span: Span): Mend {
+  return replacement(span, `${shown} by ${basis}`);
+}
+
 /** Null where a quantity is what its line wants, else the fault: dimension first, then sign. */
 export function checkQuantity(written: WrittenQuantity, text: string, kind: QuantityKind): Fault | null {
   const { name, dimensions, atLeast }: KindOfQuantity = quantityKinds[kind];
@@ -27,11 +32,9 @@ export function checkQuantity(written: WrittenQuantity, text: string, kind: Quan
       shown !== undefined &&
       sharesOfMixture.has(quantity.unit.text)
     ) {
-      return fault(
-        "share-of-what",
-        { share: `${text.slice(written.number.start, written.number.end)} ${shown}` },
-        span,
-      );
+      const mends = kind === "stock" ? bases.map((basis) => shareBy(basis, shown, span)) : [];
+      const share = `${text.slice(written.number.start, written.number.end)} ${shown}`;
+      return fault("share-of-what", { share }, span, mends);
     }
     const wrong = checkDimension(written.unit === null ? null : quantity.unit, { name, dimensions }, span, shown);
     if (wrong !== null) return wrong;

@@ -98,13 +98,30 @@ function guess(state: State, line: LineStatement, text: string, offset: number):
     const row = statementByHead.get(head);
     return row !== undefined && state.open.some((open) => takes(state, open.owner, row));
   });
-  const near = nearest(line.head.text, allowed)[0] ?? begunHeader(line, allowed);
+  const near = nearestHead(line, text, allowed) ?? begunHeader(line, allowed) ?? begunWord(line, allowed);
   const mend = near === null ? [] : [replacement(line.head, near)];
   const unknown = fault("word-unknown", { word: line.head.text, allowed: describeHeads(allowed) }, line.head, mend);
   state.problems.push(placed(unknown, state.uri, offset));
   const row = near === null ? undefined : statementByHead.get(near);
   const meant = row === undefined ? undefined : parseLineAs(text, row).statements[0];
   return meant === undefined ? null : { ...meant, fault: unknown };
+}
+
+/** Of the first words that are near, one with which the whole line is sound: `dat "a.csv"` is no date. */
+function nearestHead({ head }: LineStatement, text: string, allowed: readonly string[]): string | null {
+  const near = nearest(head.text, allowed, 4);
+  const sound = near.find((word) => {
+    const row = statementByHead.get(word);
+    return row !== undefined && parseLineAs(text, row).fault === null;
+  });
+  return sound ?? near[0] ?? null;
+}
+
+/** A first word cut short, as `temp`, where only one begins so. */
+function begunWord({ head }: LineStatement, allowed: readonly string[]): string | null {
+  if (head.text.length < 3) return null;
+  const begun = allowed.filter((word) => word.startsWith(head.text));
+  return begun.length === 1 ? (begun[0] ?? null) : null;
 }
 
 /** A header that is being typed at the margin: the lines below it are not those of the run above. */

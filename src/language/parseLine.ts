@@ -3,6 +3,7 @@ import { lexLine, type Token } from "./lexer.js";
 import { type Cursor, fail, readParts } from "./readParts.js";
 import { type StatementRow, statementByHead } from "./statements.js";
 import type { LineStatement, ParsedLine } from "./syntax.js";
+import { triedMends } from "./triedMends.js";
 
 /** Lines read before, by their text: an edit re-reads only the lines it touched. */
 const readBefore = new Map<string, ParsedLine>();
@@ -23,7 +24,8 @@ export function parseLineAs(text: string, row: StatementRow): ParsedLine {
   return readLine(text, row);
 }
 
-function readLine(text: string, meant: StatementRow | null = null): ParsedLine {
+/** `trying`: only whether the line is sound is wanted, not how it could be made so. */
+function readLine(text: string, meant: StatementRow | null = null, trying = false): ParsedLine {
   const tokens = lexLine(text).filter((token) => token.kind !== "comment");
   const statements: LineStatement[] = [];
   let cursor: Cursor | null = null;
@@ -41,11 +43,20 @@ function readLine(text: string, meant: StatementRow | null = null): ParsedLine {
     const next = tokens[end];
     if (cursor.fault === null && next !== undefined && !beginsLine(next, row)) leftOver(cursor, next, row);
     if (cursor.fault !== null && row.slips !== undefined) cursor.fault = slip(cursor, row, first) ?? cursor.fault;
+    if (!trying && cursor.fault !== null) cursor.fault = withTriedMends(cursor, cursor.fault, meant);
     const last = cursor.fault === null ? end : endAfterFault(cursor, row);
     statements.push(statement(text, row, first, cursor, last));
     at = last;
   }
   return { statements, fault: lineFault(text, statements), wanted: cursor?.wanted ?? [] };
+}
+
+/** A fault that knows no mend, with those that turn out to make its line sound. */
+function withTriedMends({ text, tokens, wanted }: Cursor, fault: Fault, meant: StatementRow | null): Fault {
+  if (fault.mend !== undefined && fault.code !== "line-left-over") return fault;
+  const isSound = (changed: string): boolean => readLine(changed, meant, true).fault === null;
+  const mend = triedMends({ text, tokens, fault, wanted }, isSound);
+  return mend.length === 0 ? fault : { ...fault, mend };
 }
 
 function rowOf(first: Token, cursor: Cursor): StatementRow | null {
@@ -65,15 +76,26 @@ function lineFault(text: string, statements: readonly LineStatement[]): Fault | 
   const second = statements[1];
   if (second === undefined) return null;
   const gap = { start: text.slice(0, second.head.start).trimEnd().length, end: second.head.start };
-  return fault("line-break-missing", { word: second.head.text }, second.head, [
-    { text: `a new line before “${second.head.text}”`, edits: [{ ...gap, text: "\n" }] },
-  ]);
+  return breakMissing(gap, second.head);
+}
+
+function breakMissing(gap: Span, head: Span & { readonly text: string }): Fault {
+  const { text: word, start, end } = head;
+  const mend = { text: `a new line before “${word}”`, edits: [{ ...gap, text: "\n" }] };
+  return fault("line-break-missing", { word }, { start, end }, [mend]);
 }
 
 function leftOver(cursor: Cursor, next: Token, row: StatementRow): void {
   const wanted = cursor.wanted.length > 0;
   if (wanted) fail(cursor, next, row);
   if (cursor.fault !== null) return;
+  const head = cursor.tokens[cursor.at + 1];
+  if (next.text === "," && head !== undefined && beginsLine(head, row)) {
+    const before = cursor.tokens[cursor.at - 1] as Token;
+    cursor.at++;
+    cursor.fault = breakMissing({ start: before.end, end: head.start }, head);
+    return;
+  }
   const last = cursor.tokens[cursor.tokens.length - 1] as Token;
   const span: Span = { start: next.start, end: last.end };
   cursor.fault = fault(

@@ -137,6 +137,8 @@ function fits(cursor: Cursor, part: Part, at: number): boolean {
       return token.kind === "word" && token.text === "order";
     case "run reference":
       return token.kind === "word" || token.kind === "string";
+    case "species":
+      return token.kind === "word" && !/^[\d.,]+$/.test(token.text);
     default:
       return token.kind === "word";
   }
@@ -167,7 +169,7 @@ function readLeaf(cursor: Cursor, part: Part): void {
       return;
     case "date":
       cursor.at++;
-      if (!isDate(token.text)) cursor.fault = fault("date-malformed", { found: token.text }, token);
+      if (!isDate(token.text)) cursor.fault = dateFault(token);
       keep(cursor, part.label, { kind: "text", text: token.text, span: token });
       return;
     case "integer":
@@ -278,7 +280,9 @@ function isName(text: string): boolean {
 
 function readName(cursor: Cursor, label: string, what: string, token: Token): void {
   if (!isName(token.text)) {
-    cursor.fault = fault("name-malformed", { name: token.text, what }, token);
+    const bare = token.text.replace(/[:;.]+$/, "");
+    const mend = isName(bare) ? [replacement(token, bare)] : [];
+    cursor.fault = fault("name-malformed", { name: token.text, what }, token, mend);
   }
   keep(cursor, label, { kind: "text", text: token.text, span: token });
 }
@@ -331,17 +335,26 @@ function endOfWords(cursor: Cursor, from: number): number {
     const partOfIt = token.kind === "word" || (token.kind === "operator" && token.text === "±");
     if (!partOfIt) break;
     if (at > from && beginsBasis(cursor, at - 1)) continue;
-    const ends = stopWords.has(token.text) || statementByHead.has(token.text);
+    const ends = stopWords.has(token.text) || beginsHead(cursor, at);
     if (at > from && depth === 0 && ends && !beginsBasis(cursor, at)) break;
     for (const letter of token.text) depth += letter === "(" ? 1 : letter === ")" ? -1 : 0;
   }
   return at;
 }
 
-/** `by mass` behind a share, or whatever stands in its place: what it is a share of is a part of its unit. */
+/** Whether a line's first word stands here; of a line of two fixed words (`molar mass`) both, or the first at the end. */
+function beginsHead(cursor: Cursor, at: number): boolean {
+  const row = statementByHead.get(cursor.tokens[at]?.text ?? "");
+  const second = row?.parts[0];
+  const next = cursor.tokens[at + 1];
+  return row !== undefined && (second?.part !== "keyword" || next?.text === second.word);
+}
+
+/** `by mass`, and behind a share whatever stands in its place: what it is a share of is a part of its unit. */
 function beginsBasis(cursor: Cursor, at: number): boolean {
-  const before = cursor.tokens[at - 1]?.text ?? "";
-  return cursor.tokens[at]?.text === "by" && /(%|‰|ppm|ppb)$/.test(before);
+  const [before, by, basis] = [cursor.tokens[at - 1], cursor.tokens[at], cursor.tokens[at + 1]];
+  if (by?.text !== "by") return false;
+  return /(%|‰|ppm|ppb)$/.test(before?.text ?? "") || /^(mass|amount|volume)$/.test(basis?.text ?? "");
 }
 
 function wantedButFound(cursor: Cursor, parts: readonly Part[], row: StatementRow | null, found?: Token): void {
@@ -375,6 +388,9 @@ function mendsOf(cursor: Cursor, wanted: readonly Part[], token: Token): Mend[] 
       if (near !== undefined) return [replacement({ start: token.start, end: end.end }, near)];
     }
   }
+  const digits = numberWords.indexOf(token.text.toLowerCase());
+  if (digits >= 0 && wanted.some(({ part }) => part === "number" || part === "integer"))
+    return [replacement(token, String(digits))];
   const only = wanted.length === 1 ? wanted[0]?.part : undefined;
   if (only === "string" && token.kind === "word") {
     const last = cursor.tokens[cursor.tokens.length - 1] ?? token;
@@ -386,6 +402,8 @@ function mendsOf(cursor: Cursor, wanted: readonly Part[], token: Token): Mend[] 
     return [replacement(token, token.text)];
   return [];
 }
+
+const numberWords = ["zero", "one", "two", "three", "four", "five", "six", "seven", "eight", "nine", "ten"];
 
 /** Says of a word that is left over what could have stood in its place. */
 export function fail(cursor: Cursor, next: Token, row: StatementRow): void {
@@ -416,6 +434,28 @@ function moved(span: Span, offset: number): Span {
 function closeQuote(token: Token) {
   const end = token.start + 1 + token.text.trimEnd().length;
   return { text: `"${token.text.trimEnd()}"`, edits: [{ start: end, end: token.end, text: '"' }] };
+}
+
+function dateFault(token: Token): Fault {
+  const mends = otherDates(token.text).map((date) => replacement(token, date));
+  return fault("date-malformed", { found: token.text }, token, mends);
+}
+
+/** A date written another way: year first with other signs, or day and month first, which can be either. */
+function otherDates(text: string): string[] {
+  const [a = "", b = "", c = "", ...rest] = text.split(/[./-]/);
+  if (rest.length > 0 || ![a, b, c].every((part) => /^\d+$/.test(part))) return [];
+  const dates =
+    a.length === 4
+      ? [[a, b, c]]
+      : text.includes(".")
+        ? [[c, b, a]]
+        : [
+            [c, b, a],
+            [c, a, b],
+          ];
+  const written = dates.map((parts) => parts.map((part) => part.padStart(2, "0")).join("-"));
+  return [...new Set(written)].filter(isDate);
 }
 
 function isDate(text: string): boolean {

@@ -42,6 +42,7 @@ export function checkDimension(unit: Unit | null, expected: Expected, span: Span
  * The slips of hand that have one sensible mend: `F` for °F, `S` for s, `MIN` and the like are unknown units anyway.
  */
 function spelledOtherwise(unit: Unit, wanted: readonly Kind[], span: Span) {
+  if (wanted.includes(kinds.temperature) && unit.text === "deg") return [replacement(span, "°C")];
   if (wanted.includes(kinds.temperature) && unit.text === "F") return [replacement(span, "°F")];
   if (wanted.includes(kinds.time) && unit.text === "S") return [replacement(span, "s")];
   if (wanted.includes(kinds.time) && unit.text === "H") return [replacement(span, "h")];

@@ -75,12 +75,18 @@ function commaFault(text: string, end: number): Fault | null {
   const commas = written.split(",").length - 1;
   const point = commas === 1 && !written.includes(".") ? [written.replace(",", ".")] : [];
   const joined = groups ? [written.replaceAll(",", "")] : [];
-  const readings = [...point, ...joined];
-  const mend = readings.length > 0 ? readings.join(" or ") : "0.100";
+  const dotted = /^[-+]?[1-9]\d{0,2}(\.\d{3})+,\d+$/.test(written) ? [pointForComma(written)] : [];
+  const readings = [...point, ...joined, ...dotted];
+  const mend = readings.join(" or ");
   return fault(
     "number-comma",
     { text: written, mend },
     span,
     readings.map((reading) => replacement(span, reading)),
   );
+}
+
+/** `1.000,5` with its thousands joined: 1000.5. */
+function pointForComma(text: string): string {
+  return text.replaceAll(".", "").replace(",", ".");
 }

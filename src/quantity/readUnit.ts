@@ -161,7 +161,7 @@ function unknown(written: string, span: Span): Fault {
   if (refused !== null)
     return fault("unit-prefix", { text: written, unit: refused }, span, [replacement(span, refused)]);
   const meant = meantSymbols[written.toLowerCase()];
-  const near = meant === undefined ? nearest(written, proposable) : [meant];
+  const near = meant === undefined ? [...new Set(nearest(written, proposable))] : [meant];
   const mends = near.map((symbol) => replacement(span, symbol === "degC" ? "°C" : symbol));
   return fault("unit-unknown", { text: written, near: mends.map(({ text }) => text).join(" or ") }, span, mends);
 }

@@ -197,7 +197,7 @@ const cases: readonly Case[] = [
     said: ["word-unknown “sries”: “sries” begins no line here."],
     mend: "series x\nrun A",
   },
-  { put: ["  volume 50 mL", "  date 3.11.2026"], said: ["date-malformed “3.11.2026”"], mend: null },
+  { put: ["  volume 50 mL", "  date 3.11.2026"], said: ["date-malformed “3.11.2026”"], mend: "  date 2026-11-03" },
   { put: ["  volume 50 mL", "  date 2026-02-30"], said: ["date-malformed “2026-02-30”"], mend: null },
   {
     put: ["reaction 2", "ratewright 2\nreaction 2"],

@@ -12,7 +12,9 @@ export const quantityMessages = {
     "error",
     "Decimals are written with a point; a comma between digits could be a decimal sign or a thousands mark.",
     ({ text, mend }: { text: string; mend: string }) =>
-      `A comma between digits has no sure meaning: write ${mend} for ${text}; decimals take a point, thousands no mark.`,
+      mend === ""
+        ? `A comma between digits has no sure meaning: write ${text} with a point for decimals and no mark between thousands.`
+        : `A comma between digits has no sure meaning: write ${mend} for ${text}; decimals take a point, thousands no mark.`,
   ),
   "number-range": message(
     "error",

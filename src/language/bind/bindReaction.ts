@@ -2,6 +2,7 @@ import { type Balance, balance } from "../../chemistry/balance.js";
 import { balanceFault } from "../../chemistry/balanceFault.js";
 import { type Equation, equationText, stoichiometricNumbers } from "../../chemistry/equation.js";
 import type { Formula } from "../../chemistry/formula.js";
+import { oxygenForZero } from "../../chemistry/oxygenForZero.js";
 import { readEquation } from "../../chemistry/readEquation.js";
 import { placed, problem } from "../../contract/problem.js";
 import type { Reaction } from "../../study/reaction.js";
@@ -122,6 +123,7 @@ function checkBalance(
   }
   const found = balanceFault(equation, result, text);
   if (found === null) return "balanced";
-  reportIn(binding, statement, at, found);
+  const letter = oxygenForZero(text, (name) => binding.declared.has(name), formulaOf);
+  reportIn(binding, statement, at, letter === null ? found : { ...found, mend: [letter, ...(found.mend ?? [])] });
   return "unbalanced";
 }
