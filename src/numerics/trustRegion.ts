@@ -34,7 +34,7 @@ export function trustRegion(size: number): TrustRegion {
  * Levenberg–Marquardt step within a trust region: minimises ‖z − M s‖ over ‖D s‖ ≤ radius (to a tenth), writes s to
  * `region.step` and returns the decrease of the sum of squares that it promises.
  * `matrix` holds the `count` columns of M (`size` rows), `z` the `size` right-hand sides, `scaling` the diagonal of D.
- * Source: J. J. Moré, The Levenberg–Marquardt algorithm: implementation and theory, Lecture Notes in Mathematics 630
+ * Source: J. J. Moré, The Levenberg–Marquardt algorithm: implementation and theory, in: G. A. Watson (ed.), Numerical Analysis, Springer, Berlin
  * (1978) 105–116; each trial parameter by QR of M stacked on √λ D.
  */
 export function trustStep(

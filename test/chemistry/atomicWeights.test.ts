@@ -4,7 +4,7 @@ import { elements } from "../../src/chemistry/handbook/atomicWeights.js";
 
 /**
  * Abridged standard atomic weights 2021 and their uncertainty. Source: T. Prohaska et al., Pure Appl. Chem. 94 (2022)
- * 573-600, doi 10.1515/pac-2019-0603, read from a transcription of the table; Be's uncertainty taken as 0.0001.
+ * 573-600, doi 10.1515/pac-2019-0603, read from a copy of the table; Be's uncertainty taken as 0.0001.
  */
 const table = `
 H 1.0080 0.0002; He 4.0026 0.0001; Li 6.94 0.06; Be 9.0122 0.0001; B 10.81 0.02; C 12.011 0.002;

@@ -3,7 +3,7 @@ import { messageOf } from "../../src/contract/words.js";
 import { type Bound, bind } from "../../src/language/bind/bind.js";
 import { parse } from "../../src/language/parse.js";
 
-export const uri = "file:///work/a.raterun";
+export const uri = "file:///lab/a.raterun";
 
 /** Parses and binds a text. */
 export function boundText(text: string): Bound {

@@ -4,7 +4,7 @@ import { inlineComputer } from "../../src/workspace/computer.js";
 import { createWorkspace } from "../../src/workspace/workspace.js";
 import { memoryReader } from "./memoryReader.js";
 
-const folder = "file:///work/";
+const folder = "file:///lab/";
 
 /** The findings of a description with its data files by path, worked out the one way through the house. */
 export async function describeText(

@@ -18,7 +18,7 @@ run A
 `;
 const rows = Array.from({ length: 20 }, (_, i) => `${10 * i},${0.1 * exp(-0.02 * 10 * i)}`);
 const csv = new TextEncoder().encode(`t / s,c / mol/L\n${rows.join("\n")}\n`);
-const document = { uri: "file:///work/runs/a.raterun", text, path: "runs/a.raterun" };
+const document = { uri: "file:///lab/runs/a.raterun", text, path: "runs/a.raterun" };
 const never = new AbortController().signal;
 
 /** A workspace whose one data file is what `outcome` says, and how often it was read. */
@@ -56,7 +56,7 @@ describe("a workspace", () => {
     const { workspace, read, computed } = workspaceOf(() => ({ kind: "bytes", bytes: csv }));
     const first = await workspace.describe(document, { curves: false, signal: never });
     const again = await workspace.describe(document, { curves: false, signal: never });
-    assert.deepEqual(read, ["file:///work/x.csv"]);
+    assert.deepEqual(read, ["file:///lab/x.csv"]);
     assert.equal(computed(), 1);
     assert.equal(again, first);
     await workspace.describe({ ...document, text: `${text}# a comment\n` }, { curves: false, signal: never });
@@ -67,11 +67,11 @@ describe("a workspace", () => {
     let bytes = csv;
     const { workspace, read } = workspaceOf(() => ({ kind: "bytes", bytes }));
     const before = await workspace.describe(document, { curves: false, signal: never });
-    assert.deepEqual(workspace.changed("file:///work/other.csv"), []);
+    assert.deepEqual(workspace.changed("file:///lab/other.csv"), []);
     bytes = new TextEncoder().encode(
       new TextDecoder().decode(csv).replaceAll(/^(\d+),/gm, (_, t) => `${2 * Number(t)},`),
     );
-    assert.deepEqual(workspace.changed("file:///work/x.csv"), [document.uri]);
+    assert.deepEqual(workspace.changed("file:///lab/x.csv"), [document.uri]);
     const after = await workspace.describe(document, { curves: false, signal: never });
     assert.equal(read.length, 2);
     assert.ok(Math.abs((k(before) ?? 0) / (k(after) ?? 1) - 2) < 1e-9);
@@ -114,14 +114,14 @@ describe("a workspace", () => {
   });
 
   it("data-path-leaves: a path that leaves the folder it must stay in is not even read", async () => {
-    const { workspace, read } = workspaceOf(() => ({ kind: "bytes", bytes: csv }), { within: "file:///work/runs" });
+    const { workspace, read } = workspaceOf(() => ({ kind: "bytes", bytes: csv }), { within: "file:///lab/runs" });
     const description = await workspace.describe(document, { curves: false, signal: never });
     assert.deepEqual(read, []);
     assert.deepEqual(
       description?.diagnostics.map(({ code, line }) => `${code}@${line}`),
       ["data-path-leaves@5"],
     );
-    assert.deepEqual(await saidOf({ kind: "bytes", bytes: csv }, { within: "file:///work" }), []);
+    assert.deepEqual(await saidOf({ kind: "bytes", bytes: csv }, { within: "file:///lab" }), []);
   });
 
   it("data-path-unsaved: a description that was never saved has no folder", async () => {
