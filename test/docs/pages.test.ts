@@ -29,7 +29,7 @@ describe("the generated pages", () => {
 
   it("there is one for every code, and the list leads to it", () => {
     for (const code of Object.keys(catalogue)) {
-      assert.match(pages.get(`codes/${code}.md`) ?? "", new RegExp(`^# .{10,}\\n[sS]*\`${code}\``), code);
+      assert.match(pages.get(`codes/${code}.md`) ?? "", new RegExp(`^# .{10,}\\n[\\s\\S]*\`${code}\``), code);
       assert.ok(pages.get("codes/README.md")?.includes(`[${code}](${code}.md)`), code);
     }
   });

@@ -2,6 +2,7 @@ import type { CodeExamples } from "./codeExample.js";
 import { chemistryExamples } from "./examples/chemistry.js";
 import { dataExamples } from "./examples/data.js";
 import { fitExamples } from "./examples/fit.js";
+import { gasExamples } from "./examples/gas.js";
 import { languageExamples } from "./examples/language.js";
 import { quantityExamples } from "./examples/quantity.js";
 
@@ -12,4 +13,5 @@ export const codeExamples: CodeExamples = {
   ...chemistryExamples,
   ...dataExamples,
   ...fitExamples,
+  ...gasExamples,
 };
