@@ -18,7 +18,7 @@ export interface FitData {
 
 /** Why readings cannot carry a fit at all, seen before it is tried; null where they may. */
 export function refuseBefore({ time, value, wanted }: FitData): Refusal | null {
-  const different = new Set(time).size;
+  const different = differentTimes(time);
   const need = wanted + 1;
   if (value.length < need || different < wanted) {
     const count = value.length === 1 ? "one reading" : `${value.length} readings at ${different} different times`;
@@ -33,6 +33,13 @@ export function refuseBefore({ time, value, wanted }: FitData): Refusal | null {
     );
   }
   return null;
+}
+
+/** How many times differ; times ascend. */
+function differentTimes(time: Float64Array): number {
+  let count = 0;
+  for (let i = 0; i < time.length; i++) if (i === 0 || time[i] !== time[i - 1]) count++;
+  return count;
 }
 
 /** Why the outcome of a fit is no rate constant; null where it is one. `start` and `infinity` are the fitted ends. */

@@ -6,27 +6,15 @@ import { scatter } from "../numerics/noise.js";
 import { fromSI } from "../quantity/conversion.js";
 import { formatQuantity } from "../quantity/formatNumber.js";
 import type { Follow, RateWish, Run } from "../study/run.js";
+import { binned, unbinned } from "./bins.js";
 import type { EndContext } from "./endPoints.js";
 import { type Notes, note } from "./notes.js";
 import { rootOfSquares } from "./parameter.js";
 import { isOf, lineIn, type RunInput } from "./runInput.js";
 import { perTime, type ResultUnits, resultUnits, shown, shownQuantity } from "./shown.js";
+import type { Slope } from "./slope.js";
 
 export type RateFinding = RunFinding["rates"][number];
-
-/** A slope of the signal, and what it rests on; SI. */
-interface Slope {
-  /** weights of the readings: slope = Σ weight · reading, from index `from` on, s⁻¹ */
-  readonly weights: Float64Array;
-  readonly from: number;
-  /** weights by which the scatter of the readings counts, and where they begin */
-  readonly scatterWeights: Float64Array;
-  readonly scatterFrom: number;
-  /** what a straight or parabolic piece may miss of the bend of the signal; unit of the slope */
-  readonly bend: number;
-  /** the chord or tangent: two times and the signal there */
-  readonly mark: { readonly time: [number, number]; readonly signal: [number, number] };
-}
 
 /** The rates that a run wants of one signal, in the order of the text. */
 export function ratesOf(
@@ -178,7 +166,9 @@ function between(time: Float64Array, t: number): [number, number][] {
 }
 
 function tangent(work: RateWork, wish: RateWish, t: number): Slope | null {
-  const { time, value } = work.context.signal;
+  const { signal } = work.context;
+  const bins = binned(signal.time, signal.value, mostBins);
+  const { time, value } = bins;
   const choice = chooseBandwidth(time, value, { degree: 2, stopped: work.stopped });
   const bandwidth = { neighbours: choice?.neighbours ?? time.length };
   const fit = localSlope(time, value, t, { bandwidth, degree: 2 });
@@ -188,8 +178,12 @@ function tangent(work: RateWork, wish: RateWish, t: number): Slope | null {
   }
   const first = Math.max(time[0] as number, t - fit.halfWidth / 2);
   const last = Math.min(time[time.length - 1] as number, t + fit.halfWidth / 2);
-  return polynomialSlope(fit, localSlope(time, value, t, { bandwidth, degree: 3 }), t, [first, last]);
+  const cubic = localSlope(time, value, t, { bandwidth, degree: 3 });
+  return unbinned(polynomialSlope(fit, cubic, t, [first, last]), bins);
 }
+
+/** From more readings than this, neighbours are averaged first: the slope is the same, and the width is found at once. */
+const mostBins = 4_000;
 
 /**
  * The slope of a local quadratic. What it misses of the signal's bend is judged by the local cubic of the same width:

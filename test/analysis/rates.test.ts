@@ -61,6 +61,25 @@ describe("rates", () => {
     assert.ok(outside <= 2, `${outside} of 20`);
   });
 
+  it("many readings: neighbours are averaged first, and two standard uncertainties still hold the true rate", async () => {
+    const n = 20_001;
+    let inside = 0;
+    for (let seed = 1; seed <= 20; seed++) {
+      const random = seededRandom(seed);
+      const many = Array.from({ length: n }, (_, i): [number, number] => [
+        (300 * i) / (n - 1),
+        decay((300 * i) / (n - 1)) + 1e-3 * random.normal(),
+      ]);
+      const { run } = await ratesOf("  rate at 100 s", many);
+      const found = run.rates[0]?.rate;
+      assert.ok(found !== undefined && found !== null && found.u !== null);
+      const truth = (rate * decay(100)) / 2;
+      if (Math.abs(found.value - truth) <= 2 * found.u) inside++;
+      assert.ok(found.u < 0.05 * truth, `u is ${found.u}`);
+    }
+    assert.ok(inside >= 16, `${inside} of 20`);
+  }).timeout(60_000);
+
   it("an initial rate from the first fifth of the reaction is within 1 % of the true one", async () => {
     const { run, said } = await ratesOf(
       "  rate initial",
