@@ -26,7 +26,8 @@ export function analyseRun(run: Run, input: RunInput, notes: Notes): RunFinding 
     title: run.title,
     equation: run.reaction?.text ?? "",
     conditions: conditionsOf(run),
-    taken: takenOf(run, amounts),
+    taken: takenOf(run, amounts, input),
+    conditionPlaces: conditionPlacesOf(run, input),
     follow: [],
     rates: [],
     fits: [],
@@ -65,7 +66,20 @@ function conditionsOf(run: Run): RunFinding["conditions"] {
   return conditions;
 }
 
-function takenOf(run: Run, amounts: Stoichiometry): RunFinding["taken"] {
+function conditionPlacesOf(run: Run, { place }: RunInput): NonNullable<RunFinding["conditionPlaces"]> {
+  const facts = {
+    volume: run.volume,
+    temperature: run.temperature,
+    pressure: run.pressure,
+    "ionic strength": run.ionicStrength,
+    "head space": run.headSpace,
+  };
+  return Object.fromEntries(
+    Object.entries(facts).flatMap(([name, fact]) => (fact === null ? [] : [[name, place(fact.origin)]])),
+  );
+}
+
+function takenOf(run: Run, amounts: Stoichiometry, { place }: RunInput): RunFinding["taken"] {
   const { concentration } = resultUnits(run, noUnit, noUnit);
   return run.taken.map((taken) => {
     const initial = amounts.initial.get(taken.species.key);
@@ -75,6 +89,7 @@ function takenOf(run: Run, amounts: Stoichiometry): RunFinding["taken"] {
       stock: stockText(taken),
       concentration: initial === undefined ? null : shown(initial.value, standardUncertainty(initial), concentration),
       limiting: amounts.limiting === taken.species.key,
+      place: place(taken.origin),
     };
   });
 }
@@ -124,6 +139,6 @@ function followFinding(
     points: read?.points ?? 0,
     used: context === null ? 0 : context.signal.time.length,
     sources: context === null ? [] : sourcesOf(context),
-    ...(input.curves && context !== null ? followCurves(context) : {}),
+    ...(input.curves && context !== null && read !== null ? followCurves(context, read, input.place) : {}),
   };
 }

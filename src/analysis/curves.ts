@@ -1,6 +1,8 @@
-import type { Block, Run } from "../contract/findings.js";
+import type { Block, Place, Run } from "../contract/findings.js";
+import type { Origin } from "../contract/problem.js";
 import { firstOrderAt } from "../law/firstOrder.js";
 import { concentrations } from "../monitor/monitor.js";
+import type { Signal } from "../monitor/signal.js";
 import { fromSI, intervalFromSI } from "../quantity/conversion.js";
 import type { Unit } from "../quantity/unit.js";
 import type { EndContext } from "./endPoints.js";
@@ -8,12 +10,17 @@ import type { Estimates } from "./estimates.js";
 import type { FirstOrderFit } from "./fitFirstOrder.js";
 import type { FitFinding } from "./fitResult.js";
 import { rootOfSquares } from "./parameter.js";
+import type { LeftOut, ReadSignal } from "./readSignal.js";
 import { resultUnits } from "./shown.js";
 
-type FollowCurves = Pick<Run["follow"][number], "signal" | "time" | "concentration" | "u">;
+type FollowCurves = Pick<Run["follow"][number], "signal" | "time" | "concentration" | "u" | "lines" | "leftOut">;
 
-/** Times, readings and concentrations of a signal for pictures. */
-export function followCurves({ run, signal, relation }: EndContext): FollowCurves {
+/** Times, readings and concentrations of a signal for pictures, with the lines of the file they stand on. */
+export function followCurves(
+  { run, signal, relation }: EndContext,
+  { lines, leftOut }: ReadSignal,
+  place: (origin: Origin) => Place,
+): FollowCurves {
   const { concentration } = resultUnits(run, signal.timeUnit, signal.unit);
   const u = signal.random === null ? null : Array.from(signal.random, (size) => intervalFromSI(size, signal.unit));
   return {
@@ -21,6 +28,31 @@ export function followCurves({ run, signal, relation }: EndContext): FollowCurve
     signal: block(signal.value, signal.unit),
     concentration: block(concentrations(signal, relation), concentration),
     ...(u === null ? {} : { u: { unit: signal.unit.text, values: u } }),
+    lines: Array.from(signal.rows, (row) => lines[row] as number),
+    ...(leftOut.length === 0 ? {} : { leftOut: leftOutCurves(signal, lines, leftOut, place) }),
+  };
+}
+
+/** Readings left out, in the order of their times. */
+function leftOutCurves(
+  { timeUnit, unit }: Signal,
+  lines: Uint32Array,
+  leftOut: readonly LeftOut[],
+  place: (origin: Origin) => Place,
+): NonNullable<FollowCurves["leftOut"]> {
+  const sorted = [...leftOut].sort((a, b) => a.time - b.time);
+  return {
+    time: block(
+      Float64Array.from(sorted, ({ time }) => time),
+      timeUnit,
+    ),
+    signal: block(
+      Float64Array.from(sorted, ({ value }) => value),
+      unit,
+    ),
+    lines: sorted.map(({ row }) => lines[row] as number),
+    why: sorted.map(({ by }) => by.value.reason),
+    places: sorted.map(({ by }) => place(by.origin)),
   };
 }
 

@@ -7,6 +7,7 @@ import { sameDimension } from "../quantity/dimension.js";
 import { isKind, kinds } from "../quantity/kinds.js";
 import { combined, type Quantity } from "../quantity/quantity.js";
 import type { Unit } from "../quantity/unit.js";
+import type { Exclusion } from "../study/dataFile.js";
 import type { Fact } from "../study/fact.js";
 import type { ColumnFact, Follow, Run } from "../study/run.js";
 import { dataOrigin, type FoundColumn, findColumns, isWithin } from "./findColumns.js";
@@ -17,6 +18,20 @@ export interface ReadSignal {
   readonly signal: Signal;
   readonly points: number;
   readonly timeColumn: string;
+  /** line of the data file that each data row begins on, from 1 */
+  readonly lines: Uint32Array;
+  readonly leftOut: readonly LeftOut[];
+}
+
+/** A reading that the description leaves out. */
+export interface LeftOut {
+  /** s, from the beginning of the reaction */
+  readonly time: number;
+  /** as `Signal.value`, SI */
+  readonly value: number;
+  /** index of its data row */
+  readonly row: number;
+  readonly by: Exclusion;
 }
 
 /**
@@ -39,12 +54,15 @@ export function readSignal(run: Run, follow: Follow, file: Columns, notes: Notes
   const rows = usableRows(time.values, readings.values, left);
   const zero = run.data.timeZero;
   const blank = blankOf(follow, readings.unit, notes);
-  const value = Float64Array.from(
-    rows,
-    (row) => toSI(readings.values[row] ?? 0, readings.unit as Unit) - (blank?.value ?? 0),
-  );
+  const readingAt = (row: number): number => {
+    return toSI(readings.values[row] as number, readings.unit as Unit) - (blank?.value ?? 0);
+  };
+  const timeAt = (row: number): number => {
+    return toSI(time.values[row] as number, time.unit as Unit) - (zero?.value.value ?? 0);
+  };
+  const value = Float64Array.from(rows, readingAt);
   const signal: Signal = {
-    time: Float64Array.from(rows, (row) => toSI(time.values[row] ?? 0, time.unit as Unit) - (zero?.value.value ?? 0)),
+    time: Float64Array.from(rows, timeAt),
     uTimeZero: zero === null ? null : combined(zero.value.sources),
     value,
     random: randomOf(follow, readings, value, notes),
@@ -53,7 +71,11 @@ export function readSignal(run: Run, follow: Follow, file: Columns, notes: Notes
     unit: readings.unit,
     rows,
   };
-  return { signal, points: file.rows, timeColumn: time.fact.name };
+  const leftOut = [...left].flatMap(([row, by]): LeftOut[] => {
+    const reading = { time: timeAt(row), value: readingAt(row), row, by };
+    return Number.isNaN(reading.time) || Number.isNaN(reading.value) ? [] : [reading];
+  });
+  return { signal, points: file.rows, timeColumn: time.fact.name, lines: file.lines, leftOut };
 }
 
 /** The column whose unit is a time; of several the first, with an information. */
@@ -112,24 +134,25 @@ function withDecimalOption(run: Run, found: Problem): Problem {
   return { ...found, mend: [{ text: "decimal comma", edits: [{ start: end, end, text: "\n    decimal comma" }] }] };
 }
 
-/** Rows that the description leaves out, by the line of the file or by a span of its times. */
-function excludedRows(run: Run, file: Columns, time: FoundColumn): ReadonlySet<number> {
-  const rows = new Set<number>();
-  for (const { value } of run.data?.exclusions ?? []) {
+/** Rows that the description leaves out, by the line of the file or by a span of its times; each with what leaves it out. */
+function excludedRows(run: Run, file: Columns, time: FoundColumn): ReadonlyMap<number, Exclusion> {
+  const rows = new Map<number, Exclusion>();
+  for (const exclusion of run.data?.exclusions ?? []) {
+    const { value } = exclusion;
     for (let row = 0; row < file.rows; row++) {
       if ("line" in value) {
-        if (file.lines[row] === value.line) rows.add(row);
+        if (file.lines[row] === value.line) rows.set(row, exclusion);
         continue;
       }
       const t = toSI(time.values[row] as number, time.unit as Unit);
-      if (t >= value.from.value && t <= value.to.value) rows.add(row);
+      if (t >= value.from.value && t <= value.to.value) rows.set(row, exclusion);
     }
   }
   return rows;
 }
 
 /** Rows with both a time and a reading, down to the first that goes back in time: what follows may be another run. */
-function usableRows(time: Float64Array, readings: Float64Array, excluded: ReadonlySet<number>): Uint32Array {
+function usableRows(time: Float64Array, readings: Float64Array, excluded: ReadonlyMap<number, Exclusion>): Uint32Array {
   const rows: number[] = [];
   let before = Number.NEGATIVE_INFINITY;
   for (let row = 0; row < time.length; row++) {

@@ -38,8 +38,10 @@ export function chooseBandwidth(
   const block = options.blockHalfLength ?? Math.max(1, Math.round(Math.sqrt(Math.sqrt(n))) - 1);
   const targets = predicted(n, block);
   const trials: { neighbours: number; score: number }[] = [];
+  const errors: Float64Array[] = [];
   for (const neighbours of ladder(degree + 2 * block + 3, n)) {
     const local: LocalOptions = { bandwidth: { neighbours }, degree, kernel: options.kernel ?? "tricube" };
+    const squares = new Float64Array(targets.length);
     let sum = 0;
     let count = 0;
     for (const i of targets) {
@@ -47,15 +49,42 @@ export function chooseBandwidth(
       const fit = localFit(x, y, x[i]!, local, i - block, i + block + 1);
       if (fit === null) break;
       const error = y[i]! - fit.value;
+      squares[count] = error * error;
       sum += error * error;
       count++;
     }
     // only trials that predict every target can be compared
-    if (count === targets.length && count > 0 && Number.isFinite(sum)) trials.push({ neighbours, score: sum / count });
+    if (count < targets.length || count === 0 || !Number.isFinite(sum)) continue;
+    trials.push({ neighbours, score: sum / count });
+    errors.push(squares);
   }
-  let best: { neighbours: number; score: number } | null = null;
-  for (const trial of trials) if (best === null || trial.score < best.score) best = trial;
-  return best === null ? null : { ...best, blockHalfLength: block, trials };
+  const chosen = widestAsGood(trials, errors);
+  return chosen === null ? null : { ...chosen, blockHalfLength: block, trials };
+}
+
+/**
+ * The widest trial that predicts no worse than the best one by more than a standard error of their paired difference: the
+ * score is flat about its minimum, and where chance decides, a narrower width only adds scatter.
+ */
+function widestAsGood(
+  trials: readonly { readonly neighbours: number; readonly score: number }[],
+  errors: readonly Float64Array[],
+): { readonly neighbours: number; readonly score: number } | null {
+  let best = -1;
+  trials.forEach((trial, index) => {
+    if (best < 0 || trial.score < trials[best]!.score) best = index;
+  });
+  if (best < 0) return null;
+  let chosen = best;
+  for (let index = best + 1; index < trials.length; index++) {
+    const n = errors[index]!.length;
+    const difference = errors[index]!.map((square, i) => square - errors[best]![i]!);
+    const mean = difference.reduce((sum, d) => sum + d, 0) / n;
+    const spread = difference.reduce((sum, d) => sum + (d - mean) * (d - mean), 0);
+    if (mean > Math.sqrt(spread / (n * Math.max(1, n - 1)))) break;
+    chosen = index;
+  }
+  return trials[chosen]!;
 }
 
 function predicted(n: number, block: number): number[] {
