@@ -70,7 +70,11 @@ export interface Run extends Item {
     stock: string | null;
     concentration: Q | null;
     limiting: boolean;
+    /** the line that says so, in this run or in the one it is like */
+    place?: Place;
   }[];
+  /** the line of each condition, by its name */
+  conditionPlaces?: { [name: string]: Place };
   follow: (Item & {
     species: string;
     monitor: string;
@@ -84,6 +88,10 @@ export interface Run extends Item {
     time?: Block;
     concentration?: Block;
     u?: Block;
+    /** line of the data file that each reading stands on, from 1 */
+    lines?: number[];
+    /** readings that the description leaves out, and why; `places` are its lines that say so */
+    leftOut?: { time: Block; signal: Block; lines: number[]; why: string[]; places: Place[] };
   })[]; // curves
   rates: (Item & {
     kind: "average" | "instantaneous" | "initial" | "event";

@@ -8,13 +8,21 @@ export type Rate = Run["rates"][number];
 /** Greatest number of readings that a picture draws. */
 const most = 600;
 
+/** A reading that is drawn; `used`: a fit rests on it. `line` of the data file, from 1; null where it is not known. */
+export interface PictureReading {
+  readonly time: number;
+  readonly signal: number;
+  readonly used: boolean;
+  readonly line: number | null;
+}
+
 /** What a picture of one follow shows, in the units of its columns. */
 export interface PictureContent {
   readonly follow: Follow;
   readonly timeUnit: string;
   readonly signalUnit: string;
-  /** the readings drawn; `used` tells whether any fit rests on them */
-  readonly readings: readonly { readonly time: number; readonly signal: number; readonly used: boolean }[];
+  /** the readings drawn */
+  readonly readings: readonly PictureReading[];
   /** whether `readings` are only the lowest and highest of many, drawn as a ribbon */
   readonly thinned: boolean;
   /** fits with a curve, in the order of the text; `number` counts all fits of the run, from 1 */
@@ -33,7 +41,12 @@ export function pictureContent(run: Run, follow: Follow): PictureContent | null 
   const indices = decimate(time.values, signal.values, most);
   const readings = indices.map((index) => {
     const t = time.values[index] as number;
-    return { time: t, signal: signal.values[index] as number, used: inAWindow(t) };
+    return {
+      time: t,
+      signal: signal.values[index] as number,
+      used: inAWindow(t),
+      line: follow.lines?.[index] ?? null,
+    };
   });
   if (readings.length === 0) return null;
   return {

@@ -1,0 +1,116 @@
+import type { Run } from "../contract/findings.js";
+import type { Plot, PlotReading } from "../contract/previewProtocol.js";
+import { formatQuantity } from "../quantity/formatNumber.js";
+import { type PictureContent, pictureContent, residualsOf } from "./pictureContent.js";
+import { extentOf } from "./plotFrame.js";
+import { niceTicks } from "./ticks.js";
+
+type Follow = Run["follow"][number];
+
+/** Powers of ten taken out of an axis: a value on the axis times 10^power is the value in its unit. */
+export interface PlotPowers {
+  readonly time: number;
+  readonly signal: number;
+  readonly residual: number;
+}
+
+/** The powers of ten of a plot's axes, as its static picture has them. */
+export function plotPowers(run: Run, follow: Follow): PlotPowers {
+  const content = pictureContent(run, follow);
+  if (content === null) return { time: 0, signal: 0, residual: 0 };
+  const power = (values: readonly (number | null)[]): number => niceTicks(...extentOf(values, 0), 6).power;
+  return {
+    time: power(content.readings.map(({ time }) => time)),
+    signal: power(content.readings.map(({ signal }) => signal)),
+    residual: power([0, ...residualsIn(content).map(({ residual }) => residual)]),
+  };
+}
+
+/**
+ * What a plot of a follow line draws, thinned out so that the eye sees no difference; null where there are no readings.
+ * `file`: URI of the data file, null where it may not be opened.
+ */
+export function plotData(run: Run, follow: Follow, file: string | null): Plot | null {
+  const content = pictureContent(run, follow);
+  if (content === null) return null;
+  const powers = plotPowers(run, follow);
+  const time = (t: number): number => scaled(t, powers.time);
+  const signal = (y: number): number => scaled(y, powers.signal);
+  return {
+    id: follow.id,
+    timeUnit: content.timeUnit,
+    timeFactor: Number(`1e${powers.time}`),
+    file,
+    readings: readingsOf(content, time, signal),
+    curves: content.fits.flatMap(({ number, curve }, order) =>
+      curve.time.values.flatMap((t, index) => {
+        const y = curve.signal.values[index];
+        if (t === null || typeof y !== "number") return [];
+        const [low, high] = [curve.low.values[index] ?? y, curve.high.values[index] ?? y];
+        return [{ t: time(t), y: signal(y), low: signal(low), high: signal(high), fit: `fit ${number}`, order }];
+      }),
+    ),
+    marks: content.rates.map(({ rate, number, mark }) => {
+      const [t, t2] = mark.time;
+      const [y, y2] = mark.signal;
+      const touch = rate.at?.value ?? t;
+      const at = { t: time(touch), y: signal(t2 === t ? y : y + ((touch - t) / (t2 - t)) * (y2 - y)) };
+      const chord = rate.kind === "average";
+      return {
+        ...{ t: time(t), y: signal(y), t2: time(t2), y2: signal(y2) },
+        kind: chord ? "chord" : "tangent",
+        label: String(number),
+        at: chord ? null : at,
+      };
+    }),
+    residuals: residualsIn(content).map((one) => ({
+      t: time(one.time),
+      r: scaled(one.residual, powers.residual),
+      order: one.order,
+    })),
+    fits: run.fits.filter((fit) => fit.follow === follow.id).map(({ id }) => id),
+  };
+}
+
+function readingsOf(
+  { follow, readings, thinned, timeUnit, signalUnit }: PictureContent,
+  time: (t: number) => number,
+  signal: (y: number) => number,
+): PlotReading[] {
+  const words = (t: number, y: number, line: number | null, why: string): string => {
+    const where = line === null ? "" : `, line ${line} of the file`;
+    return `${formatQuantity(y, null, signalUnit)} at ${formatQuantity(t, null, timeUnit)}${where}${why}`;
+  };
+  const kept = readings.map((reading): PlotReading => {
+    const kind = !reading.used ? "outside" : thinned ? "outline" : "used";
+    const why = reading.used ? "" : "; outside the window of the fit";
+    return {
+      t: time(reading.time),
+      y: signal(reading.signal),
+      kind,
+      line: reading.line,
+      words: words(reading.time, reading.signal, reading.line, why),
+    };
+  });
+  const { leftOut } = follow;
+  if (leftOut === undefined) return kept;
+  const out = leftOut.time.values.flatMap((t, index): PlotReading[] => {
+    const y = leftOut.signal.values[index];
+    const line = leftOut.lines[index] ?? null;
+    if (t === null || typeof y !== "number") return [];
+    const why = `; left out: ${leftOut.why[index] || "no reason stated"}`;
+    return [{ t: time(t), y: signal(y), kind: "left out", line, words: words(t, y, line, why) }];
+  });
+  return [...kept, ...out];
+}
+
+function residualsIn(content: PictureContent): { time: number; residual: number; order: number }[] {
+  return content.fits.flatMap(({ fit }, order) =>
+    residualsOf(content.follow, fit).map((residual) => ({ ...residual, order })),
+  );
+}
+
+/** A value with a power of ten taken out, by division where that is exact to the last digit. */
+function scaled(value: number, power: number): number {
+  return power >= 0 ? value / Number(`1e${power}`) : value * Number(`1e${-power}`);
+}
