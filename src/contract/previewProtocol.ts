@@ -48,6 +48,8 @@ export interface Plot {
   readonly curves: readonly PlotCurvePoint[];
   readonly marks: readonly PlotMark[];
   readonly residuals: readonly PlotResidual[];
+  /** what the axis of the residuals shows */
+  readonly residualTitle: string;
   /** ids of the fits of this signal, to which a window may be written */
   readonly fits: readonly string[];
 }

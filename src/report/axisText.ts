@@ -1,6 +1,7 @@
 import { toSuperscript } from "../quantity/plainText.js";
 import { printedUnit } from "../quantity/quantityText.js";
 import { escapeHtml } from "./escape.js";
+import { type Html, html } from "./html.js";
 import { printedSpecies } from "./printedSpecies.js";
 
 /** What an axis shows: symbol (slanted where it is one), of what, unit, and the power of ten taken out of its numbers. */
@@ -24,6 +25,12 @@ export function axisMarkup({ symbol, of, unit, power }: AxisName): string {
   const slanted =
     [...symbol].length === 1 ? `<tspan font-style="italic">${escapeHtml(symbol)}</tspan>` : escapeHtml(symbol);
   return `${slanted}${escapeHtml(of === "" ? "" : `(${of})`)}${escapeHtml(divisor(unit, power))}`;
+}
+
+/** The same as HTML. */
+export function axisHtml({ symbol, of, unit, power }: AxisName): Html {
+  const slanted = [...symbol].length === 1 ? html`<i>${symbol}</i>` : html`${symbol}`;
+  return html`${slanted}${of === "" ? "" : `(${of})`}${divisor(unit, power)}`;
 }
 
 /** The same without markup. */

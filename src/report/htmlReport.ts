@@ -1,12 +1,10 @@
-import type { Description, Findings, Run } from "../contract/findings.js";
+import type { Description, Findings } from "../contract/findings.js";
 import { type Html, html, nothing, readyMarkup } from "./html.js";
-import { factTable, headedTable, lineCell } from "./htmlTable.js";
+import { factTable, headedTable } from "./htmlTable.js";
 import { pageStyle } from "./pageStyle.js";
-import { runDone } from "./runDone.js";
-import { runFollows } from "./runFollows.js";
-import { runSeen } from "./runSeen.js";
-import { runSure } from "./runSure.js";
-import { belongsTo, diagnosticList, runWatch } from "./runWatch.js";
+import { reportFigure } from "./reportFigure.js";
+import { runPart } from "./runPart.js";
+import { belongsTo, diagnosticList } from "./runWatch.js";
 import { mechanismPart, seriesPart } from "./seriesPart.js";
 
 /**
@@ -53,33 +51,12 @@ function descriptionPart(description: Description, index: number): Html {
       ? nothing
       : html`<section><h3>On the description as a whole</h3>${diagnosticList(others)}</section>`;
   return html`<article id="d${index + 1}"><h2>${path}</h2>
-${runs.map((run) => runPart(run, description))}
+${runs.map((run) => runPart(run, description, reportFigure))}
 ${series.map(seriesPart)}${mechanisms.map(mechanismPart)}${beside}${provenance(description)}</article>`;
 }
 
-function runPart(run: Run, { diagnostics }: Description): Html {
-  const title = run.title === null ? "" : `: ${run.title}`;
-  const own = diagnostics.filter((diagnostic) => belongsTo(run, diagnostic));
-  return html`<section><h3>Run ${run.name}${title} ${lineCell(run)}</h3>
-${part("What was done", runDone(run))}
-${part("What was seen", runSeen(run))}
-${part("What follows", runFollows(run))}
-${part("How sure", runSure(run))}
-${part("What to watch", runWatch(run, own))}
-</section>`;
-}
-
-/** One step of the argument; folded, its gist is the one line left. */
-function part(name: string, { gist, body }: { gist: string | Html; body: Html }): Html {
-  const line =
-    gist === "" || (typeof gist === "object" && gist.markup === "")
-      ? nothing
-      : html` <span class="gist">${gist}</span>`;
-  return html`<details open><summary><h4>${name}</h4>${line}</summary>${body}</details>`;
-}
-
 /** Which bytes and which meaning the figures rest on. */
-function provenance({ meaning, data }: Description): Html {
+export function provenance({ meaning, data }: Description): Html {
   const rows = data.map(({ path, rows, sha256 }) => [path, String(rows), html`<code>${sha256}</code>`]);
   return html`<section class="provenance"><h3>What it rests on</h3>${headedTable("Data files", ["file", "rows", "SHA-256"], rows)}${factTable("The description", [["meaning of the description, SHA-256", html`<code>${meaning}</code>`]])}</section>`;
 }

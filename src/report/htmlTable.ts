@@ -32,5 +32,5 @@ function isEmpty(cell: Cell | undefined): boolean {
 
 /** Where in the description something stands: "line 12". */
 export function lineCell({ place }: { place: { line: number } }): Html {
-  return html`<span class="line">line ${place.line}</span>`;
+  return html`<span class="line" data-line="${place.line}">line ${place.line}</span>`;
 }

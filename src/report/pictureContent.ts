@@ -68,17 +68,22 @@ export function pictureContent(run: Run, follow: Follow): PictureContent | null 
 
 /** Residuals of a fit with their times, thinned out as readings are; none where the two do not belong together. */
 export function residualsOf(follow: Follow, fit: Fit): { time: number; residual: number }[] {
-  const { window, residuals } = fit;
-  if (window === null || residuals === undefined || follow.time === undefined || follow.signal === undefined) return [];
-  const signal = follow.signal.values;
-  const times = follow.time.values.filter(
-    (t, index): t is number => t !== null && signal[index] !== null && within(window, t),
-  );
-  if (times.length !== residuals.values.length) return [];
+  const { residuals } = fit;
+  const times = residualTimes(follow, fit);
+  if (residuals === undefined || times.length === 0) return [];
   return decimate(times, residuals.values, most).map((index) => ({
     time: times[index] as number,
     residual: residuals.values[index] as number,
   }));
+}
+
+/** Times of a fit's residuals, each of which belongs to the residual of the same index; none where they do not fit together. */
+export function residualTimes({ time, signal }: Follow, { window, residuals }: Fit): number[] {
+  if (window === null || residuals === undefined || time === undefined || signal === undefined) return [];
+  const times = time.values.filter(
+    (t, index): t is number => t !== null && signal.values[index] !== null && within(window, t),
+  );
+  return times.length === residuals.values.length ? times : [];
 }
 
 /** How many readings have both a time and a value. */

@@ -1,6 +1,7 @@
 import type { Run } from "../contract/findings.js";
 import type { Plot, PlotReading } from "../contract/previewProtocol.js";
 import { formatQuantity } from "../quantity/formatNumber.js";
+import { axisWords } from "./axisText.js";
 import { type PictureContent, pictureContent, residualsOf } from "./pictureContent.js";
 import { extentOf } from "./plotFrame.js";
 import { niceTicks } from "./ticks.js";
@@ -68,6 +69,12 @@ export function plotData(run: Run, follow: Follow, file: string | null): Plot | 
       r: scaled(one.residual, powers.residual),
       order: one.order,
     })),
+    residualTitle: axisWords({
+      symbol: "reading − curve",
+      of: "",
+      unit: content.signalUnit,
+      power: powers.residual,
+    }),
     fits: run.fits.filter((fit) => fit.follow === follow.id).map(({ id }) => id),
   };
 }

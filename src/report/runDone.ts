@@ -1,6 +1,6 @@
 import type { Run } from "../contract/findings.js";
 import { type Html, html } from "./html.js";
-import { type Cell, factTable } from "./htmlTable.js";
+import { type Cell, factTable, lineCell } from "./htmlTable.js";
 import { printedEquation, printedSpecies } from "./printedSpecies.js";
 import { printedQuantity, printedSentence } from "./printedText.js";
 
@@ -8,15 +8,19 @@ import { printedQuantity, printedSentence } from "./printedText.js";
 export function runDone(run: Run): { gist: string; body: Html } {
   const rows: Cell[][] = [];
   if (run.equation !== "") rows.push(["reaction", printedEquation(run.equation)]);
-  for (const { species, given, stock, concentration, limiting } of run.taken) {
+  for (const { species, given, stock, concentration, limiting, place } of run.taken) {
     const converted =
       concentration === null || concentration.text === given.text ? "" : `, that is ${printedQuantity(concentration)}`;
     rows.push([
       `taken of ${printedSpecies(species)}`,
       `${printedQuantity(given)}${stock === null ? "" : ` of ${printedSentence(stock)}`}${converted}${limiting ? "; runs out first" : ""}`,
+      place === undefined ? null : lineCell({ place }),
     ]);
   }
-  for (const [name, value] of Object.entries(run.conditions)) rows.push([name, printedQuantity(value)]);
+  for (const [name, value] of Object.entries(run.conditions)) {
+    const place = run.conditionPlaces?.[name];
+    rows.push([name, printedQuantity(value), place === undefined ? null : lineCell({ place })]);
+  }
   if (run.conditions["temperature"] === undefined) rows.push(["temperature", "not stated"]);
   const gist = [printedEquation(run.equation), conditionWords(run)].filter((words) => words !== "").join(", ");
   return { gist, body: html`${factTable(`What was done in run ${run.name}`, rows)}` };

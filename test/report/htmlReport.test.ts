@@ -53,7 +53,7 @@ describe("HTML report", () => {
       "No rate constant: all readings are the same",
       "Follow it longer.",
       "No formula is known.",
-      '<span class="line">line 7</span>',
+      '<span class="line" data-line="7">line 7</span>',
       "0".repeat(64),
       "f".repeat(64),
     ]) {

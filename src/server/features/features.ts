@@ -4,6 +4,7 @@ import { codeActions } from "./codeActions.js";
 import { diagnostics } from "./diagnostics.js";
 import { formatting } from "./formatting.js";
 import { hover } from "./hover.js";
+import { preview } from "./preview.js";
 import { status } from "./status.js";
 import { watchedFiles } from "./watchedFiles.js";
 
@@ -16,4 +17,5 @@ export const features: readonly Feature[] = [
   hover,
   watchedFiles,
   status,
+  preview,
 ];
