@@ -15,6 +15,8 @@ export interface Parsed {
   /** lines directly in the file, in order; what stands above the first run holds for every run */
   readonly statements: readonly Statement[];
   readonly problems: readonly Problem[];
+  /** where lines begin whose first word is not known and near to none: what they are meant to say is lost */
+  readonly lost: readonly number[];
   /** what could come next at the end of the text */
   readonly wantedAtEnd: readonly Part[];
 }
@@ -28,6 +30,9 @@ interface State {
   readonly uri: string;
   readonly problems: Problem[];
   readonly open: Open[];
+  readonly lost: number[];
+  /** the last line was lost: it may be the header of those that follow */
+  headerLost: boolean;
   runSeen: boolean;
   /** kinds of line that were said to stand wrong below the present run: once is enough */
   readonly misplaced: Set<StatementRow>;
@@ -37,7 +42,15 @@ interface State {
 export function parse(uri: string, text: string): Parsed {
   const index = lineIndex(text);
   const file: Open = { owner: "file", children: [] };
-  const state: State = { uri, problems: [], open: [file], runSeen: false, misplaced: new Set() };
+  const state: State = {
+    uri,
+    problems: [],
+    open: [file],
+    lost: [],
+    headerLost: false,
+    runSeen: false,
+    misplaced: new Set(),
+  };
   let wantedAtEnd: readonly Part[] = [];
   index.starts.forEach((offset, number) => {
     const next = index.starts[number + 1] ?? text.length;
@@ -47,7 +60,7 @@ export function parse(uri: string, text: string): Parsed {
     if (parsed.fault !== null) state.problems.push(placed(parsed.fault, uri, offset));
     for (const statement of parsed.statements) attach(state, statement, line, offset);
   });
-  return { uri, text, index, statements: file.children, problems: state.problems, wantedAtEnd };
+  return { uri, text, index, statements: file.children, problems: state.problems, lost: state.lost, wantedAtEnd };
 }
 
 function withoutBreak(text: string, start: number, next: number): string {
@@ -59,12 +72,16 @@ function withoutBreak(text: string, start: number, next: number): string {
 /** Puts a statement below the nearest open header that lists it. */
 function attach(state: State, line: LineStatement, text: string, offset: number): void {
   const known = line.row === null ? guess(state, line, text, offset) : line;
-  if (known === null || known.row === null) return;
+  if (known === null || known.row === null) {
+    state.lost.push(offset);
+    state.headerLost = true;
+    return;
+  }
   const { row } = known;
   const depth = state.open.findLastIndex((candidate) => takes(state, candidate.owner, row));
   const owner = state.open[depth];
   if (owner === undefined) {
-    if (known.fault === null && !state.misplaced.has(row)) {
+    if (known.fault === null && !state.headerLost && !state.misplaced.has(row)) {
       state.misplaced.add(row);
       state.problems.push(placed(misplaced(row, known), state.uri, offset));
     }
@@ -72,6 +89,7 @@ function attach(state: State, line: LineStatement, text: string, offset: number)
   }
   const statement: Statement = { line: known, offset, owner: owner.owner, children: [] };
   owner.children.push(statement);
+  state.headerLost = false;
   state.open.length = depth + 1;
   if (depth === 0) state.misplaced.clear();
   if (row.opens !== undefined) state.open.push({ owner: row.opens, children: statement.children });
@@ -99,6 +117,14 @@ function guess(state: State, line: LineStatement, text: string, offset: number):
     return row !== undefined && state.open.some((open) => takes(state, open.owner, row));
   });
   const near = nearestHead(line, text, allowed) ?? begunHeader(line, allowed) ?? begunWord(line, allowed);
+  const behind = near === null ? behindSign(line, text, allowed) : null;
+  if (behind !== null) {
+    const words = { word: line.head.text, allowed: describeHeads(allowed) };
+    const without = { text: behind.head.text, edits: [{ start: line.head.start, end: behind.head.start, text: "" }] };
+    const stray = fault("word-unknown", words, line.head, [without]);
+    state.problems.push(placed(stray, state.uri, offset));
+    return { ...behind, fault: stray };
+  }
   const mend = near === null ? [] : [replacement(line.head, near)];
   const unknown = fault("word-unknown", { word: line.head.text, allowed: describeHeads(allowed) }, line.head, mend);
   state.problems.push(placed(unknown, state.uri, offset));
@@ -115,6 +141,13 @@ function nearestHead({ head }: LineStatement, text: string, allowed: readonly st
     return row !== undefined && parseLineAs(text, row).fault === null;
   });
   return sound ?? near[0] ?? null;
+}
+
+/** The line behind a sign that people put in front of it: `- volume 50 mL`, `* volume 50 mL`. */
+function behindSign({ head }: LineStatement, text: string, allowed: readonly string[]): LineStatement | null {
+  if (/[\p{L}\p{N}]/u.test(head.text)) return null;
+  const rest = parseLine(" ".repeat(head.end) + text.slice(head.end)).statements[0];
+  return rest !== undefined && allowed.includes(rest.row?.head ?? "") ? rest : null;
 }
 
 /** A first word cut short, as `temp`, where only one begins so. */

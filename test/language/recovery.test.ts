@@ -1,5 +1,5 @@
 import assert from "node:assert/strict";
-import { boundText, saidOf } from "../support/checkText.js";
+import { boundText, mended, saidOf } from "../support/checkText.js";
 
 const codes = (text: string): string[] => saidOf(text).map((said) => said.split(" ")[0] ?? "");
 
@@ -159,5 +159,59 @@ run Z
 
   it("a run cannot start like one below it", () => {
     assert.deepEqual(codes("run A like B\nrun B\n"), ["like-later"]);
+  });
+});
+
+describe("what a broken or lost line may have said is not said to be missing", () => {
+  /** That a series is not computed yet is beside the point. */
+  const said = (text: string): string[] => saidOf(text).filter((words) => !words.startsWith("not-computed-yet"));
+  const saidCodes = (text: string): string[] => said(text).map((words) => words.split(" ")[0] ?? "");
+  const sound = `reaction 2 H2O2 -> 2 H2O + O2
+run A
+  temperature 25 °C
+  data "x.csv"
+    column t "t / s"
+    column c "c / mol/L"
+  follow H2O2 as concentration from c
+  fit order 1 in H2O2
+run B like A
+series s
+  across A, B
+`;
+
+  it("nothing is said of the sound text", () => assert.deepEqual(saidCodes(sound), []));
+
+  for (const [what, words, instead] of [
+    ["a data line by another name", 'data "x.csv"', 'file "x.csv"'],
+    ["a follow line by another name", "follow", "watched"],
+    ["a temperature by its symbol", "temperature", "T"],
+    ["a column by another name", "column c", "spalte c"],
+    ["a run by another name", "run B", "Versuch B"],
+    ["a reaction by another name", "reaction", "equation"],
+  ] as const) {
+    it(`${what}: word-unknown alone, on that word`, () => {
+      const text = sound.replace(words, instead);
+      const [first, ...others] = said(text);
+      assert.ok(first?.startsWith(`word-unknown “${instead.split(" ")[0]}”`), first);
+      assert.deepEqual(others, []);
+    });
+  }
+
+  it("a broken run line still names its run", () => {
+    assert.deepEqual(saidCodes(sound.replace("run B like A", "run B lik A")), ["line-unexpected"]);
+  });
+
+  it("a broken species line, or a formula that cannot be read, does not leave a mass without its molar mass", () => {
+    const text = "species ester is C4H8O2\nrun A\n  volume 50 mL\n  taken ester 1.0 g\n";
+    assert.deepEqual(saidCodes(text), []);
+    assert.deepEqual(saidCodes(text.replace(" is C4H8O2", "")), ["taken-needs-formula"]);
+    assert.equal(saidCodes(text.replace("is", "ist")).length, 1);
+    assert.equal(saidCodes(text.replace("C4H8O2", "4H8O2")).length, 1);
+  });
+
+  it("a sign in front of a line is taken out", () => {
+    const text = sound.replace("  temperature", "- temperature");
+    assert.deepEqual(saidCodes(text), ["word-unknown"]);
+    assert.deepEqual(saidCodes(mended(text)), []);
   });
 });

@@ -1,8 +1,9 @@
 import { type Problem, problem, replacement } from "../../contract/problem.js";
 import { nearest } from "../../quantity/nearest.js";
-import type { Reaction } from "../../study/reaction.js";
+import type { Reaction, Species } from "../../study/reaction.js";
 import type { RunSource, Study } from "../../study/study.js";
 import { isBroken, numberOf, originOf, textOf } from "../fields.js";
+import { lexLine } from "../lexer.js";
 import type { Parsed } from "../parse.js";
 import type { Statement } from "../syntax.js";
 import { bindCalibrations } from "./bindCalibrations.js";
@@ -13,7 +14,7 @@ import { bindRun } from "./bindRun.js";
 import { bindMechanism, bindSeries } from "./bindSeries.js";
 import { bindTable } from "./bindTable.js";
 import { withBlankJoined } from "./blankLine.js";
-import { checkRun } from "./checkRun.js";
+import { checkMasses, checkRun } from "./checkRun.js";
 import { declareSpecies } from "./declareSpecies.js";
 import { checkRepeats, type KeyOf, mergeLines } from "./effectiveLines.js";
 import { sayHeadersOutside, sayKept } from "./keptLines.js";
@@ -44,14 +45,16 @@ export function bind(parsed: Parsed): Bound {
     declared,
     calibrations,
     salvaged: new Set<string>(),
+    halfDeclared: halfDeclared(declared, withHead("species")),
   };
   const { reactions, salvaged } = bindReactions(gathering, withHead("reaction"));
-  const binding: Binding = { ...gathering, salvaged };
+  const onLostLines = lostLines(parsed);
+  const binding: Binding = { ...gathering, salvaged: new Set([...salvaged, ...onLostLines.words]) };
   const keyOf = speciesKeys(binding);
   checkVersion(binding, parsed);
   checkRepeats(binding, parsed.index, statements, keyOf);
-  const runs = bindRuns(binding, parsed, reactions, keyOf);
-  const names = new Set(runs.flatMap((source) => (source.kind === "run" ? [source.run.name] : [])));
+  const runs = bindRuns(binding, parsed, reactions, keyOf, onLostLines.arrow);
+  const names = new Set(withHead("run").flatMap((line) => textOf(line, "run") ?? []));
   const together = { binding, reactions, runs: names, tables: runs.some(({ kind }) => kind === "table") };
   const study: Study = {
     uri,
@@ -70,13 +73,41 @@ export function bind(parsed: Parsed): Bound {
   return { parsed, study, problems: all, uses };
 }
 
-function bindRuns(binding: Binding, parsed: Parsed, reactions: readonly Reaction[], keyOf: KeyOf): RunSource[] {
+/** Names whose species line is broken, or holds a formula that cannot be read. */
+function halfDeclared(declared: ReadonlyMap<string, Species>, lines: readonly Statement[]): ReadonlySet<string> {
+  const half = lines.filter((line) => {
+    const formula = declared.get(textOf(line, "species") ?? "")?.formula ?? null;
+    return isBroken(line) || (formula === null && textOf(line, "formula") !== null);
+  });
+  return new Set(half.flatMap((line) => textOf(line, "species") ?? []));
+}
+
+/** What stands on lines that were lost: words that may be names declared there, and whether one looks like a reaction. */
+function lostLines({ lost, text }: Parsed): { words: readonly string[]; arrow: boolean } {
+  const tokens = lost.flatMap((at) => lexLine(/^[^\r\n]*/.exec(text.slice(at, at + longestLost))?.[0] ?? ""));
+  return {
+    words: tokens.flatMap((token) => (token.kind === "word" ? [token.text] : [])),
+    arrow: tokens.some(({ kind, text: sign }) => kind === "operator" && sign !== "," && sign !== "±"),
+  };
+}
+
+/** As much of a lost line is looked through, in letters. */
+const longestLost = 400;
+
+function bindRuns(
+  binding: Binding,
+  parsed: Parsed,
+  reactions: readonly Reaction[],
+  keyOf: KeyOf,
+  reactionLost: boolean,
+): RunSource[] {
   const defaults: Statement[] = [];
   const effective = new Map<string, readonly Statement[]>();
+  const unsure = new Set<string>();
   const runs: RunSource[] = [];
   const { statements } = parsed;
   const headers = statements.filter(({ line }) => line.row?.head === "run");
-  const reactionWritten = statements.some(({ line }) => line.row?.head === "reaction");
+  const reactionWritten = reactionLost || statements.some(({ line }) => line.row?.head === "reaction");
   const resultsIn = bindResultsIn(binding, statements);
   for (const statement of statements) {
     const { row } = statement.line;
@@ -95,10 +126,19 @@ function bindRuns(binding: Binding, parsed: Parsed, reactions: readonly Reaction
       continue;
     }
     effective.set(name, lines);
-    checkRun(binding, statement, run, lines, reactionWritten);
+    if (isUnsure(parsed, statement, headers[0]) || unsure.has(textOf(statement, "like") ?? "")) unsure.add(name);
+    else checkRun(binding, statement, run, lines, reactionWritten);
+    checkMasses(binding, run);
     runs.push({ kind: "run", run });
   }
   return runs;
+}
+
+/** Whether a line was lost that may hold for a run, its own or one above the first: it may be what the run seems to lack. */
+function isUnsure({ lost, statements }: Parsed, header: Statement, first: Statement | undefined): boolean {
+  const next = statements.find(({ line, offset }) => offset > header.offset && line.row?.opens !== undefined);
+  const end = next?.offset ?? Number.POSITIVE_INFINITY;
+  return lost.some((at) => at < (first?.offset ?? 0) || (at > header.offset && at < end));
 }
 
 function declareRun(binding: Binding, statement: Statement, name: string): void {
@@ -124,7 +164,7 @@ function inheritedLines(
   if (like === run) report(binding, problem("like-itself", { run }, origin));
   else if (headers.some((other) => textOf(other, "run") === like && other.offset > header.offset)) {
     report(binding, problem("like-later", { run, like }, origin));
-  } else if (!names.includes(like)) {
+  } else if (!names.includes(like) && !binding.salvaged.has(like)) {
     const others = names.filter((name) => name !== run);
     const known = others.length === 0 ? "" : `; there are ${others.slice(0, 6).join(", ")}`;
     const mend = nearest(like, others).map((near) => replacement(origin, near));

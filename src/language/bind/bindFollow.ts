@@ -80,7 +80,7 @@ export function useColumn(
 ): void {
   const origin = originOf(binding.uri, statement, label);
   binding.uses.push({ kind: "column", name: column, run, declares: false, origin });
-  if (dataLine === null || isDeclared(dataLine, column)) return;
+  if (dataLine === null || isDeclared(dataLine, column) || binding.salvaged.has(column)) return;
   const names = [...new Set((data?.columns ?? []).map((candidate) => candidate.name))];
   const known =
     names.length === 0
@@ -120,7 +120,7 @@ function calibratedBy(binding: Binding, lines: readonly Statement[]): Fact<strin
   if (fact === null) return null;
   const { value: name, origin } = fact;
   binding.uses.push({ kind: "calibration", name, run: null, declares: false, origin });
-  if (!binding.calibrations.has(name)) {
+  if (!binding.calibrations.has(name) && !binding.salvaged.has(name)) {
     const names = [...binding.calibrations];
     const known = names.length === 0 ? "" : `; there is ${names.join(", ")}`;
     const mend = nearest(name, names).map((near) => replacement(origin, near));

@@ -94,7 +94,7 @@ function referenceOf(context: TogetherContext, statement: Statement, { text, spa
 
 function checkRun({ binding, runs, tables }: TogetherContext, name: string, origin: RunReference["origin"]): void {
   binding.uses.push({ kind: "run", name, run: null, declares: false, origin });
-  if (runs.has(name) || tables) return;
+  if (runs.has(name) || tables || binding.salvaged.has(name)) return;
   const known = runs.size === 0 ? "" : `; there are ${[...runs].slice(0, 6).join(", ")}`;
   const mend = nearest(name, [...runs]).map((near) => replacement(origin, near));
   report(binding, problem("name-unknown", { what: "run", name, known }, origin, mend));

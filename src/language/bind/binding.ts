@@ -25,8 +25,10 @@ export interface Binding {
   readonly declared: ReadonlyMap<string, Species>;
   /** names of calibrations */
   readonly calibrations: ReadonlySet<string>;
-  /** names on a broken reaction line: they are not unknown */
+  /** names on a broken reaction line or on a line that was lost: they are not unknown */
   readonly salvaged: ReadonlySet<string>;
+  /** species whose line is broken: what they lack may stand there */
+  readonly halfDeclared: ReadonlySet<string>;
 }
 
 export function report(binding: Binding, problem: Problem): void {

@@ -43,8 +43,17 @@ export function checkRun(
       report(binding, problem("run-lacks-volume", args, origin, below("volume 50.00 mL")));
     }
   }
+}
+
+/** Says of each mass that was taken that it gives no amount where no molar mass is known. */
+export function checkMasses(binding: Binding, run: Run): void {
   for (const { species, given, origin: line } of run.taken) {
-    if (species.formula === null && species.molarMass === null && isKind(given.unit, "mass")) {
+    if (
+      species.formula === null &&
+      species.molarMass === null &&
+      !binding.halfDeclared.has(species.key) &&
+      isKind(given.unit, "mass")
+    ) {
       report(binding, problem("taken-needs-formula", { species: species.key }, line));
     }
   }
