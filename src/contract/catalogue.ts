@@ -2,6 +2,7 @@ import { chemistryMessages } from "./messages/chemistry.js";
 import { dataMessages } from "./messages/data.js";
 import { fitMessages } from "./messages/fit.js";
 import { languageMessages } from "./messages/language.js";
+import { namingMessages } from "./messages/naming.js";
 import { quantityMessages } from "./messages/quantity.js";
 
 /** Every problem there is: its severity, its words, and the line that explains it. Nobody else writes messages. */
@@ -11,6 +12,7 @@ export const catalogue = {
   ...chemistryMessages,
   ...dataMessages,
   ...fitMessages,
+  ...namingMessages,
 } as const;
 
 export type ProblemCode = keyof typeof catalogue;

@@ -1,3 +1,4 @@
+import type { FolderEntry } from "./folderReader.js";
 import type { ReadOutcome } from "./reader.js";
 
 /** What client and server say to each other beyond the language server protocol. */
@@ -31,6 +32,13 @@ export interface ReadFile {
   readonly limit: number;
 }
 export type ReadFileAnswer = ReadOutcome;
+
+/** Request of a server without files of its own: the client lists a folder by the editor's file system. */
+export const listFolder = "ratewright/listFolder";
+export interface ListFolder {
+  readonly uri: string;
+}
+export type ListFolderAnswer = readonly FolderEntry[];
 
 /** Notification from the server: where it stands with a description. */
 export const statusChanged = "ratewright/statusChanged";

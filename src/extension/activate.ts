@@ -2,6 +2,8 @@ import { type ExtensionContext, type LogOutputChannel, Uri, window, workspace } 
 import type { BaseLanguageClient, LanguageClientOptions } from "vscode-languageclient";
 import {
   type InitializationOptions,
+  type ListFolderAnswer,
+  listFolder,
   type ReadFileAnswer,
   readFile,
   statusChanged,
@@ -11,6 +13,7 @@ import {
 } from "../contract/editorProtocol.js";
 import { registerRestartServer } from "./commands/restartServer.js";
 import { registerShowLog } from "./commands/showLog.js";
+import { listForServer } from "./listForServer.js";
 import { readForServer } from "./readForServer.js";
 import { createStatusItem } from "./statusItem.js";
 import { themeKind } from "./themeKind.js";
@@ -30,6 +33,7 @@ export async function activateWith(context: ExtensionContext, make: MakeClient):
     registerRestartServer(client, log),
     client.onNotification(statusChanged, status.take),
     client.onRequest<ReadFileAnswer, unknown>(readFile, readForServer),
+    client.onRequest<ListFolderAnswer, unknown>(listFolder, listForServer),
     window.onDidChangeActiveColorTheme(() => {
       const message: ThemeChanged = { theme: themeKind() };
       return client.isRunning() ? client.sendNotification(themeChanged, message) : undefined;

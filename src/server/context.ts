@@ -1,5 +1,6 @@
 import type { Connection, ServerCapabilities, TextDocuments } from "vscode-languageserver";
 import type { TextDocument } from "vscode-languageserver-textdocument";
+import type { FolderReader } from "../contract/folderReader.js";
 import type { FileAccess } from "../workspace/loadFiles.js";
 import type { Document, Workspace } from "../workspace/workspace.js";
 import type { ClientState } from "./clientState.js";
@@ -15,6 +16,8 @@ export interface ServerContext {
   /** the ones in use now: others after `renew` */
   readonly workspace: () => Workspace;
   readonly access: () => FileAccess;
+  /** what lies in folders */
+  readonly folders: FolderReader;
   readonly document: (open: TextDocument) => Document;
   readonly loop: FindingsLoop;
   readonly shown: ShownDiagnostics;

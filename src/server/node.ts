@@ -2,6 +2,7 @@
 import { join } from "node:path";
 import { createConnection, ProposedFeatures } from "vscode-languageserver/node";
 import { fencedReader } from "../host/node/fencedReader.js";
+import { nodeFolders } from "../host/node/nodeFolders.js";
 import { nodeReader } from "../host/node/nodeReader.js";
 import { openThread } from "../host/node/workThread.js";
 import { inlineComputer } from "../workspace/computer.js";
@@ -14,6 +15,7 @@ const script = join(__dirname, "worker.cjs");
 
 startServer(createConnection(ProposedFeatures.all), {
   reader: (_, fence) => fencedReader(nodeReader(), fence),
+  folders: (_, fence) => nodeFolders(fence),
   computer: (log) =>
     bySize(
       inlineComputer(createBreathe()),

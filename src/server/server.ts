@@ -1,5 +1,6 @@
 import { type Connection, type InitializeParams, TextDocumentSyncKind, TextDocuments } from "vscode-languageserver";
 import { TextDocument } from "vscode-languageserver-textdocument";
+import type { FolderReader } from "../contract/folderReader.js";
 import type { Reader } from "../contract/reader.js";
 import { version } from "../contract/version.js";
 import type { FileAccess } from "../workspace/loadFiles.js";
@@ -16,6 +17,8 @@ import { createShownDiagnostics } from "./shownDiagnostics.js";
 export interface ServerHost {
   /** `fence`: folders that files must lie in, links followed; null where any file may be read */
   reader(connection: Connection, fence: () => readonly string[] | null): Reader;
+  /** lists folders; `fence` as of the reader */
+  folders(connection: Connection, fence: () => readonly string[] | null): FolderReader;
   /** where findings are worked out; asked for anew whenever what may be read has changed */
   computer(log: (line: string) => void): EndableComputer;
 }
@@ -25,10 +28,10 @@ export function startServer(connection: Connection, host: ServerHost): void {
   const documents = new TextDocuments(TextDocument);
   const client = createClientState();
   const log = (line: string): void => connection.console.info(line);
+  const fence = (): readonly string[] | null => {
+    return client.trusted ? null : documents.all().map(({ uri }) => fenceOf(uri, client.folders));
+  };
   const open = (): Opened => {
-    const fence = (): readonly string[] | null => {
-      return client.trusted ? null : documents.all().map(({ uri }) => fenceOf(uri, client.folders));
-    };
     return openWorkspace(host.reader(connection, fence), host.computer(log), client);
   };
   let opened: Opened | null = null;
@@ -48,6 +51,7 @@ export function startServer(connection: Connection, host: ServerHost): void {
     client,
     workspace,
     access: () => current().access,
+    folders: host.folders(connection, fence),
     document,
     loop,
     shown: createShownDiagnostics(),

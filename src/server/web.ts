@@ -1,7 +1,15 @@
 // The language server in a web worker: dist/server.web.js. The same script is the worker that works out findings, under
 // a name of its own, so that only one script need be loaded.
 import { BrowserMessageReader, BrowserMessageWriter, createConnection } from "vscode-languageserver/browser";
-import { type ReadFile, type ReadFileAnswer, readFile } from "../contract/editorProtocol.js";
+import {
+  type ListFolder,
+  type ListFolderAnswer,
+  listFolder,
+  type ReadFile,
+  type ReadFileAnswer,
+  readFile,
+} from "../contract/editorProtocol.js";
+import { requestFolders } from "../host/web/requestFolders.js";
 import { requestReader } from "../host/web/requestReader.js";
 import { openWorker } from "../host/web/workWorker.js";
 import { inlineComputer } from "../workspace/computer.js";
@@ -25,6 +33,11 @@ if (scope.name === workerName) {
       requestReader((uri, limit) => {
         const question: ReadFile = { uri, limit };
         return connection.sendRequest<ReadFileAnswer>(readFile, question);
+      }),
+    folders: (connection) =>
+      requestFolders((uri) => {
+        const question: ListFolder = { uri };
+        return connection.sendRequest<ListFolderAnswer>(listFolder, question);
       }),
     computer: (log) =>
       bySize(

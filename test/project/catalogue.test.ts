@@ -6,9 +6,17 @@ import { chemistryMessages } from "../../src/contract/messages/chemistry.js";
 import { dataMessages } from "../../src/contract/messages/data.js";
 import { fitMessages } from "../../src/contract/messages/fit.js";
 import { languageMessages } from "../../src/contract/messages/language.js";
+import { namingMessages } from "../../src/contract/messages/naming.js";
 import { quantityMessages } from "../../src/contract/messages/quantity.js";
 
-const groups = [chemistryMessages, dataMessages, fitMessages, languageMessages, quantityMessages];
+const groups = [
+  chemistryMessages,
+  dataMessages,
+  fitMessages,
+  languageMessages,
+  namingMessages,
+  quantityMessages,
+];
 
 const textsBelow = (folder: string, without = "-"): string =>
   readdirSync(folder, { recursive: true, encoding: "utf8" })

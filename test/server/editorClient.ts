@@ -15,6 +15,7 @@ import {
   type TextEdit,
 } from "vscode-languageserver/node";
 import { type StatusChanged, statusChanged, type ThemeKind } from "../../src/contract/editorProtocol.js";
+import type { FolderEntry, FolderReader } from "../../src/contract/folderReader.js";
 import type { Reader, ReadOutcome } from "../../src/contract/reader.js";
 import type { EndableComputer } from "../../src/server/compute/workerComputer.js";
 import { startServer } from "../../src/server/server.js";
@@ -27,6 +28,7 @@ export interface ClientOptions {
   /** texts of data files by their path below the folder */
   readonly files?: { [path: string]: string };
   readonly reader?: Reader;
+  readonly folders?: FolderReader;
   readonly computer?: EndableComputer;
   readonly trusted?: boolean;
   readonly theme?: ThemeKind;
@@ -63,8 +65,19 @@ export interface EditorClient {
   apply(path: string, action: CodeAction): Promise<void>;
   /** the hover at the first letter of the `nth` occurrence, as Markdown */
   hover(path: string, words: string, nth?: number): Promise<{ text: string; range: Range | undefined } | null>;
+  /** where a stretch of text stands, its `nth` occurrence */
+  place(path: string, words: string, nth?: number): Range;
+  /** asks about a document, at the first letter of a stretch of text where one is given */
+  ask<T>(method: string, path: string, words?: string, more?: AskMore): Promise<T>;
   fileChanged(path: string): Promise<void>;
   end(): Promise<void>;
+}
+
+/** What a question says beside the document; `behind`: at the end of the stretch of text. */
+export interface AskMore {
+  readonly nth?: number;
+  readonly behind?: true;
+  readonly [name: string]: unknown;
 }
 
 const uriOf = (path: string): string => `${folder}/${path}`;
@@ -76,6 +89,7 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
   const [up, down] = [new PassThrough(), new PassThrough()];
   startServer(createConnection(new StreamMessageReader(up), new StreamMessageWriter(down)), {
     reader: () => reader,
+    folders: () => options.folders ?? foldersOf(files),
     computer: () => computer,
   });
   const connection = createProtocolConnection(new StreamMessageReader(down), new StreamMessageWriter(up));
@@ -196,6 +210,13 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
       const hover: Hover | null = await connection.sendRequest("textDocument/hover", { textDocument, position: start });
       return hover === null ? null : { text: (hover.contents as MarkupContent).value, range: hover.range };
     },
+    place: rangeOf,
+    async ask(method, path, words, { nth, behind, ...more } = {}) {
+      const textDocument = { uri: uriOf(path) };
+      const range = words === undefined ? null : rangeOf(path, words, nth);
+      const position = range === null ? {} : { position: behind === true ? range.end : range.start };
+      return connection.sendRequest(method, { textDocument, ...position, ...more });
+    },
     fileChanged: (path) => {
       return connection.sendNotification("workspace/didChangeWatchedFiles", {
         changes: [{ uri: uriOf(path), type: 2 }],
@@ -204,6 +225,23 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
     async end() {
       await connection.sendRequest("shutdown");
       connection.dispose();
+    },
+  };
+}
+
+/** What lies in a folder, by the files there are below it. */
+function foldersOf(files: ReadonlyMap<string, string>): FolderReader {
+  return {
+    async list(uri) {
+      const below = [...files.keys()]
+        .filter((file) => file.startsWith(`${uri}/`))
+        .map((file) => file.slice(uri.length + 1));
+      const entries = new Map<string, FolderEntry>();
+      for (const path of below) {
+        const [name = "", ...rest] = decodeURIComponent(path).split("/");
+        entries.set(name, { name, kind: rest.length > 0 ? "folder" : "file" });
+      }
+      return [...entries.values()];
     },
   };
 }

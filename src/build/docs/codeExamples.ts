@@ -4,6 +4,7 @@ import { dataExamples } from "./examples/data.js";
 import { fitExamples } from "./examples/fit.js";
 import { gasExamples } from "./examples/gas.js";
 import { languageExamples } from "./examples/language.js";
+import { namingExamples } from "./examples/naming.js";
 import { quantityExamples } from "./examples/quantity.js";
 
 /** For each code of the catalogue a text that earns it. All figures are invented. */
@@ -14,4 +15,5 @@ export const codeExamples: CodeExamples = {
   ...dataExamples,
   ...fitExamples,
   ...gasExamples,
+  ...namingExamples,
 };

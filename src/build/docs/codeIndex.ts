@@ -3,6 +3,7 @@ import { chemistryMessages } from "../../contract/messages/chemistry.js";
 import { dataMessages } from "../../contract/messages/data.js";
 import { fitMessages } from "../../contract/messages/fit.js";
 import { languageMessages } from "../../contract/messages/language.js";
+import { namingMessages } from "../../contract/messages/naming.js";
 import { quantityMessages } from "../../contract/messages/quantity.js";
 import { codeTitle } from "./codePage.js";
 import { generated, page } from "./prose.js";
@@ -13,6 +14,7 @@ const groups: readonly (readonly [title: string, messages: object])[] = [
   ["Formulas and equations", chemistryMessages],
   ["Data files", dataMessages],
   ["Signals, rates and fits", fitMessages],
+  ["Names", namingMessages],
 ];
 
 /** Every code of the catalogue by name, in the order of the groups. */

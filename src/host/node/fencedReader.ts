@@ -19,8 +19,8 @@ export function fencedReader(reader: Reader, fence: () => readonly string[] | nu
   };
 }
 
-/** What is not there leads nowhere: the reader says so itself. */
-async function leadsOut(uri: string, folders: readonly string[]): Promise<boolean> {
+/** Whether a file or folder lies outside all of `folders`, links followed. What is not there leads nowhere. */
+export async function leadsOut(uri: string, folders: readonly string[]): Promise<boolean> {
   const target = await realOf(uri);
   if (target === null) return false;
   const real = await Promise.all(folders.map(realOf));

@@ -1,12 +1,20 @@
 import type { Feature } from "../context.js";
 import { clientChanges } from "./clientChanges.js";
 import { codeActions } from "./codeActions.js";
+import { definition } from "./definition.js";
 import { diagnostics } from "./diagnostics.js";
+import { documentLinks } from "./documentLinks.js";
+import { documentSymbols } from "./documentSymbols.js";
+import { foldingRanges } from "./foldingRanges.js";
 import { formatting } from "./formatting.js";
 import { hover } from "./hover.js";
 import { preview } from "./preview.js";
+import { references } from "./references.js";
+import { renaming } from "./renaming.js";
+import { semanticTokens } from "./semanticTokens.js";
 import { status } from "./status.js";
 import { watchedFiles } from "./watchedFiles.js";
+import { workspaceSymbols } from "./workspaceSymbols.js";
 
 /** Everything the editor offers. A new feature is one file beside this one and one line here. */
 export const features: readonly Feature[] = [
@@ -15,6 +23,14 @@ export const features: readonly Feature[] = [
   codeActions,
   formatting,
   hover,
+  documentLinks,
+  documentSymbols,
+  foldingRanges,
+  references,
+  renaming,
+  semanticTokens,
+  workspaceSymbols,
+  definition,
   watchedFiles,
   status,
   preview,
