@@ -4,6 +4,7 @@ import { fitMessages } from "./messages/fit.js";
 import { languageMessages } from "./messages/language.js";
 import { namingMessages } from "./messages/naming.js";
 import { quantityMessages } from "./messages/quantity.js";
+import { recordMessages } from "./messages/record.js";
 
 /** Every problem there is: its severity, its words, and the line that explains it. Nobody else writes messages. */
 export const catalogue = {
@@ -12,6 +13,7 @@ export const catalogue = {
   ...chemistryMessages,
   ...dataMessages,
   ...fitMessages,
+  ...recordMessages,
   ...namingMessages,
 } as const;
 

@@ -8,6 +8,7 @@ import { fitMessages } from "../../src/contract/messages/fit.js";
 import { languageMessages } from "../../src/contract/messages/language.js";
 import { namingMessages } from "../../src/contract/messages/naming.js";
 import { quantityMessages } from "../../src/contract/messages/quantity.js";
+import { recordMessages } from "../../src/contract/messages/record.js";
 
 const groups = [
   chemistryMessages,
@@ -16,6 +17,7 @@ const groups = [
   languageMessages,
   namingMessages,
   quantityMessages,
+  recordMessages,
 ];
 
 const textsBelow = (folder: string, without = "-"): string =>

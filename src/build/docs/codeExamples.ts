@@ -6,6 +6,7 @@ import { gasExamples } from "./examples/gas.js";
 import { languageExamples } from "./examples/language.js";
 import { namingExamples } from "./examples/naming.js";
 import { quantityExamples } from "./examples/quantity.js";
+import { recordExamples } from "./examples/record.js";
 
 /** For each code of the catalogue a text that earns it. All figures are invented. */
 export const codeExamples: CodeExamples = {
@@ -14,6 +15,7 @@ export const codeExamples: CodeExamples = {
   ...chemistryExamples,
   ...dataExamples,
   ...fitExamples,
+  ...recordExamples,
   ...gasExamples,
   ...namingExamples,
 };

@@ -5,6 +5,7 @@ import { fitMessages } from "../../contract/messages/fit.js";
 import { languageMessages } from "../../contract/messages/language.js";
 import { namingMessages } from "../../contract/messages/naming.js";
 import { quantityMessages } from "../../contract/messages/quantity.js";
+import { recordMessages } from "../../contract/messages/record.js";
 import { codeTitle } from "./codePage.js";
 import { generated, page } from "./prose.js";
 
@@ -15,6 +16,7 @@ const groups: readonly (readonly [title: string, messages: object])[] = [
   ["Data files", dataMessages],
   ["Signals, rates and fits", fitMessages],
   ["Names", namingMessages],
+  ["Records", recordMessages],
 ];
 
 /** Every code of the catalogue by name, in the order of the groups. */

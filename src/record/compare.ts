@@ -1,0 +1,131 @@
+import { type Fact, factsOf } from "./facts.js";
+import type { RunRecord } from "./recordShape.js";
+
+/**
+ * Why something is otherwise than a record has it: the data files, what the description means, the way numbers are
+ * computed; or a result that moved, beyond the digits the record states.
+ */
+export type Cause = "data" | "description" | "method" | "result";
+
+/** One thing that moved, in words. */
+export interface Moved {
+  readonly cause: Cause;
+  /** what it is about: a data file, “the description”, “run A, fit 1: k” */
+  readonly what: string;
+  /** a whole sentence */
+  readonly text: string;
+}
+
+/**
+ * What moved from one record to another of the same description, causes first: data files, the description with every
+ * stated fact that differs, the method; then results. Nothing where they say the same; a number within its last digit
+ * has not moved, and neither has anything because of another program version alone.
+ */
+export function compare(before: RunRecord, now: RunRecord): Moved[] {
+  const facts = movedFacts(factsOf(before), factsOf(now));
+  const causes = [...movedData(before, now), ...movedMeaning(before, now), ...movedMethod(before, now)];
+  const stated = facts.filter(({ stated }) => stated).map(moved("description"));
+  const results = facts.filter(({ stated }) => !stated).map(moved("result"));
+  if (causes.length > 0 || facts.length === 0) return [...order(causes, stated), ...results];
+  return [...order([unexplained], stated), ...results];
+}
+
+/** What stands in the record cannot follow from the same data, description and method. */
+const unexplained: Moved = {
+  cause: "result",
+  what: "the record",
+  text: "Neither data, description nor method changed: the record was changed by hand, or this machine computes otherwise.",
+};
+
+/** The stated facts stand behind the sentence that the description changed. */
+function order(causes: readonly Moved[], stated: readonly Moved[]): Moved[] {
+  const behind = causes.findLastIndex(({ cause }) => cause === "data" || cause === "description") + 1;
+  return [...causes.slice(0, behind), ...stated, ...causes.slice(behind)];
+}
+
+function movedData(before: RunRecord, now: RunRecord): Moved[] {
+  const earlier = new Map(before.data.map((file) => [file.path, file]));
+  const later = new Map(now.data.map((file) => [file.path, file]));
+  const say = (path: string, words: string): Moved => ({ cause: "data", what: path, text: `${path} ${words}.` });
+  const changed = before.data.flatMap((file) => {
+    const found = later.get(file.path);
+    if (found === undefined)
+      return [say(file.path, "is no longer read: it is not there, or the description names another file")];
+    if (found.sha256 === file.sha256) return [];
+    const rows =
+      found.rows === file.rows ? `${file.rows} rows as before` : `${file.rows} rows before, ${found.rows} now`;
+    const hashes = `SHA-256 ${file.sha256.slice(0, 8)}… before, ${found.sha256.slice(0, 8)}… now`;
+    return [say(file.path, `changed: ${rows}, ${hashes}`)];
+  });
+  const added = now.data
+    .filter(({ path }) => !earlier.has(path))
+    .map(({ path }) => say(path, "is read now and was not"));
+  return [...changed, ...added];
+}
+
+function movedMeaning(before: RunRecord, now: RunRecord): Moved[] {
+  if (before.meaning === now.meaning) return [];
+  const versions =
+    before.ratewright === now.ratewright
+      ? ""
+      : ` Or it is the same and version ${now.ratewright} takes it otherwise than version ${before.ratewright} did.`;
+  return [{ cause: "description", what: "the description", text: `What the description means changed.${versions}` }];
+}
+
+function movedMethod(before: RunRecord, now: RunRecord): Moved[] {
+  const found: Moved[] = [];
+  const say = (what: string, from: string | number, to: string | number): void => {
+    found.push({ cause: "method", what, text: `The ${what} changed: version ${from} before, ${to} now.` });
+  };
+  if (before.method !== now.method) say("way numbers are computed", before.method, now.method);
+  if (before.language !== now.language) say("language", before.language, now.language);
+  return found;
+}
+
+interface MovedFact {
+  readonly what: string;
+  readonly stated: boolean;
+  readonly text: string;
+}
+
+const moved =
+  (cause: Cause) =>
+  ({ what, text }: MovedFact): Moved => ({ cause, what, text });
+
+function movedFacts(before: readonly Fact[], now: readonly Fact[]): MovedFact[] {
+  const earlier = new Map(before.map((fact) => [fact.what, fact]));
+  const later = new Map(now.map((fact) => [fact.what, fact]));
+  const changed = before.flatMap((fact): MovedFact[] => {
+    const { what, stated } = fact;
+    const found = later.get(what);
+    if (found === undefined) return [{ what, stated, text: `${what} is no longer there; it was ${fact.text}.` }];
+    const words = differences(fact, found);
+    return words === null ? [] : [{ what, stated, text: `${what} moved ${words}.` }];
+  });
+  const added = now
+    .filter(({ what }) => !earlier.has(what))
+    .map(({ what, stated, text }) => ({ what, stated, text: `${what} is new: ${text}.` }));
+  return [...changed, ...added];
+}
+
+/** “from … to …”; null where the two say the same. */
+function differences(before: Fact, now: Fact): string | null {
+  const parts: string[] = [];
+  for (const key of new Set([...before.numbers.keys(), ...now.numbers.keys()])) {
+    const [from, to] = [before.numbers.get(key), now.numbers.get(key)];
+    if (from !== undefined && to !== undefined) {
+      if (Math.abs(from.value - to.value) <= Math.max(from.within, to.within)) continue;
+    }
+    parts.push(`${key} from ${from?.value ?? "none"} to ${to?.value ?? "none"}`);
+  }
+  for (const key of new Set([...before.words.keys(), ...now.words.keys()])) {
+    const [from, to] = [before.words.get(key), now.words.get(key)];
+    // What is a number on the other side stands above.
+    if (from === to || before.numbers.has(key) || now.numbers.has(key)) continue;
+    parts.push(`${key} from ${from ?? "none"} to ${to ?? "none"}`);
+  }
+  if (parts.length === 0) return null;
+  if (before.text !== now.text && before.words.has("unit")) return `from ${before.text} to ${now.text}`;
+  if (before.words.size === 1 && before.numbers.size === 0) return `from ${before.text} to ${now.text}`;
+  return `in its digits: ${parts.join(", ")}`;
+}
