@@ -9,6 +9,7 @@ import { pathToFileURL } from "node:url";
 import { build as bundle } from "esbuild";
 import { writeGrammar } from "./grammarFile.mjs";
 import { root } from "./install.mjs";
+import { plotSpecsJson } from "./specs.mjs";
 
 const shared = {
   absWorkingDir: root,
@@ -42,10 +43,20 @@ const bundles = [
   { ...web, ...client, entryPoints: ["src/extension/web.ts"], outfile: "dist/extension.web.js" },
 ];
 
+/** What runs in the page of the preview; its plots are compiled beforehand and stand in it as plain data. */
+async function previewBundle() {
+  return {
+    ...web,
+    entryPoints: ["src/preview/main.ts"],
+    outfile: "dist/preview.js",
+    define: { plotSpecs: await plotSpecsJson() },
+  };
+}
+
 /** Builds all bundles into dist/ and gives their sizes in bytes, by name. */
 export async function build() {
   await rm(join(root, "dist"), { recursive: true, force: true });
-  const made = await Promise.all(bundles.map((options) => bundle(options)));
+  const made = await Promise.all([...bundles, await previewBundle()].map((options) => bundle(options)));
   placeCommand();
   return Object.fromEntries(
     made.flatMap(({ metafile }) => Object.entries(metafile.outputs).map(([name, { bytes }]) => [name, bytes])),

@@ -157,8 +157,8 @@ export type ToPage =
 export interface PageState {
   readonly uri: string;
   readonly run: string | null;
-  /** parts that are folded, by their names */
-  readonly folded: readonly string[];
+  /** parts that were opened or folded by hand, by their names; true where open */
+  readonly folds: Readonly<Record<string, boolean>>;
   /** px */
   readonly scroll: number;
 }

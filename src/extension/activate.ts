@@ -14,6 +14,7 @@ import {
 import { registerRestartServer } from "./commands/restartServer.js";
 import { registerShowLog } from "./commands/showLog.js";
 import { listForServer } from "./listForServer.js";
+import { registerPreview } from "./preview/registerPreview.js";
 import { readForServer } from "./readForServer.js";
 import { createStatusItem } from "./statusItem.js";
 import { themeKind } from "./themeKind.js";
@@ -26,12 +27,17 @@ export async function activateWith(context: ExtensionContext, make: MakeClient):
   const log = window.createOutputChannel("Ratewright", { log: true });
   const client = make(clientOptions(context, log));
   const status = createStatusItem(client);
+  const preview = registerPreview({ client, extension: context.extensionUri, log: (line) => log.info(line) });
   context.subscriptions.push(
     log,
     status,
+    preview,
     registerShowLog(log),
     registerRestartServer(client, log),
-    client.onNotification(statusChanged, status.take),
+    client.onNotification(statusChanged, (told) => {
+      status.take(told);
+      preview.status(told);
+    }),
     client.onRequest<ReadFileAnswer, unknown>(readFile, readForServer),
     client.onRequest<ListFolderAnswer, unknown>(listFolder, listForServer),
     window.onDidChangeActiveColorTheme(() => {

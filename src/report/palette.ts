@@ -80,8 +80,8 @@ export const pagePalette: Palette = {
   card: false,
 };
 
-/** The values of `pagePalette`'s names in a light or dark page, as CSS declarations. */
-export function pageColours(theme: "light" | "dark"): string {
+/** The values of `pagePalette`’s names in a page of a theme, as CSS declarations. */
+export function pageColours(theme: Theme): string {
   const { ink, faint, curves, mark } = palettes[theme];
   const named = curves.map((colour, index) => `--curve-${index + 1}: ${colour};`).join(" ");
   return `--ink: ${ink}; --faint: ${faint}; ${named} --mark: ${mark};`;
