@@ -25,6 +25,12 @@ export interface ClientAbilities {
   folderEvents: boolean;
   /** it watches files as told, by patterns below a folder */
   watching: boolean;
+  /** it asks for hovers in documents that are told later */
+  hoverRegistration: boolean;
+  /** it takes completions with places to fill in */
+  snippets: boolean;
+  /** it takes up hints that are told to be stale */
+  hintRefresh: boolean;
   /** it takes edits that name the version of the document they are for */
   versionedEdits: boolean;
 }
@@ -42,6 +48,9 @@ export function createClientState(): ClientState {
       configurationEvents: false,
       folderEvents: false,
       watching: false,
+      hoverRegistration: false,
+      snippets: false,
+      hintRefresh: false,
       versionedEdits: false,
     },
   };

@@ -98,13 +98,16 @@ function openWorkspace(reader: Reader, computer: EndableComputer, client: Client
 function readClient(client: ClientState, params: InitializeParams): void {
   readInitializationOptions(client, params.initializationOptions);
   client.folders = (params.workspaceFolders ?? []).map(({ uri }) => uri);
-  const { workspace } = params.capabilities;
+  const { workspace, textDocument } = params.capabilities;
   const { abilities } = client;
   abilities.configuration = workspace?.configuration === true;
   abilities.configurationEvents = workspace?.didChangeConfiguration?.dynamicRegistration === true;
   abilities.folderEvents = workspace?.workspaceFolders === true;
   const watching = workspace?.didChangeWatchedFiles;
   abilities.watching = watching?.dynamicRegistration === true && watching.relativePatternSupport === true;
+  abilities.hoverRegistration = textDocument?.hover?.dynamicRegistration === true;
+  abilities.snippets = textDocument?.completion?.completionItem?.snippetSupport === true;
+  abilities.hintRefresh = workspace?.inlayHint?.refreshSupport === true;
   abilities.versionedEdits = workspace?.workspaceEdit?.documentChanges === true;
 }
 

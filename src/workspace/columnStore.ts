@@ -38,7 +38,8 @@ function remember<T>(store: Map<string, T>, key: string, value: T, most: number)
   if (store.size > most && oldest.done !== true) store.delete(oldest.value);
 }
 
-function optionsOf(file: DataFile): DataOptions {
+/** How a data file is to be read where its lines say so. */
+export function optionsOf(file: Pick<DataFile, "delimiter" | "decimalComma" | "skip" | "encoding">): DataOptions {
   return {
     ...(file.delimiter === null ? {} : { delimiter: file.delimiter }),
     ...(file.decimalComma === null ? {} : { decimalComma: file.decimalComma }),

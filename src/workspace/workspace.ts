@@ -1,4 +1,6 @@
 import type { Description } from "../contract/findings.js";
+import type { DataOptions } from "../data/dataOptions.js";
+import { type HeaderCell, headerCells } from "../data/headerCells.js";
 import { type Bound, bind } from "../language/bind/bind.js";
 import { parse } from "../language/parse.js";
 import type { Computer, Job } from "./computer.js";
@@ -19,6 +21,8 @@ export interface Workspace {
   bound(document: Document): Bound;
   /** Findings; null when told to stop. */
   describe(document: Document, options: { curves: boolean; signal: AbortSignal }): Promise<Description | null>;
+  /** The header row of a data file by its URI, whatever its size; null where it has none or cannot be read. */
+  headers(uri: string, options: DataOptions): Promise<readonly HeaderCell[] | null>;
   /** A file changed, came or went: what was read of it is forgotten. Gives the descriptions that use it. */
   changed(uri: string): string[];
   /** A description is closed. */
@@ -80,6 +84,12 @@ export function createWorkspace(access: FileAccess, computer: Computer): Workspa
       const description = await computer.compute(job, signal);
       if (description !== null) entry.results.set(key, description);
       return description;
+    },
+    async headers(uri, options) {
+      // A file that no description uses yet is read for this once.
+      const reading = files.get(uri);
+      const outcome = reading === undefined ? await access.reader.read(uri, access.sizeLimit) : (await reading).outcome;
+      return outcome.kind === "bytes" ? headerCells(outcome.bytes, options) : null;
     },
     changed(uri) {
       files.delete(uri);

@@ -38,6 +38,7 @@ export interface ClientOptions {
   readonly delay?: number;
   readonly maximumSize?: number;
   readonly versionedEdits?: boolean;
+  readonly snippets?: boolean;
 }
 
 /** An editor without a window, on an end of a wire that has our server at the other. */
@@ -116,10 +117,15 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
     rootUri: null,
     workspaceFolders: [{ uri: folder, name: "lab" }],
     capabilities: {
+      textDocument: {
+        hover: { dynamicRegistration: true },
+        completion: { completionItem: { snippetSupport: options.snippets ?? true } },
+      },
       workspace: {
         configuration: true,
         didChangeConfiguration: { dynamicRegistration: true },
         workspaceFolders: true,
+        inlayHint: { refreshSupport: true },
         didChangeWatchedFiles: { dynamicRegistration: true, relativePatternSupport: true },
         workspaceEdit: { documentChanges: options.versionedEdits ?? true },
       },

@@ -60,8 +60,8 @@ describe("resting on a column", () => {
     await client.open("a.raterun", balanced);
     const time = await client.hover("a.raterun", '"time / s"');
     assert.match(time?.text ?? "", /\*\*t\*\*/);
-    assert.equal(await client.hover("a.raterun", "temperature"), null);
-    assert.equal(await client.hover("a.raterun", "reaction"), null);
+    assert.equal(await client.hover("a.raterun", '"data/a.csv"'), null);
+    assert.doesNotMatch((await client.hover("a.raterun", "temperature"))?.text ?? "", /data:image/);
   });
 
   it("finds the column behind µ · ₂ on the same line", async () => {

@@ -1,6 +1,7 @@
 import type { Feature } from "../context.js";
 import { clientChanges } from "./clientChanges.js";
 import { codeActions } from "./codeActions.js";
+import { dataFileHover } from "./dataFileHover.js";
 import { definition } from "./definition.js";
 import { diagnostics } from "./diagnostics.js";
 import { documentLinks } from "./documentLinks.js";
@@ -31,6 +32,7 @@ export const features: readonly Feature[] = [
   semanticTokens,
   workspaceSymbols,
   definition,
+  dataFileHover,
   watchedFiles,
   status,
   preview,
