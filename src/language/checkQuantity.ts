@@ -21,7 +21,7 @@ function shareBy(basis: Basis, shown: string, span: Span): Mend {
 
 /** Null where a quantity is what its line wants, else the fault: dimension first, then sign. */
 export function checkQuantity(written: WrittenQuantity, text: string, kind: QuantityKind): Fault | null {
-  const { name, dimensions, atLeast }: KindOfQuantity = quantityKinds[kind];
+  const { name, dimensions, atLeast, units, ofWhole }: KindOfQuantity = quantityKinds[kind];
   const { quantity } = written;
   if (dimensions !== null) {
     const span = written.unit ?? written.number;
@@ -37,7 +37,7 @@ export function checkQuantity(written: WrittenQuantity, text: string, kind: Quan
       return fault("share-of-what", { share }, span, mends);
     }
     const wrong = checkDimension(written.unit === null ? null : quantity.unit, { name, dimensions }, span, shown);
-    if (wrong !== null) return wrong;
+    if (wrong !== null) return units === undefined ? wrong : inOwnUnits(wrong, units, written);
   }
   const span = { start: 0, end: text.length };
   if (atLeast === "zero" && quantity.value < 0) {
@@ -47,5 +47,23 @@ export function checkQuantity(written: WrittenQuantity, text: string, kind: Quan
   if (atLeast === "above zero" && quantity.value <= 0) {
     return fault("number-below-zero", { what: name, limit: "more than zero" }, span);
   }
+  if (ofWhole === true && quantity.value > 1) {
+    const bare = written.unit === null && quantity.value <= 100;
+    const mends = bare ? [{ text: `${text} %`, edits: [{ start: text.length, end: text.length, text: " %" }] }] : [];
+    return fault("share-beyond-whole", { share: text }, span, mends);
+  }
   return null;
+}
+
+/** A fault of the dimension in the words of the trade. */
+function inOwnUnits(
+  wrong: Fault,
+  units: NonNullable<KindOfQuantity["units"]>,
+  { number, unit }: WrittenQuantity,
+): Fault {
+  const { kind, samples, usual } = units;
+  const { end } = number;
+  const mend = unit === null ? [{ text: usual, edits: [{ start: end, end, text: ` ${usual}` }] }] : [];
+  const args = { ...wrong.args, kind, samples };
+  return { ...wrong, args, mend };
 }

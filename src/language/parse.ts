@@ -126,7 +126,8 @@ function guess(state: State, line: LineStatement, text: string, offset: number):
     return { ...behind, fault: stray };
   }
   const mend = near === null ? [] : [replacement(line.head, near)];
-  const unknown = fault("word-unknown", { word: line.head.text, allowed: describeHeads(allowed) }, line.head, mend);
+  const nearFirst = near === null ? allowed : [near, ...allowed.filter((word) => word !== near)];
+  const unknown = fault("word-unknown", { word: line.head.text, allowed: describeHeads(nearFirst) }, line.head, mend);
   state.problems.push(placed(unknown, state.uri, offset));
   const row = near === null ? undefined : statementByHead.get(near);
   const meant = row === undefined ? undefined : parseLineAs(text, row).statements[0];

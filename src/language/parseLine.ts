@@ -53,7 +53,8 @@ function readLine(text: string, meant: StatementRow | null = null, trying = fals
 
 /** A fault that knows no mend, with those that turn out to make its line sound. */
 function withTriedMends({ text, tokens, wanted }: Cursor, fault: Fault, meant: StatementRow | null): Fault {
-  if (fault.mend !== undefined && fault.code !== "line-left-over") return fault;
+  const quotes = fault.code === "line-unexpected" && wanted.every(({ part }) => part === "string");
+  if (fault.mend !== undefined && fault.code !== "line-left-over" && !quotes) return fault;
   const isSound = (changed: string): boolean => readLine(changed, meant, true).fault === null;
   const mend = triedMends({ text, tokens, fault, wanted }, isSound);
   return mend.length === 0 ? fault : { ...fault, mend };

@@ -9,6 +9,10 @@ export interface KindOfQuantity {
   readonly dimensions: readonly Dimension[] | null;
   /** refused where the value, in SI, is below it */
   readonly atLeast?: "zero" | "above zero";
+  /** where its units go by another name than others of their dimension: that name, samples, the usual one */
+  readonly units?: { readonly kind: string; readonly samples: string; readonly usual: string };
+  /** the value, in SI, is at most 1: what is a share of a whole */
+  readonly ofWhole?: true;
   /** with its article and an example, as messages ask for it */
   readonly words: string;
 }
@@ -43,8 +47,11 @@ export const quantityKinds = {
   stock: notNegative(
     of("The stock", "the strength of the stock, such as 0.500 mol/L or 30 % by mass,", "concentration", "number"),
   ),
-  purity: positive(of("Purity", "a purity, such as 98 %,", "number")),
-  density: positive(of("Density", "a density with its unit, such as 1.11 g/mL,", "massConcentration")),
+  purity: { ...positive(of("Purity", "a purity, such as 98 %,", "number")), ofWhole: true },
+  density: {
+    ...positive(of("Density", "a density with its unit, such as 1.11 g/mL,", "massConcentration")),
+    units: { kind: "a unit of density", samples: "g/mL, kg/L …", usual: "g/mL" },
+  },
   molarEnergy: of("The energy", "a molar energy with its unit, such as 52 kJ/mol,", "molarEnergy"),
   molarMass: positive(of("Molar mass", "a molar mass with its unit, such as 204.2 g/mol,", "molarMass")),
   absorptivity: notNegative(

@@ -196,7 +196,7 @@ function readLeaf(cursor: Cursor, part: Part): void {
       return;
     case "charge":
       cursor.at++;
-      if (!/^\d*[+\-−]$/.test(token.text)) wantedButFound(cursor, [part], null, token);
+      if (!/^\d*[+\-−]$/.test(token.text)) cursor.fault = chargeFault(cursor, part, token);
       keep(cursor, part.label, { kind: "text", text: token.text, span: token });
       return;
     case "run reference":
@@ -217,6 +217,14 @@ function readFromHeader(cursor: Cursor, label: string): void {
   cursor.at += 2;
   if (header.open) cursor.fault = fault("string-open", {}, header, [closeQuote(header)]);
   keep(cursor, label, { kind: "header", header: header.text, ...slice(cursor, first, cursor.at) });
+}
+
+/** A charge written `+2` is one with its sign in front. */
+function chargeFault(cursor: Cursor, part: Part, token: Token): Fault | null {
+  wantedButFound(cursor, [part], null, token);
+  const turned = /^([+\-−])(\d+)$/.exec(token.text);
+  if (turned === null || cursor.fault === null) return cursor.fault;
+  return { ...cursor.fault, mend: [replacement(token, `${turned[2]}${turned[1]}`)] };
 }
 
 /** `order 1 in A`, then more of them behind a comma, `, then` or `beside`. */
@@ -245,7 +253,7 @@ const orderParts: readonly Part[] = [
     part: "either",
     options: [
       [{ part: "words", label: "order", phrase: "free" }],
-      [{ part: "number", label: "order", what: "the order, a number" }],
+      [{ part: "number", label: "order", what: "the order as a number" }],
     ],
   },
   { part: "keyword", word: "in" },
@@ -335,11 +343,19 @@ function endOfWords(cursor: Cursor, from: number): number {
     const partOfIt = token.kind === "word" || (token.kind === "operator" && token.text === "±");
     if (!partOfIt) break;
     if (at > from && beginsBasis(cursor, at - 1)) continue;
+    if (depth === 0 && at > from && beginsNext(cursor, at)) break;
     const ends = stopWords.has(token.text) || beginsHead(cursor, at);
     if (at > from && depth === 0 && ends && !beginsBasis(cursor, at)) break;
     for (const letter of token.text) depth += letter === "(" ? 1 : letter === ")" ? -1 : 0;
   }
   return at;
+}
+
+/** Whether a number begins something else: it stands behind a unit that is no part of a time such as `1 min 30 s`. */
+function beginsNext(cursor: Cursor, at: number): boolean {
+  const before = cursor.tokens[at - 1]?.text ?? "";
+  if (!/^\d+(\.\d+)?$/.test(cursor.tokens[at]?.text ?? "") || !/\p{L}$/u.test(before)) return false;
+  return !/^([\d.]*(d|h|hr|min|s|sec)|within|x|X)$/.test(before);
 }
 
 /** Whether a line's first word stands here; of a line of two fixed words (`molar mass`) both, or the first at the end. */

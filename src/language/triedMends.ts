@@ -20,35 +20,54 @@ const signs = /^[=:;,.]+$/;
  * put first. Nothing is offered where too many would do.
  */
 export function triedMends(line: BrokenLine, isSound: (text: string) => boolean): Mend[] {
-  const found = candidates(line).filter((mend) => isSound(changed(line.text, mend)));
-  return found.length > 3 ? [] : found;
+  for (const some of candidates(line)) {
+    const found = some.filter((mend) => isSound(changed(line.text, mend)));
+    if (found.length > 0) return found.length > 3 ? [] : found;
+  }
+  return [];
 }
 
-function candidates({ text, tokens, fault, wanted }: BrokenLine): Mend[] {
+/** Likelier kinds of change first: the first kind of which one does speaks. */
+function candidates({ text, tokens, fault, wanted }: BrokenLine): Mend[][] {
   const { span, code } = fault;
-  if (code === "unit-unreadable") return strayInUnit(text, span);
+  if (code === "unit-unreadable") return [strayInUnit(text, span)];
   const at = tokens.findIndex(({ start }) => start === span.start);
   const token = tokens[at];
   if (token === undefined) return [];
   const here = { start: token.start, end: token.end };
-  const bare = { start: tokens[at - 1]?.end ?? token.start, end: token.end };
-  const stray = signs.test(token.text) ? [{ text: "", edits: [{ ...bare, text: "" }] }] : [];
-  if (code === "line-left-over") return [...quoted(text, tokens, at, wanted), ...stray];
+  const before = { start: tokens[at - 1]?.end ?? token.start, end: token.end };
+  const stray = signs.test(token.text) ? [{ text: "", edits: [{ ...before, text: "" }] }] : [];
+  if (code === "line-left-over") return [comma(before, token), quoted(text, tokens, at, wanted), stray];
   if (code !== "line-unexpected") return [];
   const words = firstWords(wanted);
-  const before = words.map((word): Mend => ({ text: word, edits: [{ ...here, end: here.start, text: `${word} ` }] }));
+  const onlyWords = wanted.every((part) => firstWords([part]).length > 0);
+  const inFront = words.map((word): Mend => ({ text: word, edits: [{ ...here, end: here.start, text: `${word} ` }] }));
   const instead = wanted.length === 1 ? words.map((word) => replacement(here, word)) : [];
-  return [...before, ...instead, ...stray, ...moved(text, tokens, at)];
+  return [
+    ...quoted(text, tokens, at, wanted).map((mend) => [mend]),
+    onlyWords ? inFront : [],
+    instead,
+    stray,
+    moved(text, tokens, at),
+  ];
 }
 
-/** Words left over where a text in quotes could stand. */
+/** A text without its quotes: as few of the words as do. */
 function quoted(text: string, tokens: readonly Token[], at: number, wanted: readonly Part[]): Mend[] {
-  const rest = tokens.slice(at);
-  const [first, last] = [rest[0], rest.at(-1)];
+  const rest = tokens.slice(at, at + mostWords);
+  const [first] = rest;
   const could = wanted.some(({ part }) => part === "string") && rest.every(({ kind }) => kind !== "string");
-  if (!could || first === undefined || last === undefined) return [];
-  const span = { start: first.start, end: last.end };
-  return [replacement(span, `"${text.slice(span.start, span.end)}"`)];
+  if (!could || first === undefined) return [];
+  return rest.map(({ end }) => replacement({ start: first.start, end }, `"${text.slice(first.start, end)}"`));
+}
+
+/** Words of a text without quotes that are tried. */
+const mostWords = 30;
+
+/** `A, B` for `A B` and for `A and B`. */
+function comma(before: Span, token: Token): Mend[] {
+  if (/^(and|&|;|\+)$/.test(token.text)) return [{ text: ",", edits: [{ ...before, text: "," }] }];
+  return [{ text: `, ${token.text}`, edits: [{ start: before.start, end: before.start, text: "," }] }];
 }
 
 /** `mL 50` for `50 mL`, `0.1 mol/L H2O2` for `H2O2 0.1 mol/L`. */

@@ -18,9 +18,11 @@ export function checkDimension(unit: Unit | null, expected: Expected, span: Span
   const given = unit?.dimension ?? dimensionless;
   if (dimensions.some((dimension) => sameDimension(dimension, given))) return null;
   const wanted = dimensions.map(kindOf).filter((found): found is Kind => found !== null);
-  const kind = `a unit of ${listed(wanted.map((entry) => entry.name))}`;
+  const named = wanted.filter((entry) => entry !== kinds.number);
+  const share = named.length < wanted.length ? " or a share" : "";
+  const kind = `a unit of ${listed(named.map((entry) => entry.name))}${share}`;
   const samples =
-    wanted.length === 1 ? (wanted[0]?.samples ?? "") : wanted.map(({ unit: one }) => pretty(one)).join(", ");
+    wanted.length === 1 ? (wanted[0]?.samples ?? "") : wanted.map(({ unit: one }) => pretty(one) || "%").join(", ");
   if (unit === null || unit.text === "")
     return fault("missing-unit", { name, kind, samples }, span, insertions(wanted, span));
   const text = shown ?? pretty(unit.text);

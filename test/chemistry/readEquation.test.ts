@@ -81,7 +81,7 @@ describe("readEquation", () => {
     ["-> B", "Nothing stands on the left of the arrow; an equation reads as 2 H2O2 -> 2 H2O + O2.", [], ["B"]],
     ["A + -> B", "A species is expected beside this +.", [], ["A", "B"]],
     ["+ A -> B", "A species is expected beside this +.", [], ["A", "B"]],
-    ["A B -> C", "Between species stands a +; B cannot follow here.", ["A + B -> C"], ["A", "B", "C"]],
+    ["A B -> C", "Between species stands a +; “B” cannot follow here.", ["A + B -> C"], ["A", "B", "C"]],
     ["A -> B -> C", "This equation has more than one arrow; give each reaction a line of its own.", [], ["A", "B"]],
     [
       "H2 + 0.5 O2 -> H2O",

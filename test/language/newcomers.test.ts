@@ -296,6 +296,48 @@ const mistakes: readonly Mistake[] = [
     on: "60",
     mends: ["rate at 60 s"],
   },
+  {
+    what: "an event without quotes",
+    put: ["  rate", "  observed blue at 31 s\n  rate"],
+    code: "line-unexpected",
+    on: "blue",
+    mends: ['  observed "blue" at 31 s\n  rate'],
+  },
+  {
+    what: "and between the items of a list",
+    put: ["  rate", '  observed "blue" at 31 s and 30 s\n  rate'],
+    code: "line-left-over",
+    on: "and 30 s",
+    mends: ['  observed "blue" at 31 s, 30 s\n  rate'],
+  },
+  {
+    what: "a purity without %",
+    put: ["0.100 mol/L", "0.17 g purity 98"],
+    code: "share-beyond-whole",
+    on: "98",
+    mends: ["0.17 g purity 98 %"],
+  },
+  {
+    what: "a density without its unit",
+    put: ["0.100 mol/L", "5.0 mL of 30 % by mass density 1.11"],
+    code: "missing-unit",
+    on: "1.11",
+    mends: ["5.0 mL of 30 % by mass density 1.11 g/mL"],
+  },
+  {
+    what: "a dash before each fact",
+    put: ["  volume", "- volume"],
+    code: "word-unknown",
+    on: "-",
+    mends: ["volume"],
+  },
+  {
+    what: "a symbol for a keyword",
+    put: ["temperature 25.0 °C", "T 25.0 °C"],
+    code: "word-unknown",
+    on: "T",
+    mends: [],
+  },
   { what: "one unit for two times", put: ["from 0 s", "from 0"], code: "missing-unit", on: "0", mends: ["from 0 s"] },
 ];
 

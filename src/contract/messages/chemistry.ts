@@ -97,7 +97,7 @@ export const chemistryMessages = {
   "equation-plus": message(
     "error",
     "Species of one side are joined by +.",
-    ({ text }: { text: string }) => `Between species stands a +; ${text} cannot follow here.`,
+    ({ text }: { text: string }) => `Between species stands a +; “${text}” cannot follow here.`,
   ),
   unbalanced: message(
     "error",

@@ -39,7 +39,7 @@ export const languageMessages = {
     "error",
     "A line stands where nothing takes it.",
     ({ head, owner }: { head: string; owner: string }) =>
-      `“${head}” belongs below a ${owner} line, and there is none above it that could take it. Move it below one.`,
+      `“${head}” belongs below ${/^[aeiou]/.test(owner) ? "an" : "a"} ${owner} line, and there is none above it that could take it. Move it below one.`,
   ),
   "line-twice": message(
     "error",
@@ -62,7 +62,7 @@ export const languageMessages = {
     "error",
     "A name holds a character that names cannot have, or is one of the language's connecting words.",
     ({ name, what }: { name: string; what: string }) =>
-      `“${name}” cannot be the name of a ${what}. Names are made of letters, digits, _, - and ′, and are none of the words in, from, as, at, to, of, is, by, like, using, and, with, after, within.`,
+      `“${name}” cannot be the name of a ${what}. Names are made of letters, digits, _, - and ′, and are none of the words in, from, as, at, to, of, is, by, like, using, and, with, after, within, reads, purity, density, giving.`,
   ),
   "name-twice": message(
     "error",

@@ -7,7 +7,7 @@ import { lexLine } from "../lexer.js";
 import type { Parsed } from "../parse.js";
 import type { Statement } from "../syntax.js";
 import { bindCalibrations } from "./bindCalibrations.js";
-import { type Binding, type NameUse, report } from "./binding.js";
+import { type Binding, type NameUse, report, thereAre } from "./binding.js";
 import { bindReactions } from "./bindReaction.js";
 import { bindResultsIn } from "./bindResultsIn.js";
 import { bindRun } from "./bindRun.js";
@@ -166,7 +166,7 @@ function inheritedLines(
     report(binding, problem("like-later", { run, like }, origin));
   } else if (!names.includes(like) && !binding.salvaged.has(like)) {
     const others = names.filter((name) => name !== run);
-    const known = others.length === 0 ? "" : `; there are ${others.slice(0, 6).join(", ")}`;
+    const known = others.length === 0 ? "; no other run stands above" : thereAre(others);
     const mend = nearest(like, others).map((near) => replacement(origin, near));
     report(binding, problem("name-unknown", { what: "run", name: like, known }, origin, mend));
   }

@@ -6,7 +6,7 @@ import type { Follow } from "../../study/follow.js";
 import type { Reaction, Species } from "../../study/reaction.js";
 import { blockOf, isBroken, originOf, quantityOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
-import { type Binding, report } from "./binding.js";
+import { type Binding, report, thereAre } from "./binding.js";
 import { bindEquation } from "./bindReaction.js";
 import { hasLine, linesWith, lineWith, quantityFact, textFact } from "./facts.js";
 import { changed, describeSpecies } from "./reactionSpecies.js";
@@ -82,10 +82,7 @@ export function useColumn(
   binding.uses.push({ kind: "column", name: column, run, declares: false, origin });
   if (dataLine === null || isDeclared(dataLine, column) || binding.salvaged.has(column)) return;
   const names = [...new Set((data?.columns ?? []).map((candidate) => candidate.name))];
-  const known =
-    names.length === 0
-      ? ". Declare it below the data line"
-      : `; there ${names.length === 1 ? "is" : "are"} ${names.join(", ")}`;
+  const known = names.length === 0 ? ". Declare it below the data line" : thereAre(names);
   const mend = nearest(column, names).map((near) => replacement(origin, near));
   report(binding, problem("name-unknown", { what: "column", name: column, known }, origin, mend));
 }
@@ -122,7 +119,7 @@ function calibratedBy(binding: Binding, lines: readonly Statement[]): Fact<strin
   binding.uses.push({ kind: "calibration", name, run: null, declares: false, origin });
   if (!binding.calibrations.has(name) && !binding.salvaged.has(name)) {
     const names = [...binding.calibrations];
-    const known = names.length === 0 ? "" : `; there is ${names.join(", ")}`;
+    const known = names.length === 0 ? `. Declare it: calibration ${name} of I2, say` : thereAre(names);
     const mend = nearest(name, names).map((near) => replacement(origin, near));
     report(binding, problem("name-unknown", { what: "calibration", name, known }, origin, mend));
   }

@@ -4,7 +4,7 @@ import type { Reaction } from "../../study/reaction.js";
 import type { Mechanism, RunReference, Series, StepConstant } from "../../study/study.js";
 import { blockOf, fieldOf, isBroken, itemsOf, originIn, originOf, quantityOf, textOf } from "../fields.js";
 import type { Field, Statement } from "../syntax.js";
-import { type Binding, report } from "./binding.js";
+import { type Binding, report, thereAre } from "./binding.js";
 import { bindEquation } from "./bindReaction.js";
 import { hasLine, linesWith, lineWith, textFact } from "./facts.js";
 import { resolveSpecies } from "./resolveSpecies.js";
@@ -95,7 +95,7 @@ function referenceOf(context: TogetherContext, statement: Statement, { text, spa
 function checkRun({ binding, runs, tables }: TogetherContext, name: string, origin: RunReference["origin"]): void {
   binding.uses.push({ kind: "run", name, run: null, declares: false, origin });
   if (runs.has(name) || tables || binding.salvaged.has(name)) return;
-  const known = runs.size === 0 ? "" : `; there are ${[...runs].slice(0, 6).join(", ")}`;
+  const known = runs.size === 0 ? "; the description has none" : thereAre([...runs]);
   const mend = nearest(name, [...runs]).map((near) => replacement(origin, near));
   report(binding, problem("name-unknown", { what: "run", name, known }, origin, mend));
 }

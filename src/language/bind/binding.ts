@@ -55,3 +55,9 @@ export function lineOnTop(binding: Binding, line: string): Mend {
   const version = /^\s*ratewright[^\n]*\n/.exec(binding.text)?.[0].length ?? 0;
   return { text: line, edits: [{ start: version, end: version, text: `${line}\n` }] };
 }
+
+/** The names there are, behind the sentence that one is not among them. */
+export function thereAre(names: readonly string[]): string {
+  const more = names.length > 6 ? " …" : "";
+  return `; there ${names.length === 1 ? "is" : "are"} ${names.slice(0, 6).join(", ")}${more}`;
+}

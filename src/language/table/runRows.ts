@@ -182,7 +182,7 @@ export const runRows: readonly StatementRow[] = [
     repeats: many,
     parts: [
       either(
-        [keyword("line"), integer("line", "the number of a line, as an editor counts")],
+        [keyword("line"), integer("line", "the number of a line, as an editor counts them,")],
         [quantity("time", "from"), keyword("to"), quantity("time", "to")],
       ),
       keyword("because"),

@@ -80,7 +80,7 @@ export const wishRows: readonly StatementRow[] = [
     head: "reversible",
     owners: below,
     repeats: once,
-    parts: [either([words("kind", "free")], [words("kind", "K"), number("K", "a number, in powers of mol/L")])],
+    parts: [either([words("kind", "free")], [words("kind", "K"), number("K", "a number, in powers of mol/L,")])],
     kept: true,
     help: "The reaction goes back: with a fitted position of equilibrium, or with its K in powers of mol/L.",
     example: "reversible K 4.2",
