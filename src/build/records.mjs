@@ -1,6 +1,6 @@
 // Writes what is made from the form of records: their JSON Schema, and the records of the samples:
 // node src/build/records.mjs
-import { mkdirSync, writeFileSync } from "node:fs";
+import { mkdirSync, readdirSync, rmSync, writeFileSync } from "node:fs";
 import { dirname, join } from "node:path";
 import { pathToFileURL } from "node:url";
 import { bundleTests } from "./bundleTests.mjs";
@@ -13,6 +13,9 @@ const schema = join(root, "media", "schema", "raterecord.schema.json");
 mkdirSync(dirname(schema), { recursive: true });
 writeFileSync(schema, schemaText());
 
+// Records of an earlier form are not written over by the command.
+const samples = join(root, "samples");
+for (const name of readdirSync(samples)) if (name.endsWith(".raterecord")) rmSync(join(samples, name));
 const { runCommandLine } = await load("src/cli/run.mjs");
 const io = { cwd: root, out: (text) => process.stdout.write(text), err: (text) => process.stderr.write(text) };
 // Status 1: a sample has mistakes in it, on purpose.

@@ -27,8 +27,16 @@ export function compare(before: RunRecord, now: RunRecord): Moved[] {
   const stated = facts.filter(({ stated }) => stated).map(moved("description"));
   const results = facts.filter(({ stated }) => !stated).map(moved("result"));
   if (causes.length > 0 || facts.length === 0) return [...order(causes, stated), ...results];
-  return [...order([unexplained], stated), ...results];
+  const why = facts.some(({ otherUnit }) => otherUnit) ? otherUnits : unexplained;
+  return [why, ...stated, ...results];
 }
+
+/** The meaning is in SI: it does not see in which units a description is written, but results come out in them. */
+const otherUnits: Moved = {
+  cause: "description",
+  what: "the description",
+  text: "The description means the same but is written in other units, and results come out in those.",
+};
 
 /** What stands in the record cannot follow from the same data, description and method. */
 const unexplained: Moved = {
@@ -86,6 +94,8 @@ interface MovedFact {
   readonly what: string;
   readonly stated: boolean;
   readonly text: string;
+  /** whether its unit is another one */
+  readonly otherUnit: boolean;
 }
 
 const moved =
@@ -98,17 +108,20 @@ function movedFacts(before: readonly Fact[], now: readonly Fact[]): MovedFact[] 
   const changed = before.flatMap((fact): MovedFact[] => {
     const { what, stated } = fact;
     const found = later.get(what);
-    if (found === undefined) return [{ what, stated, text: `${what} is no longer there; it was ${fact.text}.` }];
+    if (found === undefined) {
+      return [{ what, stated, otherUnit: false, text: `${what} is no longer there; it was ${fact.text}.` }];
+    }
     const words = differences(fact, found);
-    return words === null ? [] : [{ what, stated, text: `${what} moved ${words}.` }];
+    const otherUnit = fact.words.get("unit") !== found.words.get("unit");
+    return words === null ? [] : [{ what, stated, otherUnit, text: `${what} moved${words}.` }];
   });
   const added = now
     .filter(({ what }) => !earlier.has(what))
-    .map(({ what, stated, text }) => ({ what, stated, text: `${what} is new: ${text}.` }));
+    .map(({ what, stated, text }) => ({ what, stated, otherUnit: false, text: `${what} is new: ${text}.` }));
   return [...changed, ...added];
 }
 
-/** “from … to …”; null where the two say the same. */
+/** “ from … to …”, to be said behind “moved”; null where the two say the same. */
 function differences(before: Fact, now: Fact): string | null {
   const parts: string[] = [];
   for (const key of new Set([...before.numbers.keys(), ...now.numbers.keys()])) {
@@ -125,7 +138,7 @@ function differences(before: Fact, now: Fact): string | null {
     parts.push(`${key} from ${from ?? "none"} to ${to ?? "none"}`);
   }
   if (parts.length === 0) return null;
-  if (before.text !== now.text && before.words.has("unit")) return `from ${before.text} to ${now.text}`;
-  if (before.words.size === 1 && before.numbers.size === 0) return `from ${before.text} to ${now.text}`;
-  return `in its digits: ${parts.join(", ")}`;
+  if (before.text !== now.text && before.numbers.has("value")) return ` from ${before.text} to ${now.text}`;
+  if (before.words.size === 1 && before.numbers.size === 0) return ` from ${before.text} to ${now.text}`;
+  return `${before.numbers.has("value") ? " in its digits" : ""}: ${parts.join(", ")}`;
 }

@@ -1,24 +1,25 @@
 import { isObject } from "./shape.js";
 
 /**
- * A value as JSON, one fact a line: what holds only numbers, words and lists of them stands on one line; all else has
- * a line for each of its parts. Keys keep their order; lines end in LF, the last one too.
+ * A value as JSON, one fact a line: an object that says what it is about stands on one line; all else has a line for
+ * each of its parts, an empty list too, so that a first entry adds a line and changes none. Keys keep their order;
+ * lines end in LF, the last one too.
  */
 export function layOut(value: unknown): string {
   return `${laidOut(value, "")}\n`;
 }
 
 function laidOut(value: unknown, indent: string): string {
-  if (isFact(value)) return oneLine(value);
   const inner = `${indent}  `;
-  if (Array.isArray(value))
+  if (Array.isArray(value)) {
     return block(
       "[",
       value.map((entry) => laidOut(entry, inner)),
       "]",
       indent,
     );
-  if (!isObject(value)) return oneLine(value);
+  }
+  if (!isObject(value) || "what" in value) return oneLine(value);
   return block(
     "{",
     Object.entries(value).map(([key, entry]) => `${JSON.stringify(key)}: ${laidOut(entry, inner)}`),
@@ -28,13 +29,11 @@ function laidOut(value: unknown, indent: string): string {
 }
 
 function block(begin: string, parts: readonly string[], end: string, indent: string): string {
-  return `${begin}\n${parts.map((part) => `${indent}  ${part}`).join(",\n")}\n${indent}${end}`;
-}
-
-/** Whether a value stands on one line: an object that says what it is about, a list without objects, anything plain. */
-function isFact(value: unknown): boolean {
-  if (Array.isArray(value)) return value.every((entry) => !Array.isArray(entry) && !isObject(entry));
-  return !isObject(value) || "what" in value;
+  return [
+    begin,
+    ...parts.map((part, at) => `${indent}  ${part}${at < parts.length - 1 ? "," : ""}`),
+    indent + end,
+  ].join("\n");
 }
 
 function oneLine(value: unknown): string {

@@ -21,7 +21,6 @@ export function recordOf(description: Description, { ratewright, language, metho
     ratewright,
     language,
     method,
-    meaning,
     data: data.map((file) => ({
       what: name("data file", file.path),
       path: file.path,
@@ -29,6 +28,7 @@ export function recordOf(description: Description, { ratewright, language, metho
       sha256: file.sha256,
     })),
     diagnostics: recordedDiagnostics(diagnostics, name),
+    meaning,
     runs: runs.map((run) => recordedRun(run, name)),
     series: series.map((one) => recordedSeries(one, name)),
     mechanisms: mechanisms.map((one) => recordedMechanism(one, name)),

@@ -1,4 +1,4 @@
-import { count, list, nullable, numeric, object, oneOf, sha256, text, truth, type ValueOf } from "./shape.js";
+import { count, list, nullable, numeric, object, oneOf, optional, sha256, text, truth, type ValueOf } from "./shape.js";
 
 const what = text("what the line is about, in words, different on every line of the record");
 const id = text("name of the item; the lines of the description are found by it");
@@ -16,26 +16,24 @@ const parameterFields = {
   what,
   name: text("k, start, infinity, order …"),
   ...number,
-  uRandom: nullable(numeric("part of u from scatter")),
-  uCommon: nullable(numeric("part of u from causes that all readings share")),
-  uCorrelated: nullable(numeric("u if neighbouring readings are taken to depend on each other")),
-  interval95: nullable(list("ends of the 95 % interval", numeric("in the unit of the parameter"))),
-  by: nullable(oneOf("how the interval was found", "t", "profile")),
-  fixed: truth("whether it was stated, not fitted"),
-  role: oneOf("what the parameter is", "rate constant", "order", "start", "infinity", "other"),
-  bound: nullable(oneOf("the bound it lies on", "low", "high")),
+  uRandom: optional(numeric("part of u from scatter")),
+  uCommon: optional(numeric("part of u from causes that all readings share")),
+  uCorrelated: optional(numeric("u if neighbouring readings are taken to depend on each other")),
+  interval95: optional(list("ends of the 95 % interval", numeric("in the unit of the parameter"))),
+  by: optional(oneOf("how the interval was found", "t", "profile")),
+  fixed: optional(truth("true where it was stated, not fitted")),
+  bound: optional(oneOf("the bound it lies on", "low", "high")),
 };
-const parameter = object("a parameter of a fit", parameterFields);
+const parameter = object("a parameter; what does not apply to it is left out", parameterFields);
 
-const covariance = list(
-  "covariance of the parameters, a row each",
-  object("a row", {
-    what,
-    name: text("the parameter of the row"),
-    with: list("the parameters of the columns", text("a name")),
-    values: list("the covariances, in the units of both", numeric("down to the fourth digit of the product of both u")),
-  }),
-);
+const covariance = object("covariance of the parameters that were fitted", {
+  what,
+  with: list("the parameters of rows and columns", text("a name")),
+  rows: list(
+    "the matrix, in the units of both parameters",
+    list("a row", numeric("down to the fourth digit of the product of both u")),
+  ),
+});
 
 const follow = object("a followed signal", {
   id,
@@ -97,56 +95,45 @@ const fit = object("a fit of a rate law", {
     degreesOfFreedom: count("readings less parameters"),
   }),
   parameters: list("the parameters; none where the fit is refused", parameter),
-  kPrime: nullable(parameter),
+  kPrime: nullable(object("|ν| k, the rate constant of the species", quantityFields)),
   halfLife: nullable(object("half-life", { ...quantityFields, species: text("the species") })),
-  covariance,
-  budget: list(
-    "what the variance of the rate constant is made of",
-    object("a cause", {
-      what,
-      source: text("the cause"),
-      kind: oneOf("whether all readings share it", "common", "random"),
-      share: numeric("of the variance, four decimals"),
-    }),
-  ),
-  residual: nullable(quantity),
-  agreement: object("how well law and readings agree", {
+  covariance: nullable(covariance),
+  budget: object("what the variance of the rate constant is made of, one entry a cause in each list", {
     what,
-    reducedChiSquare: nullable(numeric("six significant digits")),
-    conversion: nullable(numeric("share of the species used up, four decimals")),
-    aicc: nullable(numeric("corrected information criterion, four decimals")),
-    condition: nullable(numeric("condition number, six significant digits")),
-    correlation: nullable(numeric("of neighbouring residuals, four decimals")),
+    sources: list("the causes", text("a cause")),
+    kinds: list("whether all readings share them", oneOf("kind", "common", "random")),
+    shares: list("their shares", numeric("four decimals")),
   }),
-  tests: list(
-    "tests of the residuals",
-    object("a test", {
-      what,
-      name: text("its name"),
-      statistic: numeric("four decimals"),
-      p: nullable(numeric("four decimals")),
-    }),
-  ),
+  agreement: object("how well law and readings agree; what was not computed is left out", {
+    what,
+    residual: optional(numeric("standard deviation of the residuals, six significant digits")),
+    unit: optional(text("of the residual")),
+    reducedChiSquare: optional(numeric("six significant digits")),
+    conversion: optional(numeric("share of the species used up, four decimals")),
+    aicc: optional(numeric("corrected information criterion, four decimals")),
+    condition: optional(numeric("condition number, six significant digits")),
+    correlation: optional(numeric("of neighbouring residuals, four decimals")),
+    tests: list("tests of the residuals", text("name of a test")),
+    statistics: list("their statistics", numeric("four decimals")),
+    p: list("their p values", nullable(numeric("four decimals"))),
+  }),
 });
 
 const run = object("a run", {
   id,
   title: nullable(text("its title")),
   equation: text("the reaction"),
-  conditions: list("the conditions", object("a condition", { ...quantityFields, name: text("volume, temperature …") })),
   taken: list(
-    "what was taken",
-    object("something taken", {
+    "what was taken, and behind each what it makes at the start",
+    object("an amount taken, or a concentration at the start", {
       ...quantityFields,
       species: text("the species"),
-      stock: nullable(text("strength of the stock it was taken of")),
-      limiting: truth("whether it runs out first"),
+      stock: optional(text("strength of the stock it was taken of")),
+      limiting: optional(truth("true where it runs out first")),
+      start: optional(truth("true for a concentration at the start")),
     }),
   ),
-  concentrations: list(
-    "what the taken amounts make at the start",
-    object("a concentration", { ...quantityFields, species: text("the species") }),
-  ),
+  conditions: list("the conditions", object("a condition", { ...quantityFields, name: text("volume, temperature …") })),
   follow: list("the followed signals", follow),
   rates: list("the rates", rate),
   fits: list("the fits", fit),
@@ -186,7 +173,7 @@ const series = object("a series of runs", {
   ),
   rateConstants: list("rate constants of the orders", parameter),
   temperature: list("what follows from the temperatures", parameter),
-  temperatureCovariance: covariance,
+  temperatureCovariance: nullable(covariance),
   replicates: nullable(parameter),
 });
 
@@ -206,7 +193,6 @@ export const recordShape = object("Record of a run description, written by ratew
   ratewright: text("version of the program"),
   language: count("version of the language"),
   method: text("version of the way numbers are computed"),
-  meaning: sha256("SHA-256 of what the description means; comments and spaces play no part"),
   data: list(
     "the data files",
     object("a data file", {
@@ -226,6 +212,7 @@ export const recordShape = object("Record of a run description, written by ratew
       times: count("how often it stands"),
     }),
   ),
+  meaning: sha256("SHA-256 of what the description means; comments and spaces play no part"),
   runs: list("the runs", run),
   series: list("the series", series),
   mechanisms: list("the mechanisms", mechanism),

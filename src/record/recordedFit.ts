@@ -1,12 +1,6 @@
 import type { Run } from "../contract/findings.js";
 import { itemWords, type Name } from "./names.js";
-import {
-  maybeQuantity,
-  recordedCovariance,
-  recordedParameter,
-  recordedParameters,
-  recordedQuantity,
-} from "./recordedQuantity.js";
+import { maybeQuantity, recordedCovariance, recordedParameters, recordedQuantity } from "./recordedQuantity.js";
 import type { RecordedFit } from "./recordShape.js";
 import { roundedDecimals, roundedMeasure, roundedU, roundedValue } from "./rounded.js";
 
@@ -39,30 +33,32 @@ export function recordedFit(fit: Run["fits"][number], name: Name): RecordedFit {
           },
     readings: { what: name(id, "readings"), points: fit.points, degreesOfFreedom: fit.degreesOfFreedom },
     parameters: recordedParameters(id, fit.parameters, name),
-    kPrime: kPrime === null ? null : recordedParameter(name(id, "k′"), "k′", kPrime),
+    kPrime: maybeQuantity(() => name(id, "k′"), kPrime),
     halfLife:
       halfLife === null ? null : { ...recordedQuantity(name(id, "half-life"), halfLife), species: halfLife.species },
     covariance: recordedCovariance(id, fit.covariance, name),
-    budget: fit.budget.map(({ source, kind, share }) => ({
-      what: name(id, `share of ${source} in the variance of k`),
-      source,
-      kind,
-      share: roundedDecimals(share) ?? 0,
-    })),
-    residual: maybeQuantity(() => name(id, "residual standard deviation"), fit.residual),
-    agreement: {
-      what: name(id, "agreement"),
-      reducedChiSquare: roundedMeasure(fit.reducedChiSquare),
-      conversion: roundedDecimals(fit.conversion),
-      aicc: roundedDecimals(fit.aicc),
-      condition: roundedMeasure(fit.condition),
-      correlation: roundedDecimals(fit.correlation),
+    budget: {
+      what: name(id, "what the variance of k is made of"),
+      sources: fit.budget.map(({ source }) => source),
+      kinds: fit.budget.map(({ kind }) => kind),
+      shares: fit.budget.map(({ share }) => roundedDecimals(share)),
     },
-    tests: fit.tests.map((test) => ({
-      what: name(id, test.name),
-      name: test.name,
-      statistic: roundedDecimals(test.statistic) ?? 0,
-      p: roundedDecimals(test.p),
-    })),
+    agreement: recordedAgreement(fit, name(id, "agreement")),
+  };
+}
+
+function recordedAgreement(fit: Run["fits"][number], what: string): RecordedFit["agreement"] {
+  const { residual, reducedChiSquare, conversion, aicc, condition, correlation, tests } = fit;
+  return {
+    what,
+    ...(residual === null ? {} : { residual: roundedMeasure(residual.value), unit: residual.unit }),
+    ...(reducedChiSquare === null ? {} : { reducedChiSquare: roundedMeasure(reducedChiSquare) }),
+    ...(conversion === null ? {} : { conversion: roundedDecimals(conversion) }),
+    ...(aicc === null ? {} : { aicc: roundedDecimals(aicc) }),
+    ...(condition === null ? {} : { condition: roundedMeasure(condition) }),
+    ...(correlation === null ? {} : { correlation: roundedDecimals(correlation) }),
+    tests: tests.map((test) => test.name),
+    statistics: tests.map(({ statistic }) => roundedDecimals(statistic)),
+    p: tests.map(({ p }) => (p === null ? null : roundedDecimals(p))),
   };
 }

@@ -13,21 +13,21 @@ export function maybeQuantity(what: () => string, quantity: Q | null): RecordedQ
   return quantity === null ? null : recordedQuantity(what(), quantity);
 }
 
+/** What does not apply to a parameter is left out. */
 export function recordedParameter(what: string, name: string, found: P): RecordedParameter {
-  const { u, interval95, by, fixed, role, bound } = found;
+  const { u, interval95, by, fixed, bound } = found;
   const { what: words, ...quantity } = recordedQuantity(what, found);
+  const parts = { uRandom: found.uRandom, uCommon: found.uCommon, uCorrelated: found.uCorrelated };
+  const known = Object.entries(parts).flatMap(([key, part]) => (part === null ? [] : [[key, roundedPart(part, u)]]));
   return {
     what: words,
     name,
     ...quantity,
-    uRandom: roundedPart(found.uRandom, u),
-    uCommon: roundedPart(found.uCommon, u),
-    uCorrelated: roundedPart(found.uCorrelated, u),
-    interval95: interval95 === null ? null : interval95.map((end) => roundedValue(end, u)),
-    by,
-    fixed,
-    role,
-    bound,
+    ...Object.fromEntries(known),
+    ...(interval95 === null ? {} : { interval95: interval95.map((end) => roundedValue(end, u)) }),
+    ...(by === null ? {} : { by }),
+    ...(fixed ? { fixed } : {}),
+    ...(bound === null ? {} : { bound }),
   };
 }
 
@@ -39,19 +39,19 @@ export function recordedParameters(
   return Object.entries(parameters).map(([key, found]) => recordedParameter(name(item, key), key, found));
 }
 
-/** A row for each parameter; the place of its last digits follows from the two variances. */
+/** The place of the last digit of each entry follows from the two variances. */
 export function recordedCovariance(
   item: string,
   found: { readonly names: readonly string[]; readonly matrix: readonly (readonly number[])[] } | null,
   name: Name,
-): RecordedCovariance {
-  if (found === null) return [];
-  const { names, matrix } = found;
-  const u = matrix.map((row, index) => Math.sqrt(row[index] ?? 0));
-  return matrix.map((row, index) => ({
-    what: name(item, `covariance of ${names[index] ?? ""}`),
-    name: names[index] ?? "",
-    with: [...names],
-    values: row.map((entry, column) => roundedCovariance(entry, u[index] ?? 0, u[column] ?? 0)),
-  }));
+): RecordedCovariance | null {
+  if (found === null) return null;
+  const u = found.matrix.map((row, index) => Math.sqrt(row[index] ?? 0));
+  return {
+    what: name(item, "covariance"),
+    with: found.names,
+    rows: found.matrix.map((row, index) =>
+      row.map((entry, column) => roundedCovariance(entry, u[index] ?? 0, u[column] ?? 0)),
+    ),
+  };
 }

@@ -12,28 +12,18 @@ export function recordedRun(run: Run, name: Name): RecordedRun {
     id,
     title,
     equation,
+    taken: run.taken.flatMap((taken) => recordedTaken(id, taken, name)),
     conditions: Object.entries(run.conditions).map(([key, condition]) => ({
       ...recordedQuantity(name(id, key), condition),
       name: key,
     })),
-    taken: run.taken.map(({ species, given, stock, limiting }) => ({
-      ...recordedQuantity(name(id, `${species} taken`), given),
-      species,
-      stock,
-      limiting,
-    })),
-    concentrations: run.taken.flatMap(({ species, concentration }) =>
-      concentration === null
-        ? []
-        : [{ ...recordedQuantity(name(id, `${species} at the start`), concentration), species }],
-    ),
     follow: run.follow.map((follow) => recordedFollow(follow, name)),
     rates: run.rates.map((rate) => recordedRate(rate, name)),
     fits: run.fits.map((fit) => recordedFit(fit, name)),
     comparisons: run.comparisons.map(({ follow, fits, weights, decision }) => ({
       what: name(follow, "comparison of laws"),
       fits: fits.map(itemWords),
-      weights: weights.map((weight) => roundedDecimals(weight) ?? 0),
+      weights: weights.map((weight) => roundedDecimals(weight)),
       decision,
     })),
     suitability: run.suitability.map(({ monitor, verdict }) => ({
@@ -47,6 +37,19 @@ export function recordedRun(run: Run, name: Name): RecordedRun {
       species,
     })),
   };
+}
+
+/** The amount, and behind it what it makes at the start where that is known. */
+function recordedTaken(id: string, taken: Run["taken"][number], name: Name): RecordedRun["taken"] {
+  const { species, given, stock, concentration, limiting } = taken;
+  const amount = {
+    ...recordedQuantity(name(id, `${species} taken`), given),
+    species,
+    ...(stock === null ? {} : { stock }),
+    ...(limiting ? { limiting } : {}),
+  };
+  if (concentration === null) return [amount];
+  return [amount, { ...recordedQuantity(name(id, `${species} at the start`), concentration), species, start: true }];
 }
 
 function recordedFollow(follow: Run["follow"][number], name: Name): RecordedFollow {

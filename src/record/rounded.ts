@@ -24,8 +24,8 @@ export function roundedU(u: number | null): number | null {
 }
 
 /** A part of an uncertainty down to the place of the whole: what cancels but for the last bits is 0. */
-export function roundedPart(part: number | null, u: number | null): number | null {
-  return part === null ? null : roundedValue(part, u ?? part);
+export function roundedPart(part: number, u: number | null): number {
+  return roundedValue(part, u ?? part);
 }
 
 /** A covariance down to the place that belongs to the product of the two uncertainties. */
@@ -33,13 +33,13 @@ export function roundedCovariance(covariance: number, uRow: number, uColumn: num
   return roundedValue(covariance, uRow * uColumn);
 }
 
-export function roundedMeasure(value: number | null): number | null {
-  return value === null ? null : significant(value, digitsOfMeasure);
+export function roundedMeasure(value: number): number {
+  return significant(value, digitsOfMeasure);
 }
 
 /** Down to the fourth decimal: shares, correlations, differences of information criteria. */
-export function roundedDecimals(value: number | null): number | null {
-  return value === null ? null : roundedAt(value, -4);
+export function roundedDecimals(value: number): number {
+  return roundedAt(value, -4);
 }
 
 /** How far two kept values may lie apart and still be the same: one unit of the last digit, which rounding may tip. */

@@ -11,15 +11,23 @@ export interface Shape<T> {
   readonly schema: JsonSchema;
   /** where and how a value is otherwise, in words; null where it fits */
   readonly fault: (value: unknown, path: string) => string | null;
+  /** whether the key it stands under may be left out */
+  readonly optional?: true;
   /** carries the type, never a value */
   readonly type?: T;
 }
+
+/** A shape whose key is left out where there is nothing to say. */
+export type Optional<T> = Shape<T> & { readonly optional: true };
 
 /** The type of the values of a shape. */
 export type ValueOf<S> = S extends Shape<infer T> ? T : never;
 
 type Shapes = Readonly<Record<string, Shape<unknown>>>;
-type ObjectOf<S extends Shapes> = { readonly [K in keyof S]: ValueOf<S[K]> };
+type OptionalKeys<S extends Shapes> = { [K in keyof S]: S[K] extends { optional: true } ? K : never }[keyof S];
+type ObjectOf<S extends Shapes> = { readonly [K in Exclude<keyof S, OptionalKeys<S>>]: ValueOf<S[K]> } & {
+  readonly [K in OptionalKeys<S>]?: ValueOf<S[K]>;
+};
 
 function primitive<T>(type: string, words: string, is: (value: unknown) => boolean): (help: string) => Shape<T> {
   return (help) => ({
@@ -60,6 +68,10 @@ export function nullable<T>(shape: Shape<T>): Shape<T | null> {
   };
 }
 
+export function optional<T>({ schema, fault }: Shape<T>): Optional<T> {
+  return { schema, fault, optional: true };
+}
+
 export function list<T>(help: string, entry: Shape<T>): Shape<readonly T[]> {
   return {
     schema: { description: help, type: "array", items: entry.schema },
@@ -74,7 +86,7 @@ export function list<T>(help: string, entry: Shape<T>): Shape<readonly T[]> {
   };
 }
 
-/** An object with exactly these keys; the reader passes over keys it does not know. */
+/** An object with these keys and no others; the reader passes over keys it does not know. */
 export function object<S extends Shapes>(help: string, fields: S): Shape<ObjectOf<S>> {
   const properties = Object.fromEntries(Object.entries(fields).map(([key, { schema }]) => [key, schema]));
   return {
@@ -82,13 +94,16 @@ export function object<S extends Shapes>(help: string, fields: S): Shape<ObjectO
       description: help,
       type: "object",
       properties,
-      required: Object.keys(fields),
+      required: Object.keys(fields).filter((key) => fields[key]?.optional !== true),
       additionalProperties: false,
     },
     fault(value, path) {
       if (!isObject(value)) return `${path} is no object`;
       for (const [key, shape] of Object.entries(fields)) {
-        if (!Object.hasOwn(value, key)) return `${path} lacks ${key}`;
+        if (!Object.hasOwn(value, key)) {
+          if (shape.optional === true) continue;
+          return `${path} lacks ${key}`;
+        }
         const found = shape.fault(value[key], path === "" ? key : `${path}.${key}`);
         if (found !== null) return found;
       }

@@ -30,7 +30,7 @@ describe("comparing records", () => {
   it("a row added: its number of rows before and now", async () => {
     const found = await moves("ester", { data: (csv) => `${csv.trimEnd()}\n61;1,0\n` });
     assert.match(found[0]?.text ?? "", /^data\/ester\.csv changed: (\d+) rows before, (\d+) now, SHA-256/);
-    assert.ok(found.some(({ text }) => /^run A, follow left: readings moved in its digits: points from/.test(text)));
+    assert.ok(found.some(({ text }) => /^run A, follow left: readings moved: points from/.test(text)));
   });
 
   it("an amount taken: the description, that amount with its words, then what follows from it", async () => {
@@ -51,6 +51,19 @@ describe("comparing records", () => {
     assert.deepEqual(
       found.map(({ cause, text }) => [cause, text]),
       [["description", "What the description means changed."]],
+    );
+  });
+
+  it("another unit for the same amount: said as that, not as a record changed by hand", async () => {
+    const found = await moves("gas", {
+      text: (text) => text.replace("50.00 mL within 0.05 mL", "50.00e-3 L within 0.05e-3 L"),
+    });
+    assert.deepEqual(
+      found.map(({ cause, text }) => [cause, text]),
+      [
+        ["description", "The description means the same but is written in other units, and results come out in those."],
+        ["description", "run A: volume moved from 50.000(29) mL to 0.050000(29) L."],
+      ],
     );
   });
 

@@ -18,19 +18,21 @@ describe("the schema of records", () => {
     }
   });
 
-  it("and the reader refuse the same: each key left out, each value of another kind", async () => {
+  it("and the reader judge alike: each key left out, each value of another kind", async () => {
     const record = readBack(await sampleRecord("gas"));
-    let broken = 0;
+    let refused = 0;
+    let passed = 0;
     for (const path of paths(record)) {
       for (const by of [undefined, { something: "else" }]) {
         const other = changed(record, path, by);
-        assert.ok(!validate(other), `${path.join(".")} as ${JSON.stringify(by)} is valid`);
-        const read = readRecord(JSON.stringify(other), "file:///a.raterecord");
-        assert.ok(!read.ok, `${path.join(".")} as ${JSON.stringify(by)} is read`);
-        broken++;
+        const read = readRecord(JSON.stringify(other), "file:///a.raterecord").ok;
+        assert.equal(validate(other), read, `${path.join(".")} as ${JSON.stringify(by)}`);
+        if (read) passed++;
+        else refused++;
       }
     }
-    assert.ok(broken > 300, `${broken} ways`);
+    // What may be left out: parts of a parameter and of a taken amount, measures of a fit.
+    assert.ok(refused > 250 && passed > 5 && passed < 20, `${refused} refused, ${passed} passed`);
   });
 });
 
