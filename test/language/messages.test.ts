@@ -80,7 +80,11 @@ const cases: readonly Case[] = [
   },
   { put: ["run A", "run from"], said: ["name-malformed “from”: “from” cannot be the name of a run."], mend: null },
   { put: ["run A", "run A like A"], said: ["like-itself “A”: Run A cannot start like itself."], mend: null },
-  { put: ["run A", "run A like B"], said: ["name-unknown “B”: There is no run B here; no other run stands above."], mend: null },
+  {
+    put: ["run A", "run A like B"],
+    said: ["name-unknown “B”: There is no run B here; no other run stands above."],
+    mend: null,
+  },
   {
     put: ["H2O2 0.1 mol/L", "H2O2 30 %"],
     said: ["share-of-what “%”: 30 % of what: by mass, by amount or by volume?"],

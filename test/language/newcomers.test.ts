@@ -266,13 +266,13 @@ const mistakes: readonly Mistake[] = [
   { what: "a share of who knows what", put: ["0.100 mol/L", "30 %"], code: "share-of-what", on: "%", mends: [] },
   {
     what: "a stock of who knows what",
-    put: ["0.100 mol/L", "5.0 mL of 30 % density 1.11 g/mL"],
+    put: ["0.100 mol/L", "0.512 mL of 30 % density 1.11 g/mL"],
     code: "share-of-what",
     on: "%",
     mends: [
-      "5.0 mL of 30 % by mass density 1.11 g/mL",
-      "5.0 mL of 30 % by amount density 1.11 g/mL",
-      "5.0 mL of 30 % by volume density 1.11 g/mL",
+      "0.512 mL of 30 % by mass density 1.11 g/mL",
+      "0.512 mL of 30 % by amount density 1.11 g/mL",
+      "0.512 mL of 30 % by volume density 1.11 g/mL",
     ],
   },
   {
@@ -312,17 +312,17 @@ const mistakes: readonly Mistake[] = [
   },
   {
     what: "a purity without %",
-    put: ["0.100 mol/L", "0.17 g purity 98"],
+    put: ["0.100 mol/L", "0.174 g purity 98"],
     code: "share-beyond-whole",
     on: "98",
-    mends: ["0.17 g purity 98 %"],
+    mends: ["0.174 g purity 98 %"],
   },
   {
     what: "a density without its unit",
-    put: ["0.100 mol/L", "5.0 mL of 30 % by mass density 1.11"],
+    put: ["0.100 mol/L", "0.512 mL of 30 % by mass density 1.11"],
     code: "missing-unit",
     on: "1.11",
-    mends: ["5.0 mL of 30 % by mass density 1.11 g/mL"],
+    mends: ["0.512 mL of 30 % by mass density 1.11 g/mL"],
   },
   {
     what: "a dash before each fact",
@@ -380,7 +380,12 @@ describe("typical first mistakes of a newcomer", () => {
         ),
       );
       if (texts.length !== 1) return;
-      assert.deepEqual(await exampleDiagnostics(texts[0] ?? "", files, false), []);
+      const after = await exampleDiagnostics(texts[0] ?? "", files, false);
+      // That an event is kept and not computed yet is no mistake of the writer's.
+      assert.deepEqual(
+        after.filter(({ code: left }) => left !== "not-computed-yet"),
+        [],
+      );
     });
   }
 });
