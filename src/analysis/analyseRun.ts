@@ -1,3 +1,4 @@
+import { ionsOf } from "../chemistry/handbook/dissociation.js";
 import type { Run as RunFinding } from "../contract/findings.js";
 import { problem } from "../contract/problem.js";
 import { monitors } from "../monitor/monitors.js";
@@ -7,6 +8,7 @@ import { cautionsOf } from "./cautions.js";
 import { followCurves } from "./curves.js";
 import type { EndContext } from "./endPoints.js";
 import { fitsOf } from "./fits.js";
+import { followDetails } from "./followDetails.js";
 import { type Notes, note } from "./notes.js";
 import { ratesOf } from "./rates.js";
 import { type ReadSignal, readSignal } from "./readSignal.js";
@@ -38,7 +40,7 @@ export function analyseRun(run: Run, input: RunInput, notes: Notes): RunFinding 
   for (const follow of run.follow) {
     const read = input.columns === null ? null : readSignal(run, follow, input.columns, notes);
     const context = read === null ? null : contextOf(run, follow, read, amounts, notes);
-    finding.follow.push(followFinding(follow, read, context, input));
+    finding.follow.push(followFinding(run, follow, read, context, input));
     const fits = fitsOf(run, follow, context, input, notes);
     const change = fits.find((fit) => fit.change !== null)?.change ?? null;
     finding.fits.push(...fits.map((fit) => fit.finding));
@@ -88,10 +90,17 @@ function takenOf(run: Run, amounts: Stoichiometry, { place }: RunInput): RunFind
       given: shownQuantity(taken.given),
       stock: stockText(taken),
       concentration: initial === undefined ? null : shown(initial.value, standardUncertainty(initial), concentration),
-      limiting: amounts.limiting === taken.species.key,
+      limiting: amounts.limiting !== null && isOrGives(taken, amounts.limiting),
       place: place(taken.origin),
     };
   });
+}
+
+/** Whether what was taken is a species, or gives it in water as an ion. */
+function isOrGives({ species, ions }: Run["taken"][number], key: string): boolean {
+  if (species.key === key) return true;
+  const given = ions?.map((ion) => ion.key) ?? ionsOf(species.formula?.text ?? "")?.map((ion) => ion.key) ?? [];
+  return given.includes(key);
 }
 
 /** `0.5000(50) mol L^-1`, `30 % by mass`. */
@@ -123,6 +132,7 @@ function contextOf(
 }
 
 function followFinding(
+  run: Run,
   follow: Follow,
   read: ReadSignal | null,
   context: EndContext | null,
@@ -138,6 +148,7 @@ function followFinding(
     timeColumn: read?.timeColumn ?? null,
     points: read?.points ?? 0,
     used: context === null ? 0 : context.signal.time.length,
+    details: followDetails(run, follow),
     sources: context === null ? [] : sourcesOf(context),
     ...(input.curves && context !== null && read !== null ? followCurves(context, read, input.place) : {}),
   };

@@ -19,7 +19,8 @@ export type ResolvedEnd =
       readonly value: number;
       readonly u: number | null;
     }
-  | { readonly kind: "fixed"; readonly value: Uncertain };
+  /** `raw`: a reading of the instrument, which shares the common causes of the column */
+  | { readonly kind: "fixed"; readonly value: Uncertain; readonly raw?: boolean };
 
 export interface EndContext {
   readonly run: Run;
@@ -42,13 +43,14 @@ export function resolveStart(context: EndContext, wish: EndPoint): ResolvedEnd |
 }
 
 /**
- * The infinity: fixed at its stated value, else by stoichiometry; by stoichiometry too where nothing is said and the
- * followed species is the reactant that runs out of a reaction that does not go back; else free, within what
- * stoichiometry allows where that is known (see `slackOf`).
+ * The infinity of a law of first order in the species `of`: fixed at its stated value, else by stoichiometry; by
+ * stoichiometry too where nothing is said and `of` itself is followed; else free, within what stoichiometry allows where
+ * that is known (see `slackOf`). A law runs towards the end of its own species, be it one that never comes because
+ * another runs out first.
  */
-export function resolveInfinity(context: EndContext, wish: EndPoint): ResolvedEnd | Problem {
-  const { run, follow, stoichiometry } = context;
-  const exhausted = stoichiometry.limiting === follow.species.key && run.reaction?.reversible === false;
+export function resolveInfinity(context: EndContext, wish: EndPoint, of: string): ResolvedEnd | Problem {
+  const { follow, stoichiometry } = context;
+  const exhausted = follow.species.key === of && stoichiometry.limiting !== null;
   const reading = follow.readingAtInfinity;
   if (wish.kind === "measured" || (wish.kind === "default" && reading !== null)) {
     if (reading !== null) return measuredEnd(context, reading);
@@ -58,38 +60,44 @@ export function resolveInfinity(context: EndContext, wish: EndPoint): ResolvedEn
   if (wish.kind === "fixed") {
     if (wish.value !== null) return statedEnd(context, "infinity", wish.value, wish.origin, false);
     if (reading !== null) return statedEnd(context, "infinity", reading.value, reading.origin, true);
-    if (run.reaction?.reversible === true) {
-      return unknownEnd(context, "infinity", wish.origin, "the reaction goes back, so it does not come to a full end");
-    }
     if (exhausted) return { kind: "fixed", value: signalOf(context, exact(0)) };
-    const end = endConcentration(context);
+    const end = endConcentration(context, of);
     if (end !== null) return { kind: "fixed", value: signalOf(context, end) };
     const missing = stoichiometry.missing.map((key) => `nothing is stated of ${key}`).join(", ");
     return unknownEnd(context, "infinity", wish.origin, missing);
   }
   if (wish.kind === "default" && exhausted) return { kind: "fixed", value: signalOf(context, exact(0)) };
-  return { kind: "free", ...boundsOfInfinity(context, exhausted) };
+  return { kind: "free", ...boundsOfInfinity(context, of) };
 }
 
-/** The signal when the limiting reactant is used up, SI; null where it does not follow, or the reaction goes back. */
-export function stoichiometricInfinity(context: EndContext): Uncertain | null {
-  if (context.run.reaction?.reversible !== false) return null;
-  const end = endConcentration(context);
+/** The signal when the limiting reactant `of` is used up, SI; null where it does not follow, or another is limiting. */
+export function stoichiometricInfinity(context: EndContext, of: string): Uncertain | null {
+  if (context.stoichiometry.limiting !== of) return null;
+  const end = endConcentration(context, of);
   return end === null ? null : signalOf(context, end);
 }
 
-/** Concentration of the followed species when the limiting reactant is used up. */
-function endConcentration({ run, follow, stoichiometry }: EndContext): Uncertain | null {
-  const initial = stoichiometry.initial.get(follow.species.key);
-  const number = run.reaction?.numbers.get(follow.species.key);
-  if (initial === undefined || number === undefined || stoichiometry.greatestExtent === null) return null;
-  return plusTimes(initial, number, stoichiometry.greatestExtent);
+/** The signal at the start by what was taken, SI; null where nothing is stated of the followed species. */
+export function stoichiometricStart(context: EndContext): Uncertain | null {
+  const initial = context.stoichiometry.initial.get(context.follow.species.key);
+  return initial === undefined ? null : signalOf(context, initial);
 }
 
-function boundsOfInfinity(context: EndContext, exhausted: boolean): { low: number; high: number } {
+/** Concentration of the followed species when the species `of` is used up. */
+function endConcentration({ run, follow, stoichiometry }: EndContext, of: string): Uncertain | null {
+  if (follow.species.key === of) return exact(0);
+  const initial = stoichiometry.initial.get(follow.species.key);
+  const number = run.reaction?.numbers.get(follow.species.key);
+  const ofInitial = stoichiometry.initial.get(of);
+  const ofNumber = run.reaction?.numbers.get(of);
+  if (initial === undefined || number === undefined || ofInitial === undefined || ofNumber === undefined) return null;
+  return plusTimes(initial, -number / ofNumber, ofInitial);
+}
+
+function boundsOfInfinity(context: EndContext, of: string): { low: number; high: number } {
   const { run, follow } = context;
   const none = { low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
-  const end = exhausted ? exact(0) : endConcentration(context);
+  const end = context.stoichiometry.limiting === of ? endConcentration(context, of) : null;
   const number = run.reaction?.numbers.get(follow.species.key) ?? 0;
   if (end === null || number === 0) return none;
   const limit = signalOf(context, end);
@@ -133,7 +141,7 @@ function statedEnd(
   if (wrong !== null) return wrong;
   const u = combined(quantity.sources);
   const stated: Uncertain = { value: quantity.value, causes: new Map(u === null ? [] : [[`${end} stated`, u]]) };
-  return { kind: "fixed", value: raw ? plusTimes(stated, -1, blankOf(context)) : stated };
+  return { kind: "fixed", value: raw ? plusTimes(stated, -1, blankOf(context)) : stated, raw };
 }
 
 /** A reading at infinity counts as an observation with its uncertainty; without one, as one reading more. */

@@ -1,7 +1,6 @@
 import type { Problem } from "../contract/problem.js";
 import { firstOrderModel } from "../law/firstOrder.js";
 import { fitLeastSquares, type LeastSquaresFit, type SeparableModel, sensitivities } from "../numerics/leastSquares.js";
-import { scatter } from "../numerics/noise.js";
 import type { FitWish } from "../study/run.js";
 import { type EndContext, isProblem, type ResolvedEnd, resolveInfinity, resolveStart } from "./endPoints.js";
 import { type FitData, refuseAfter, refuseBefore, refuseBeyond } from "./fitRefusals.js";
@@ -40,11 +39,13 @@ export interface Observed {
 export function fitFirstOrder(
   context: EndContext,
   wish: FitWish,
+  /** key of the species the order is in */
+  of: string,
   stopped: () => boolean,
 ): FirstOrderFit | { refused: Refusal; used: UsedReadings } | { problem: Problem; used: UsedReadings } {
   const used = usedReadings(context, wish);
   const start = resolveStart(context, wish.start);
-  const infinity = resolveInfinity(context, wish.infinity);
+  const infinity = resolveInfinity(context, wish.infinity, of);
   if (isProblem(start)) return { problem: start, used };
   if (isProblem(infinity)) return { problem: infinity, used };
   const number = context.run.reaction?.numbers.get(context.follow.species.key) ?? 0;
@@ -59,8 +60,7 @@ export function fitFirstOrder(
   if (before !== null) return { refused: before, used };
   const measured = infinity.kind === "measured";
   const model = firstOrderModel(used.time, parameterOf("start", start), parameterOf("infinity", infinity), measured);
-  const observed = observedOf(context, used, infinity);
-  const fit = fitLeastSquares(observed.value, observed.weights, model, { stopped });
+  const { observed, fit } = fitted(used, infinity, model, stopped);
   const after = refuseAfter(data, fit, fit.values[0] ?? 0, fit.values[1] ?? 0);
   const beyond = after ?? (fit.bound[1] === null ? null : refuseBeyond(data, fit, unbounded(used, start, stopped)));
   if (beyond !== null) return { refused: beyond, used };
@@ -69,24 +69,50 @@ export function fitFirstOrder(
 }
 
 /**
- * The readings, and a measured infinity as one observation more with its own uncertainty; where the readings state none
- * the scatter of the readings stands for theirs, and an infinity without one weighs as one reading.
+ * The readings, and a measured infinity as one observation more with its own uncertainty. Where the readings state none,
+ * their standard deviation about the curve stands for it, so the fit is repeated until that has settled; an infinity
+ * without an uncertainty weighs as one reading.
  */
-function observedOf({ signal }: EndContext, used: UsedReadings, infinity: ResolvedEnd): Observed {
-  if (infinity.kind !== "measured") return used;
+function fitted(
+  used: UsedReadings,
+  infinity: ResolvedEnd,
+  model: SeparableModel,
+  stopped: () => boolean,
+): { observed: Observed; fit: LeastSquaresFit } {
   const n = used.value.length;
+  const fitOf = (observed: Observed) => ({
+    observed,
+    fit: fitLeastSquares(observed.value, observed.weights, model, { stopped }),
+  });
+  if (infinity.kind !== "measured") return fitOf(used);
   const value = new Float64Array(n + 1);
   value.set(used.value);
   value[n] = infinity.value;
-  const weights = new Float64Array(n + 1).fill(1);
-  if (used.weights !== null) weights.set(used.weights);
-  const typical = used.weights === null ? scatter(signal.time, signal.value) : null;
-  const mean = used.weights === null ? 1 : used.weights.reduce((sum, w) => sum + w, 0) / Math.max(1, n);
-  if (infinity.u === null || infinity.u === 0) weights[n] = mean;
-  else if (used.weights !== null) weights[n] = 1 / (infinity.u * infinity.u);
-  else weights[n] = typical === null ? 1 : (typical * typical) / (infinity.u * infinity.u);
-  return { value, weights };
+  const u = infinity.u === 0 ? null : infinity.u;
+  const mean = used.weights === null ? 1 : used.weights.reduce((sum, w) => sum + w, 0) / n;
+  const weighed = (last: number): Observed => {
+    const weights = new Float64Array(n + 1).fill(1);
+    if (used.weights !== null) weights.set(used.weights);
+    weights[n] = last;
+    return { value, weights };
+  };
+  if (u === null) return fitOf(weighed(mean));
+  if (used.weights !== null) return fitOf(weighed(1 / (u * u)));
+  let result = fitOf(weighed(1));
+  for (let round = 0; round < mostRounds; round++) {
+    const before = result.observed.weights?.[n] ?? 1;
+    const parameters = result.fit.values.length - 1;
+    const squares = result.fit.residuals.subarray(0, n).reduce((sum, r) => sum + r * r, 0);
+    const variance = squares / Math.max(1, n - parameters);
+    const weight = Math.max(variance, 1e-30 * u * u) / (u * u);
+    result = fitOf(weighed(weight));
+    if (Math.abs(weight - before) <= 1e-6 * weight) break;
+  }
+  return result;
 }
+
+/** Rounds after which the weight of a measured infinity has settled; each brings it about a digit nearer. */
+const mostRounds = 25;
 
 /** The same fit with nothing known of the infinity. */
 function unbounded(used: UsedReadings, start: ResolvedEnd, stopped: () => boolean): LeastSquaresFit {
@@ -163,7 +189,9 @@ function commonShifts(
   }
   [start, infinity].forEach((end, which) => {
     if (end.kind !== "fixed") return;
-    for (const [name, size] of end.value.causes) {
+    const ofColumn = end.raw === true ? signal.common.filter(({ name }) => name !== "blank") : [];
+    const causes = [...end.value.causes, ...ofColumn.map(({ name, of }) => [name, of(end.value.value)] as const)];
+    for (const [name, size] of causes) {
       const column = basis[which] as Float64Array;
       for (let i = 0; i < n; i++) add(name, i, -size * (column[i] as number));
       const direct = own.get(name) ?? [0, 0, 0];

@@ -17,7 +17,7 @@ export interface FitData {
 }
 
 /** Why readings cannot carry a fit at all, seen before it is tried; null where they may. */
-export function refuseBefore({ time, value, wanted }: FitData): Refusal | null {
+export function refuseBefore({ time, value, wanted, direction, species }: FitData): Refusal | null {
   const different = differentTimes(time);
   const need = wanted + 1;
   if (value.length < need || different < wanted) {
@@ -25,6 +25,17 @@ export function refuseBefore({ time, value, wanted }: FitData): Refusal | null {
     const remedy = `Use ${need} readings or more: widen the window, or read more often.`;
     return refusal("refused", `${count} cannot determine ${wanted} parameters and their scatter`, remedy);
   }
+  const first = time[0] as number;
+  const last = time[time.length - 1] as number;
+  if (first > mostSpansAway * (last - first)) {
+    return refusal(
+      "refused",
+      "the readings begin so long after time zero that nothing can be said of the signal there",
+      "Say when the reaction began, below the data line: time zero, with that time of the file.",
+    );
+  }
+  const trend = trendOf(time, value);
+  if (direction !== 0 && trend !== 0 && trend !== direction) return wrongWay(trend, direction, species);
   if (value.every((reading) => reading === value[0])) {
     return refusal(
       "refused",
@@ -33,6 +44,38 @@ export function refuseBefore({ time, value, wanted }: FitData): Refusal | null {
     );
   }
   return null;
+}
+
+/** Spans of the readings that time zero may lie before the first of them. */
+const mostSpansAway = 20;
+
+/** +1 or −1 where a straight line through the readings plainly rises or falls (t above 6), else 0. */
+function trendOf(time: Float64Array, value: Float64Array): number {
+  const n = time.length;
+  const meanTime = time.reduce((sum, t) => sum + t, 0) / n;
+  const meanValue = value.reduce((sum, y) => sum + y, 0) / n;
+  let products = 0;
+  let squares = 0;
+  for (let i = 0; i < n; i++) {
+    const off = (time[i] as number) - meanTime;
+    products += off * ((value[i] as number) - meanValue);
+    squares += off * off;
+  }
+  const slope = products / squares;
+  const left = value.reduce((sum, y, i) => {
+    const r = y - meanValue - slope * ((time[i] as number) - meanTime);
+    return sum + r * r;
+  }, 0);
+  const u = Math.sqrt(left / Math.max(1, n - 2) / squares);
+  return Math.abs(slope) > 6 * u ? Math.sign(slope) : 0;
+}
+
+function wrongWay(went: number, should: number, species: string): Refusal {
+  return refusal(
+    "refused",
+    `the signal ${went > 0 ? "rises" : "falls"}, but the reaction ${should > 0 ? "forms" : "uses up"} ${species}`,
+    "Check the column, what is followed and how the reaction is written.",
+  );
 }
 
 /** How many times differ; times ascend. */
@@ -48,13 +91,7 @@ export function refuseAfter(data: FitData, fit: LeastSquaresFit, start: number, 
   if (flat !== null) return flat;
   const change = infinity - start;
   if (data.direction !== 0 && change * data.direction < 0) {
-    const went = change > 0 ? "rises" : "falls";
-    const should = data.direction > 0 ? "forms" : "uses up";
-    return refusal(
-      "refused",
-      `the signal ${went}, but the reaction ${should} ${data.species}`,
-      "Check the column, what is followed and how the reaction is written.",
-    );
+    return wrongWay(Math.sign(change), data.direction, data.species);
   }
   if (fit.stop === "limit" || fit.stop === "stopped") {
     return refusal("limit", "the fit did not converge", "Narrow the window, or fix the start or the infinity.");

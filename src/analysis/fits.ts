@@ -47,8 +47,9 @@ function fitOf(
   input: RunInput,
   notes: Notes,
 ): FitOutcome {
-  const { run, signal } = context;
-  const result = fitFirstOrder(context, wish, input.stopped);
+  const { run, signal, stoichiometry } = context;
+  if (run.reaction?.reversible === true) return refuse(run, wish, empty, goesBack, notes);
+  const result = fitFirstOrder(context, wish, species.key, input.stopped);
   const started = { ...empty, ...usedFinding(context, result.used) };
   if ("problem" in result) {
     note(notes, wish.id, result.problem);
@@ -58,12 +59,23 @@ function fitOf(
   const units = resultUnits(run, signal.timeUnit, signal.unit);
   const judged = judgeFit(context, wish, species, result, started, units, notes, input.stopped);
   if ("reason" in judged) return refuse(run, wish, started, judged, notes);
+  const { limiting } = stoichiometry;
+  if (limiting !== null && limiting !== species.key) {
+    note(notes, wish.id, problem("fit-order-not-limiting", { species: species.key, limiting }, lineIn(run, wish)));
+  }
   const { estimates, finding } = judged;
   const change = estimates.infinity.value - estimates.start.value;
   if (!input.curves) return { finding, change };
   const curve = curveOf(context, result, estimates);
   return { finding: { ...finding, curve, residuals: residualCurve(context, result) }, change };
 }
+
+/** A reaction that goes back relaxes with the sum of both rate constants, which is neither. */
+const goesBack: Refusal = {
+  stop: "refused",
+  reason: "the reaction goes back, so the readings give the sum of both rate constants, which is not split yet",
+  remedy: "Write -> in the reaction where the way back does not count.",
+};
 
 function usedFinding(
   { signal }: EndContext,

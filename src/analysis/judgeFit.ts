@@ -1,5 +1,6 @@
 import { problem } from "../contract/problem.js";
 import { halfLife } from "../law/firstOrder.js";
+import { chiSquareTail } from "../numerics/distributions.js";
 import { expm1, log } from "../numerics/elementary.js";
 import { fromSI } from "../quantity/conversion.js";
 import { formatNumber, formatQuantity } from "../quantity/formatNumber.js";
@@ -7,6 +8,7 @@ import type { Species } from "../study/reaction.js";
 import type { FitWish } from "../study/run.js";
 import { type EndContext, stoichiometricInfinity } from "./endPoints.js";
 import { type Estimates, estimatesOf } from "./estimates.js";
+import { sayDifferences } from "./fitDifferences.js";
 import type { FirstOrderFit } from "./fitFirstOrder.js";
 import { refuseUndetermined } from "./fitRefusals.js";
 import type { FitFinding, Refusal } from "./fitResult.js";
@@ -39,7 +41,9 @@ export function judgeFit(
   const kPrime = estimates.kPrime.value;
   const life = halfLife(kPrime);
   const u = totalUncertainty(estimates.kPrime);
+  const first = used.time[0] ?? 0;
   const last = used.time[used.time.length - 1] ?? 0;
+  const halfLives = (kPrime * (last - first)) / log(2);
   const finding: FitFinding = {
     ...empty,
     degreesOfFreedom: fit.degreesOfFreedom,
@@ -62,8 +66,9 @@ export function judgeFit(
     stop: estimates.infinity.bound === null ? "converged" : "bound",
     verdict: "",
   };
-  warn(context, wish, result, estimates, finding, notes);
-  const verdict = verdictOf(finding, (kPrime * last) / log(2)) + besideVerdict(context, result);
+  warn(context, wish, result, estimates, finding, halfLives, notes);
+  sayDifferences(context, wish, species.key, result, estimates, notes);
+  const verdict = verdictOf(finding, halfLives) + besideVerdict(context, species.key, result);
   return { finding: { ...finding, verdict }, estimates };
 }
 
@@ -108,14 +113,13 @@ function budgetOf({ common, used }: FirstOrderFit, { kPrime }: Estimates): FitFi
 function warn(
   { signal, run }: EndContext,
   wish: FitWish,
-  { infinity, used }: FirstOrderFit,
+  { infinity, fit, used }: FirstOrderFit,
   estimates: Estimates,
   finding: FitFinding,
+  halfLives: number,
   notes: Notes,
 ): void {
   const place = lineIn(run, wish);
-  const last = used.time[used.time.length - 1] ?? 0;
-  const halfLives = (estimates.kPrime.value * last) / log(2);
   if (infinity.kind === "free" && halfLives < 3) {
     const share = (100 * (totalUncertainty(estimates.kPrime) ?? 0)) / estimates.kPrime.value;
     const args = { halfLives: halfLives.toFixed(1), percent: `${share.toPrecision(2)} %` };
@@ -125,6 +129,17 @@ function warn(
   if (estimates.infinity.bound !== null) {
     const limit = formatQuantity(fromSI(estimates.infinity.value, signal.unit), null, signal.unit.text);
     note(notes, wish.id, problem("fit-infinity-at-bound", { limit }, place));
+  }
+  const p = used.weights === null ? null : chiSquareTail(fit.chiSquare, fit.degreesOfFreedom);
+  if (p !== null && finding.reducedChiSquare !== null && (p < 0.001 || p > 0.999)) {
+    const args = { chiSquare: finding.reducedChiSquare.toPrecision(3) };
+    note(notes, wish.id, problem(p < 0.001 ? "fit-scatter-large" : "fit-scatter-small", args, place));
+  }
+  const first = used.time[0] ?? 0;
+  if (first > (used.time[used.time.length - 1] ?? 0) - first) {
+    const { timeUnit } = signal;
+    const args = { first: formatQuantity(fromSI(first, timeUnit), null, timeUnit.text) };
+    note(notes, wish.id, problem("time-zero-far", args, place));
   }
   const runs = finding.tests.find(({ name }) => name === "runs test");
   if (runs?.p !== undefined && runs.p !== null && runs.p < 0.01 && runs.statistic < 0) {
@@ -147,8 +162,8 @@ function verdictOf(finding: FitFinding, halfLives: number): string {
 }
 
 /** What stands beside a verdict: the infinity by stoichiometry where another was fitted, and a doubt about the equation. */
-function besideVerdict(context: EndContext, { infinity }: FirstOrderFit): string {
-  const end = infinity.kind === "fixed" ? null : stoichiometricInfinity(context);
+function besideVerdict(context: EndContext, of: string, { infinity }: FirstOrderFit): string {
+  const end = infinity.kind === "fixed" ? null : stoichiometricInfinity(context, of);
   const { unit } = context.signal;
   const said =
     end === null ? "" : ` By stoichiometry the infinity is ${shown(end.value, standardUncertainty(end), unit).text}.`;

@@ -1,6 +1,7 @@
 import type { Q, Run as RunFinding } from "../contract/findings.js";
 import { problem } from "../contract/problem.js";
 import { chooseBandwidth } from "../numerics/bandwidthChoice.js";
+import { log } from "../numerics/elementary.js";
 import { type LocalFit, localSlope } from "../numerics/localRegression.js";
 import { scatter } from "../numerics/noise.js";
 import { fromSI } from "../quantity/conversion.js";
@@ -91,8 +92,11 @@ function withSlope(work: RateWork, none: RateFinding, slope: Slope | null): Rate
   const { run, follow, relation, signal } = work.context;
   const [value, u] = valueAndUncertainty(work, slope);
   const number = run.reaction?.numbers.get(follow.species.key) ?? 1;
+  // The slope of the relation is a common cause of v and of the loss of the species, not of the rate of the signal.
+  const shares = [...relation.causes.values()].map((share) => share * value);
+  const uOfSpecies = u === null && shares.length === 0 ? null : rootOfSquares([u ?? 0, ...shares]);
   const per = (divisor: number): Q =>
-    shown(value / divisor, u === null ? null : u / Math.abs(divisor), work.units.rate);
+    shown(value / divisor, uOfSpecies === null ? null : uOfSpecies / Math.abs(divisor), work.units.rate);
   const inTime = (t: number): number => fromSI(t, signal.timeUnit);
   const inSignal = (s: number): number => fromSI(s, signal.unit);
   const { mark } = slope;
@@ -237,8 +241,17 @@ function initialSlope(work: RateWork, wish: RateWish): Slope | null {
     tooFew(work.context, work.notes, wish, new Set(readings[0]).size, fewest);
     return null;
   }
-  return polynomialSlope(fit, localSlope(...readings, at, { ...options, degree: 3 }), at, [at, end]);
+  const slope = polynomialSlope(fit, null, at, [at, end]);
+  const left = Math.max(0.05, 1 - covered);
+  return { ...slope, bend: fit.slope * bendOfDecay * log(left) * log(left) };
 }
+
+/**
+ * What a parabola over the first readings misses of the bend of a decay, as a share of the slope over (k h)², h the time
+ * it spans: the parabola of least squares through t³/6 on [0, h] has the slope −0.1 h² at 0, and the third derivative is
+ * k² times the first for order 1, up to three times that for order 2; twice the first stands for both.
+ */
+const bendOfDecay = 0.2;
 
 function spread(value: Float64Array): number {
   let low = Number.POSITIVE_INFINITY;

@@ -1,6 +1,7 @@
 import { type Problem, problem } from "../contract/problem.js";
 import { cellProblems, rowProblems, timeProblems } from "../data/columnProblems.js";
-import type { Columns } from "../data/columns.js";
+import type { Column, Columns } from "../data/columns.js";
+import { rowOfLine } from "../data/rowOfLine.js";
 import type { CommonCause, Signal } from "../monitor/signal.js";
 import { fromSI, intervalToSI, toSI } from "../quantity/conversion.js";
 import { sameDimension } from "../quantity/dimension.js";
@@ -50,22 +51,23 @@ export function readSignal(run: Run, follow: Follow, file: Columns, notes: Notes
     return null;
   }
   if (!sayWhatIsWrong(run, follow, file, time, readings, notes)) return null;
-  const left = excludedRows(run, file, time);
-  const rows = usableRows(time.values, readings.values, left);
+  const left = excludedRows(run, follow, file, time, notes);
   const zero = run.data.timeZero;
+  const begun = zero === null ? 0 : fileTime(zero.value, zero.clock, file.columns[time.index]);
+  const rows = afterZero(run, follow, usableRows(time.values, readings.values, left), time, begun, notes);
   const blank = blankOf(follow, readings.unit, notes);
   const readingAt = (row: number): number => {
     return toSI(readings.values[row] as number, readings.unit as Unit) - (blank?.value ?? 0);
   };
   const timeAt = (row: number): number => {
-    return toSI(time.values[row] as number, time.unit as Unit) - (zero?.value.value ?? 0);
+    return toSI(time.values[row] as number, time.unit as Unit) - begun;
   };
   const value = Float64Array.from(rows, readingAt);
   const signal: Signal = {
     time: Float64Array.from(rows, timeAt),
     uTimeZero: zero === null ? null : combined(zero.value.sources),
     value,
-    random: randomOf(follow, readings, value, notes),
+    random: randomOf(follow, readings, value, blank?.value ?? 0, notes),
     common: [...commonOf(follow, readings, value, notes), ...blankCause(blank, value.length)],
     timeUnit: time.unit as Unit,
     unit: readings.unit,
@@ -135,20 +137,72 @@ function withDecimalOption(run: Run, found: Problem): Problem {
 }
 
 /** Rows that the description leaves out, by the line of the file or by a span of its times; each with what leaves it out. */
-function excludedRows(run: Run, file: Columns, time: FoundColumn): ReadonlyMap<number, Exclusion> {
+function excludedRows(
+  run: Run,
+  follow: Follow,
+  file: Columns,
+  time: FoundColumn,
+  notes: Notes,
+): ReadonlyMap<number, Exclusion> {
   const rows = new Map<number, Exclusion>();
   for (const exclusion of run.data?.exclusions ?? []) {
-    const { value } = exclusion;
-    for (let row = 0; row < file.rows; row++) {
-      if ("line" in value) {
-        if (file.lines[row] === value.line) rows.set(row, exclusion);
-        continue;
-      }
-      const t = toSI(time.values[row] as number, time.unit as Unit);
-      if (t >= value.from.value && t <= value.to.value) rows.set(row, exclusion);
-    }
+    const before = rows.size;
+    for (const row of excludedBy(exclusion, file, time)) rows.set(row, exclusion);
+    if (rows.size > before) continue;
+    const what = "line" in exclusion.value ? `line ${exclusion.value.line}` : "this span of the file's times";
+    const found = problem("exclude-nothing", { file: run.data?.path ?? "", what }, exclusion.origin);
+    note(notes, follow.id, isWithin(run, exclusion.origin) ? found : { ...found, origin: dataOrigin(run, null) });
   }
   return rows;
+}
+
+function excludedBy({ value }: Exclusion, file: Columns, time: FoundColumn): number[] {
+  if ("line" in value) {
+    const row = rowOfLine(file, value.line);
+    return row === null ? [] : [row];
+  }
+  const column = file.columns[time.index];
+  const from = fileTime(value.from, value.clock, column);
+  const to = fileTime(value.to, value.clock, column);
+  const rows: number[] = [];
+  for (let row = 0; row < file.rows; row++) {
+    const t = toSI(time.values[row] as number, time.unit as Unit);
+    if (t >= from && t <= to) rows.push(row);
+  }
+  return rows;
+}
+
+const day = 86_400;
+
+/**
+ * A time of the description as a time of the file, s: a clock time beside a column of dates or clock times counts from
+ * the first of them, within half a day before or after; everything else is the file's own time.
+ */
+function fileTime({ value }: Quantity, clock: boolean, column: Column | undefined): number {
+  const start = column?.time ?? null;
+  if (!clock || start === null) return value;
+  const since = value - start.seconds;
+  return since <= -day / 2 ? since + day : since > day / 2 ? since - day : since;
+}
+
+/** The rows from time zero on; those before it, where the description sets it, are no readings of the reaction. */
+function afterZero(
+  run: Run,
+  follow: Follow,
+  rows: Uint32Array,
+  time: FoundColumn,
+  begun: number,
+  notes: Notes,
+): Uint32Array {
+  const zero = run.data?.timeZero ?? null;
+  if (zero === null) return rows;
+  const kept = rows.filter((row) => toSI(time.values[row] as number, time.unit as Unit) >= begun);
+  const origin = isWithin(run, zero.origin) ? zero.origin : dataOrigin(run, null);
+  if (kept.length === 0 && rows.length > 0) note(notes, follow.id, problem("time-zero-late", {}, origin));
+  else if (kept.length < rows.length) {
+    note(notes, follow.id, problem("readings-before-zero", { count: rows.length - kept.length }, origin));
+  }
+  return kept;
 }
 
 /** Rows with both a time and a reading, down to the first that goes back in time: what follows may be another run. */
@@ -166,17 +220,24 @@ function usableRows(time: Float64Array, readings: Float64Array, excluded: Readon
 }
 
 /** Random standard uncertainty of each reading; null where none is stated or it cannot serve as a weight. */
-function randomOf(follow: Follow, readings: FoundColumn, value: Float64Array, notes: Notes): Float64Array | null {
+function randomOf(
+  follow: Follow,
+  readings: FoundColumn,
+  value: Float64Array,
+  /** what was taken off the readings: a share is one of what the instrument shows */
+  blank: number,
+  notes: Notes,
+): Float64Array | null {
   const { random } = readings.fact;
   if (random === null || random.value.value === 0) return null;
   const size = sizeOf(follow, readings.fact, readings.unit as Unit, random, notes);
   if (size === null) return null;
   if (size.kind === "offset") return new Float64Array(value.length).fill(size.u);
-  if (value.some((reading) => reading === 0)) {
+  if (value.some((reading) => reading + blank === 0)) {
     note(notes, follow.id, problem("uncertainty-of-zero", { column: follow.column }, random.origin));
     return null;
   }
-  return value.map((reading) => Math.abs(reading) * size.u);
+  return value.map((reading) => Math.abs(reading + blank) * size.u);
 }
 
 /** The blank, where it is in a unit that can be taken off the readings. */

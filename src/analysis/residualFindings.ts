@@ -15,12 +15,15 @@ export function residualFindings({ fit, used }: FirstOrderFit, unit: Unit): Resi
   const residuals = fit.residuals.subarray(0, used.value.length);
   const squares = residuals.reduce((sum, residual) => sum + residual * residual, 0);
   const standardised = weights === null ? residuals : residuals.map((r, i) => r * Math.sqrt(weights[i] ?? 1));
+  // Residuals of the size of rounding say nothing of the readings.
+  const size = used.value.reduce((sum, reading) => sum + reading * reading, 0);
+  const isRounding = squares <= 1e-20 * size;
   return {
     residual: left > 0 ? shown(Math.sqrt(squares / left), null, unit) : null,
     reducedChiSquare: weights === null || left <= 0 ? null : fit.chiSquare / left,
     aicc: correctedAkaike(fit.chiSquare, fit.residuals.length, fit.free.length, weights !== null),
-    tests: residualTests(standardised),
-    correlation: lagOneCorrelation(standardised),
+    tests: isRounding ? [] : residualTests(standardised),
+    correlation: isRounding ? null : lagOneCorrelation(standardised),
   };
 }
 

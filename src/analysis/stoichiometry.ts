@@ -30,8 +30,12 @@ export function standardUncertainty({ causes }: Uncertain): number | null {
 
 /** Concentration in the mixture of what a `taken` line states, mol m⁻³; null where the volume or the formula lacks. */
 export function takenConcentration(run: Run, taken: Taken): Uncertain | null {
-  const { given } = taken;
+  const { given, species } = taken;
   if (isKind(given.unit, "concentration")) return stated(taken, given);
+  if (isKind(given.unit, "massConcentration")) {
+    const molar = molarMassOf(species);
+    return molar === null ? null : quotient(stated(taken, given), named(`molar mass of ${species.key}`, molar));
+  }
   if (run.volume === null) return null;
   const amount = amountTaken(taken);
   return amount === null ? null : quotient(amount, named("volume", run.volume.value));

@@ -83,6 +83,8 @@ export interface Run extends Item {
     timeColumn: string | null;
     points: number;
     used: number;
+    /** what else the description says of the signal, ready to show: `["blank", "1.20(10) mL"]`, `["left out", "line 17: bubble"]` */
+    details: { name: string; text: string }[];
     sources: { name: string; kind: "common" | "random"; u: Q }[]; // what the uncertainty is made of
     signal?: Block;
     time?: Block;

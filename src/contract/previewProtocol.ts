@@ -85,6 +85,8 @@ export interface PlotMark {
   readonly label: string;
   /** where a tangent touches; null for a chord */
   readonly at: { readonly t: number; readonly y: number } | null;
+  /** where its number stands, and how far aside, px */
+  readonly number: { readonly t: number; readonly y: number; readonly dx: number; readonly dy: number };
 }
 
 export interface PlotResidual {

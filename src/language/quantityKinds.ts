@@ -42,10 +42,17 @@ export const quantityKinds = {
       "amount",
       "mass",
       "volume",
+      "massConcentration",
     ),
   ),
   stock: notNegative(
-    of("The stock", "the strength of the stock, such as 0.500 mol/L or 30 % by mass,", "concentration", "number"),
+    of(
+      "The stock",
+      "the strength of the stock, such as 0.500 mol/L or 30 % by mass,",
+      "concentration",
+      "massConcentration",
+      "number",
+    ),
   ),
   purity: { ...positive(of("Purity", "a purity, such as 98 %,", "number")), ofWhole: true },
   density: {

@@ -7,9 +7,12 @@ import { isFault, shifted } from "../quantity/shifted.js";
 import { checkQuantity } from "./checkQuantity.js";
 import { describeParts, firstWords } from "./describePart.js";
 import type { Token } from "./lexer.js";
+import { isName } from "./name.js";
 import type { Part } from "./shape.js";
 import { type StatementRow, statementByHead } from "./statements.js";
 import type { Field, OrderTerm } from "./syntax.js";
+import { endOfWords } from "./unitWords.js";
+import { isDate, otherDates } from "./writtenDate.js";
 
 /** Where the reading of a line stands. */
 export interface Cursor {
@@ -278,14 +281,6 @@ function readJoin(cursor: Cursor): OrderTerm["joined"] | null {
   return "then";
 }
 
-const connectives = new Set(
-  "in from as at to of is by like using and with after within reads purity density giving".split(" "),
-);
-
-function isName(text: string): boolean {
-  return !connectives.has(text) && /^[\p{L}\p{N}_\-′']+$/u.test(text);
-}
-
 function readName(cursor: Cursor, label: string, what: string, token: Token): void {
   if (!isName(token.text)) {
     const bare = token.text.replace(/[:;.]+$/, "");
@@ -302,12 +297,17 @@ function readPlainNumber(cursor: Cursor, label: string, token: Token, part: Part
   } else if (number.end < token.text.length) {
     wantedButFound(cursor, [part], null, token);
   } else {
+    if (number.u !== null) {
+      const bare = token.text.replace(/\(.*\)/, "");
+      const args = { text: token.text, number: bare };
+      cursor.fault = fault("number-with-uncertainty", args, token, [replacement(token, bare)]);
+    }
     keep(cursor, label, { kind: "number", value: number.value, text: token.text, span: token });
   }
 }
 
 function readUnitWords(cursor: Cursor, label: string, token: Token): void {
-  const end = endOfWords(cursor, cursor.at);
+  const end = endOfWords(cursor.tokens, cursor.at);
   const written = slice(cursor, token, end);
   const reading = readUnit(written.text);
   cursor.at = end;
@@ -316,7 +316,7 @@ function readUnitWords(cursor: Cursor, label: string, token: Token): void {
 }
 
 function readQuantityWords(cursor: Cursor, part: Part & { part: "quantity" }, token: Token): void {
-  const end = endOfWords(cursor, cursor.at);
+  const end = endOfWords(cursor.tokens, cursor.at);
   const written = slice(cursor, token, end);
   const reading = readQuantity(written.text, part.label);
   cursor.at = end;
@@ -329,48 +329,6 @@ function readQuantityWords(cursor: Cursor, part: Part & { part: "quantity" }, to
   const unitSpan = reading.unit === null ? null : moved(reading.unit, token.start);
   const { quantity, basis } = reading;
   keep(cursor, part.label, { kind: "quantity", quantity, unitSpan, basis, ...written });
-}
-
-/** Words that end a quantity or a unit. `within` does not: it belongs to the quantity. */
-const stopWords = new Set("and to at in of by as density purity giving using reads because from".split(" "));
-
-/** The index behind the words of a quantity or unit that begins at `from`. Inside brackets no word ends it. */
-function endOfWords(cursor: Cursor, from: number): number {
-  let depth = 0;
-  let at = from;
-  for (; at < cursor.tokens.length; at++) {
-    const token = cursor.tokens[at] as Token;
-    const partOfIt = token.kind === "word" || (token.kind === "operator" && token.text === "±");
-    if (!partOfIt) break;
-    if (at > from && beginsBasis(cursor, at - 1)) continue;
-    if (depth === 0 && at > from && beginsNext(cursor, at)) break;
-    const ends = stopWords.has(token.text) || beginsHead(cursor, at);
-    if (at > from && depth === 0 && ends && !beginsBasis(cursor, at)) break;
-    for (const letter of token.text) depth += letter === "(" ? 1 : letter === ")" ? -1 : 0;
-  }
-  return at;
-}
-
-/** Whether a number begins something else: it stands behind a unit that is no part of a time such as `1 min 30 s`. */
-function beginsNext(cursor: Cursor, at: number): boolean {
-  const before = cursor.tokens[at - 1]?.text ?? "";
-  if (!/^\d+(\.\d+)?$/.test(cursor.tokens[at]?.text ?? "") || !/\p{L}$/u.test(before)) return false;
-  return !/^([\d.]*(d|h|hr|min|s|sec)|within|x|X)$/.test(before);
-}
-
-/** Whether a line's first word stands here; of a line of two fixed words (`molar mass`) both, or the first at the end. */
-function beginsHead(cursor: Cursor, at: number): boolean {
-  const row = statementByHead.get(cursor.tokens[at]?.text ?? "");
-  const second = row?.parts[0];
-  const next = cursor.tokens[at + 1];
-  return row !== undefined && (second?.part !== "keyword" || next?.text === second.word);
-}
-
-/** `by mass`, and behind a share whatever stands in its place: what it is a share of is a part of its unit. */
-function beginsBasis(cursor: Cursor, at: number): boolean {
-  const [before, by, basis] = [cursor.tokens[at - 1], cursor.tokens[at], cursor.tokens[at + 1]];
-  if (by?.text !== "by") return false;
-  return /(%|‰|ppm|ppb)$/.test(before?.text ?? "") || /^(mass|amount|volume)$/.test(basis?.text ?? "");
 }
 
 function wantedButFound(cursor: Cursor, parts: readonly Part[], row: StatementRow | null, found?: Token): void {
@@ -455,41 +413,4 @@ function closeQuote(token: Token) {
 function dateFault(token: Token): Fault {
   const mends = otherDates(token.text).map((date) => replacement(token, date));
   return fault("date-malformed", { found: token.text }, token, mends);
-}
-
-/** A date written another way: year first with other signs, or day and month first, which can be either. */
-function otherDates(text: string): string[] {
-  const [a = "", b = "", c = "", ...rest] = text.split(/[./-]/);
-  if (rest.length > 0 || ![a, b, c].every((part) => /^\d+$/.test(part))) return [];
-  const dates =
-    a.length === 4
-      ? [[a, b, c]]
-      : text.includes(".")
-        ? [[c, b, a]]
-        : [
-            [c, b, a],
-            [c, a, b],
-          ];
-  const written = dates.map((parts) => parts.map((part) => part.padStart(2, "0")).join("-"));
-  return [...new Set(written)].filter(isDate);
-}
-
-function isDate(text: string): boolean {
-  if (!/^\d{4}-\d{2}-\d{2}$/.test(text)) return false;
-  const [year, month, day] = text.split("-").map(Number) as [number, number, number];
-  const days = [
-    31,
-    (year % 4 === 0 && year % 100 !== 0) || year % 400 === 0 ? 29 : 28,
-    31,
-    30,
-    31,
-    30,
-    31,
-    31,
-    30,
-    31,
-    30,
-    31,
-  ];
-  return month >= 1 && month <= 12 && day >= 1 && day <= (days[month - 1] ?? 0);
 }

@@ -13,11 +13,17 @@ export function fitText(fit: Fit, index: number): string[] {
   const words = alignedTable(wordRows(fit), "    ");
   return [
     "",
-    `  fit ${index + 1}: ${fit.law}`,
+    `  fit ${index + 1}: ${fit.law}${windowWords(fit)}`,
     ...parameters,
     ...(words.length === 0 ? [] : ["", ...words]),
     ...(fit.verdict === "" ? [] : [...(parameters.length === 0 ? [] : [""]), ...wrappedText(fit.verdict, "    ")]),
   ];
+}
+
+/** The time span whose readings were used; two fits of one law differ by it. */
+function windowWords({ window, points }: Fit): string {
+  if (window === null) return "";
+  return `, ${points} readings from ${window[0].text} to ${window[1].text}`;
 }
 
 function parameterRows({ parameters, kPrime, halfLife }: Fit): string[][] {

@@ -4,7 +4,7 @@ import { curveParts } from "./curveParts.js";
 import { escapeHtml } from "./escape.js";
 import { markParts } from "./markParts.js";
 import type { Palette } from "./palette.js";
-import { type PictureContent, pictureContent, residualsOf } from "./pictureContent.js";
+import { type PictureContent, pictureContent, residualsOf, signalsOf } from "./pictureContent.js";
 import { pictureTitle, pictureWords } from "./pictureWords.js";
 import { type Box, extentOf, linearScale, px, type Scale } from "./plotFrame.js";
 import { readingParts, residualParts } from "./readingParts.js";
@@ -89,13 +89,6 @@ export function runPicture(run: Run, follow: Run["follow"][number], style: Pictu
     ...parts,
     "</svg>",
   ].join("");
-}
-
-/** What the signal axis must hold: readings, curves and marks; a wide band may leave it. */
-function* signalsOf({ readings, fits, rates }: PictureContent): Iterable<number | null> {
-  for (const { signal } of readings) yield signal;
-  for (const { curve } of fits) yield* curve.signal.values;
-  for (const { mark } of rates) yield* mark.signal;
 }
 
 function* timesOf({ readings, fits }: PictureContent): Iterable<number | null> {

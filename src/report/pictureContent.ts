@@ -94,3 +94,10 @@ function numbersIn(time: readonly (number | null)[], value: readonly (number | n
 function within([from, to]: NonNullable<Fit["window"]>, t: number): boolean {
   return t >= from.value && t <= to.value;
 }
+
+/** What the signal axis must hold: readings, curves and marks; a wide band may leave it. */
+export function* signalsOf({ readings, fits, rates }: PictureContent): Iterable<number | null> {
+  for (const { signal } of readings) yield signal;
+  for (const { curve } of fits) yield* curve.signal.values;
+  for (const { mark } of rates) yield* mark.signal;
+}

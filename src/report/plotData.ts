@@ -1,8 +1,8 @@
 import type { Run } from "../contract/findings.js";
-import type { Plot, PlotReading } from "../contract/previewProtocol.js";
+import type { Plot, PlotMark, PlotReading } from "../contract/previewProtocol.js";
 import { formatQuantity } from "../quantity/formatNumber.js";
 import { axisWords } from "./axisText.js";
-import { type PictureContent, pictureContent, residualsOf } from "./pictureContent.js";
+import { type PictureContent, pictureContent, residualsOf, signalsOf } from "./pictureContent.js";
 import { extentOf } from "./plotFrame.js";
 import { niceTicks } from "./ticks.js";
 
@@ -37,6 +37,9 @@ export function plotData(run: Run, follow: Follow, file: string | null): Plot | 
   const powers = plotPowers(run, follow);
   const time = (t: number): number => scaled(t, powers.time);
   const signal = (y: number): number => scaled(y, powers.signal);
+  // A band that is wider than all there is to see would press the readings flat: it is cut off beyond the picture.
+  const [lowest, highest] = extentOf(signalsOf(content), 0.3);
+  const kept = (y: number): number => Math.min(highest, Math.max(lowest, y));
   return {
     id: follow.id,
     timeUnit: content.timeUnit,
@@ -47,23 +50,11 @@ export function plotData(run: Run, follow: Follow, file: string | null): Plot | 
       curve.time.values.flatMap((t, index) => {
         const y = curve.signal.values[index];
         if (t === null || typeof y !== "number") return [];
-        const [low, high] = [curve.low.values[index] ?? y, curve.high.values[index] ?? y];
+        const [low, high] = [curve.low.values[index] ?? y, curve.high.values[index] ?? y].map(kept) as [number, number];
         return [{ t: time(t), y: signal(y), low: signal(low), high: signal(high), fit: `fit ${number}`, order }];
       }),
     ),
-    marks: content.rates.map(({ rate, number, mark }) => {
-      const [t, t2] = mark.time;
-      const [y, y2] = mark.signal;
-      const touch = rate.at?.value ?? t;
-      const at = { t: time(touch), y: signal(t2 === t ? y : y + ((touch - t) / (t2 - t)) * (y2 - y)) };
-      const chord = rate.kind === "average";
-      return {
-        ...{ t: time(t), y: signal(y), t2: time(t2), y2: signal(y2) },
-        kind: chord ? "chord" : "tangent",
-        label: String(number),
-        at: chord ? null : at,
-      };
-    }),
+    marks: content.rates.map((drawn) => markOf(drawn, time, signal)),
     residuals: residualsIn(content).map((one) => ({
       t: time(one.time),
       r: scaled(one.residual, powers.residual),
@@ -77,6 +68,26 @@ export function plotData(run: Run, follow: Follow, file: string | null): Plot | 
     }),
     fits: run.fits.filter((fit) => fit.follow === follow.id).map(({ id }) => id),
   };
+}
+
+/**
+ * A chord has its number at its middle, a tangent at its end, each on the side where a course that levels off leaves
+ * room.
+ */
+function markOf(
+  { rate, number, mark }: PictureContent["rates"][number],
+  time: (t: number) => number,
+  signal: (y: number) => number,
+): PlotMark {
+  const [t, t2] = mark.time.map(time) as [number, number];
+  const [y, y2] = mark.signal.map(signal) as [number, number];
+  const along = (share: number) => ({ t: t + share * (t2 - t), y: y + share * (y2 - y) });
+  const touch = rate.at === null || t2 === t ? 0 : (time(rate.at.value) - t) / (t2 - t);
+  const aside = y2 < y ? 1 : -1;
+  const ends = { t, y, t2, y2, label: String(number) };
+  return rate.kind === "average"
+    ? { ...ends, kind: "chord", at: null, number: { ...along(0.5), dx: 10, dy: -8 * aside } }
+    : { ...ends, kind: "tangent", at: along(touch), number: { ...along(1), dx: -4, dy: 12 * aside } };
 }
 
 function readingsOf(

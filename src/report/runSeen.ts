@@ -2,7 +2,7 @@ import type { Run } from "../contract/findings.js";
 import { type Html, html, nothing } from "./html.js";
 import { type Cell, factTable, headedTable, lineCell } from "./htmlTable.js";
 import { printedSpecies } from "./printedSpecies.js";
-import { printedQuantity } from "./printedText.js";
+import { printedQuantity, printedSentence } from "./printedText.js";
 import { readingsUsed } from "./readingsUsed.js";
 
 type Follow = Run["follow"][number];
@@ -30,6 +30,7 @@ function followed(run: Run, follow: Follow, figure: Figure): Html {
     ],
     ["readings", readingsUsed(follow), null],
   ];
+  for (const { name, text } of follow.details) rows.push([name, printedSentence(text), null]);
   for (const { name, kind, u } of follow.sources) {
     rows.push(["uncertainty", `${name}: ${printedQuantity(u)} (${kind})`, null]);
   }

@@ -36,6 +36,7 @@ function whatWasDone(run: Run): string[][] {
   for (const follow of run.follow) {
     const { species, monitor, column, sources } = follow;
     rows.push(["followed", `${species} as ${monitor} from column ${column}; readings: ${readingsUsed(follow)}`]);
+    for (const { name, text } of follow.details) rows.push([name, text]);
     for (const { name, kind, u } of sources) rows.push(["uncertainty", `${name}: ${u.text} (${kind})`]);
   }
   return rows;
@@ -49,8 +50,8 @@ function rateRows(run: Run): string[][] {
     return [rateName(rate), v, ofSpecies, ofSignal === ofSpecies ? "" : ofSignal];
   });
   if (rows.length === 0) return [];
-  const species = run.rates.find((rate) => rate.species !== null)?.species?.name ?? "";
-  const heads = ["", "v", `dc(${species})/dt`, "slope of the signal"];
+  const species = run.rates.find((rate) => rate.species !== null)?.species?.name;
+  const heads = ["", "v", species === undefined ? "" : `dc(${species})/dt`, "slope of the signal"];
   // The slope of a signal that is the concentration itself says nothing new.
   return [heads, ...rows].map((row) => row.filter((_, column) => column < 3 || rows.some((one) => one[column] !== "")));
 }

@@ -18,7 +18,11 @@ export interface ColumnFact {
 
 /** Readings that are left out, and why. Times are those of the file, s. */
 export type Exclusion = Fact<
-  { readonly reason: string } & ({ readonly line: number } | { readonly from: Quantity; readonly to: Quantity })
+  { readonly reason: string } & (
+    | { readonly line: number }
+    /** `clock`: clock times of the file's day, as 13:55:00 */
+    | { readonly from: Quantity; readonly to: Quantity; readonly clock: boolean }
+  )
 >;
 
 /** The data file of a run; `path` is as written, relative to the description. */
@@ -33,7 +37,7 @@ export interface DataFile {
   readonly skip: number | null;
   readonly encoding: string | null;
   readonly exclusions: readonly Exclusion[];
-  /** the file's time at which the reaction began, s */
-  readonly timeZero: Fact<Quantity> | null;
+  /** the file's time at which the reaction began, s; `clock`: written as a clock time, as 13:49:30 */
+  readonly timeZero: (Fact<Quantity> & { readonly clock: boolean }) | null;
   readonly origin: Origin;
 }

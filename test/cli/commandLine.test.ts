@@ -128,11 +128,12 @@ describe("ratewright report", () => {
     assert.ok(!plain.out.includes("NaN") && !plain.out.includes("Infinity"));
   });
 
-  it("goes on where diagnostics stand, and says them beside the report; status 1", async () => {
+  it("goes on where diagnostics stand, and says them in the report; status 1", async () => {
     const { status, out, err } = await run(["report", "samples/planted.raterun"]);
     assert.equal(status, 1);
     assert.match(out, /fit 1: order 1 in H2O2/);
-    assert.match(err, /^samples\/planted\.raterun:4:11: error: Oxygen does not balance/);
+    assert.equal(err, "");
+    assert.match(out, /what to watch: 4 errors, 2 warnings\n {2}- error, line 4: Oxygen does not balance/);
   });
 });
 

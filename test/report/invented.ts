@@ -46,6 +46,7 @@ export function inventedRun(count = 21, changes: Partial<Run> = {}): Run {
         monitor: "concentration",
         column: "c",
         timeColumn: "t",
+        details: [],
         points: count,
         used: count,
         sources: [],

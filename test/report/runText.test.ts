@@ -22,7 +22,7 @@ run A — first try
                               v                          dc(H2O2)/dt
     average from 0 s to 50 s  0.0780(20) mmol L^-1 s^-1  -0.1560(40) mmol L^-1 s^-1
 
-  fit 1: order 1 in H2O2
+  fit 1: order 1 in H2O2, 21 readings from 0 s to 100 s
     k          5.502(73)e-4 s^-1  95 %: 5.356e-4 to 5.648e-4
     half-life  1260(17) s         of H2O2
 
@@ -32,7 +32,7 @@ run A — first try
 
     k = 5.502(73)e-4 s^-1, from 21 readings.
 
-  fit 2: order 1 in H2O2
+  fit 2: order 1 in H2O2, 21 readings from 0 s to 100 s
     No rate constant: all readings are the same, so nothing is seen to react.
 `,
     );

@@ -30,7 +30,8 @@ export const report: Command = {
     }
     for (const description of descriptions) {
       if (page === null) io.out(`${descriptionText(description)}\n`);
-      for (const diagnostic of description.diagnostics) io.err(`${diagnosticLine(description.path, diagnostic)}\n`);
+      else
+        for (const diagnostic of description.diagnostics) io.err(`${diagnosticLine(description.path, diagnostic)}\n`);
     }
     if (page !== null) io.out(`${page.shown} holds the report.\n`);
     return hasError(described) ? 1 : 0;

@@ -90,6 +90,55 @@ export const fitMessages = {
     ({ limit }) =>
       `The free infinity ran to ${limit}, the furthest that what was taken allows, and was held there. Check what was taken, the unit of the column and the window.`,
   ),
+  "fit-order-not-limiting": message<{ species: string; limiting: string }>(
+    "warning",
+    "The order is in a reactant that does not run out first, so the law cannot hold to the end.",
+    ({ species, limiting }) =>
+      `${limiting} runs out before ${species}, so order 1 in ${species} can hold only until then. End the window before that, or fit the order in ${limiting}.`,
+  ),
+  "fit-scatter-large": message<{ chiSquare: string }>(
+    "warning",
+    "The readings lie further off the curve than their stated random uncertainty allows.",
+    ({ chiSquare }) =>
+      `The readings lie further off the curve than their stated uncertainty allows (reduced χ² = ${chiSquare}), so u(k) is too small. Correct the random line, or look for a law that fits.`,
+  ),
+  "fit-scatter-small": message<{ chiSquare: string }>(
+    "warning",
+    "The readings lie nearer to the curve than their stated random uncertainty lets one expect.",
+    ({ chiSquare }) =>
+      `The readings lie nearer to the curve than their stated uncertainty lets one expect (reduced χ² = ${chiSquare}), so u(k) is too large. Correct the random line; what all readings share belongs in a common line.`,
+  ),
+  "exclude-nothing": message<{ file: string; what: string }>(
+    "warning",
+    "A line leaves readings out that are not there.",
+    ({ file, what }) =>
+      `No reading of ${file} stands in ${what}, so nothing is left out. Count lines as an editor does, and times as the file gives them.`,
+  ),
+  "time-zero-late": message<Record<string, never>>(
+    "error",
+    "Time zero lies behind all readings.",
+    () => "Time zero lies behind the last reading, so no reading is left. It is a time of the file: correct it.",
+  ),
+  "readings-before-zero": message<{ count: number }>(
+    "information",
+    "Readings before time zero are not used.",
+    ({ count }) =>
+      count === 1
+        ? "One reading stands before time zero and is not used."
+        : `${count} readings stand before time zero and are not used.`,
+  ),
+  "time-zero-far": message<{ first: string }>(
+    "warning",
+    "The readings begin longer after time zero than they last.",
+    ({ first }) =>
+      `The readings begin at ${first}, longer after time zero than they last; the start and the conversion are carried far back. If the reaction began later, say so below the data line: time zero, with that time of the file.`,
+  ),
+  "fit-end-differs": message<{ end: string; found: string; expected: string }>(
+    "warning",
+    "A start or infinity is not what was taken gives.",
+    ({ end, found, expected }) =>
+      `The ${end} is ${found}, but what was taken gives ${expected}. Check the units of the column and of what was taken, the blank and the volume.`,
+  ),
   "fit-residuals-run": message<{ p: string }>(
     "warning",
     "The residuals keep their sign for too long: the curve does not follow the readings.",

@@ -167,6 +167,18 @@ export const languageMessages = {
     ({ species, volume }: { species: string; volume: string }) =>
       `${volume} of ${species} of what strength? Add it, for example: ${volume} of 0.500 mol/L, or: ${volume} of 30 % by mass density 1.11 g/mL`,
   ),
+  "taken-part-unused": message(
+    "warning",
+    "A purity or a density stands where nothing follows from it.",
+    ({ part, belongs }: { part: string; belongs: string }) =>
+      `“${part}” changes nothing here: it belongs to ${belongs}. Take it out, or give what was taken that way.`,
+  ),
+  "number-with-uncertainty": message(
+    "error",
+    "A plain number of a law carries no uncertainty.",
+    ({ text, number }: { text: string; number: string }) =>
+      `${text} carries an uncertainty that counts nowhere. Write ${number}.`,
+  ),
   "stock-without-volume": message(
     "error",
     "The strength of a stock stands behind something that is no volume.",

@@ -136,6 +136,7 @@ function bindRuns(
 
 /** Whether a line was lost that may hold for a run, its own or one above the first: it may be what the run seems to lack. */
 function isUnsure({ lost, statements }: Parsed, header: Statement, first: Statement | undefined): boolean {
+  if (lost.length === 0) return false;
   const next = statements.find(({ line, offset }) => offset > header.offset && line.row?.opens !== undefined);
   const end = next?.offset ?? Number.POSITIVE_INFINITY;
   return lost.some((at) => at < (first?.offset ?? 0) || (at > header.offset && at < end));

@@ -4,7 +4,8 @@ import type { Fact } from "../../study/fact.js";
 import { isBroken, numberOf, originOf, quantityOf, textOf, unitOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import type { Binding } from "./binding.js";
-import { linesWith, quantityFact } from "./facts.js";
+import { reportEmptySpan } from "./emptySpan.js";
+import { linesWith, lineWith, quantityFact } from "./facts.js";
 
 /** The `data` line of a run with its columns. */
 export function bindData(binding: Binding, run: string, statement: Statement): DataFile | null {
@@ -14,8 +15,8 @@ export function bindData(binding: Binding, run: string, statement: Statement): D
   const skip = statement.children.find((child) => child.line.row?.head === "skip" && !isBroken(child));
   return {
     path,
-    exclusions: linesWith(statement.children, "exclude").flatMap((line) => bindExclusion(binding.uri, line)),
-    timeZero: quantityFact(binding.uri, statement.children, "time"),
+    exclusions: linesWith(statement.children, "exclude").flatMap((line) => bindExclusion(binding, line)),
+    timeZero: bindTimeZero(binding.uri, statement),
     pathOrigin: originOf(binding.uri, statement, "path"),
     columns: columns.flatMap((column) => bindColumn(binding, run, column)),
     delimiter: childText(statement, "delimiter", "delimiter"),
@@ -26,14 +27,31 @@ export function bindData(binding: Binding, run: string, statement: Statement): D
   };
 }
 
-function bindExclusion(uri: string, statement: Statement): Exclusion[] {
+function bindTimeZero(uri: string, data: Statement): DataFile["timeZero"] {
+  const fact = quantityFact(uri, data.children, "time");
+  const line = lineWith(data.children, "time");
+  return fact === null || line === null ? null : { ...fact, clock: isClock(textOf(line, "time")) };
+}
+
+/** Whether a time is written as a clock shows it. */
+function isClock(text: string | null): boolean {
+  return /^\s*\d{1,2}:\d{2}:\d{2}/.test(text ?? "");
+}
+
+function bindExclusion(binding: Binding, statement: Statement): Exclusion[] {
+  const { uri } = binding;
   const reason = textOf(statement, "reason") ?? "";
   const origin = originOf(uri, statement);
   const line = numberOf(statement, "line");
   if (line !== null) return [{ value: { reason, line }, origin }];
   const from = quantityOf(statement, "from");
   const to = quantityOf(statement, "to");
-  return from === null || to === null ? [] : [{ value: { reason, from, to }, origin }];
+  if (from === null || to === null) return [];
+  if (from.value >= to.value) {
+    reportEmptySpan(binding, statement);
+    return [];
+  }
+  return [{ value: { reason, from, to, clock: isClock(textOf(statement, "from")) }, origin }];
 }
 
 function childText(statement: Statement, head: string, label: string): string | null {

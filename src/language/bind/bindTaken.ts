@@ -72,10 +72,23 @@ function checkStock(binding: Binding, statement: Statement, { species, given, st
     const found = field === null ? null : stockConcentration(stock, facts, field.span);
     if (found !== null && isFault(found)) reportIn(binding, statement, 0, found);
   }
+  sayUnused(binding, statement, "purity", isKind(given.unit, "mass"));
+  sayUnused(binding, statement, "density", stock?.kind === "share");
   if (!isVolume && stock !== null) {
     const of = textOf(statement, "stock") ?? "";
     report(binding, problem("stock-without-volume", { stock: of }, originOf(binding.uri, statement, "stock")));
   }
+}
+
+/** Says of a part of the line that nothing follows from it as the line stands. */
+function sayUnused(binding: Binding, statement: Statement, part: "purity" | "density", used: boolean): void {
+  const text = textOf(statement, part);
+  if (text === null || used) return;
+  const args = {
+    part: `${part} ${text}`,
+    belongs: part === "purity" ? "a mass" : "a share of a stock, such as 30 % by mass",
+  };
+  report(binding, problem("taken-part-unused", args, originOf(binding.uri, statement, part)));
 }
 
 function sayNoPart(binding: Binding, statement: Statement, { species }: Taken): void {

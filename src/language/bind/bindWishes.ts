@@ -1,4 +1,3 @@
-import { problem } from "../../contract/problem.js";
 import type { DataFile } from "../../study/dataFile.js";
 import type { StudyItem } from "../../study/fact.js";
 import type { Reaction } from "../../study/reaction.js";
@@ -6,8 +5,9 @@ import type { EndPoint, FitWish, RateWish } from "../../study/wish.js";
 import { blockOf, isBroken, originOf, quantityOf, textOf } from "../fields.js";
 import type { Statement } from "../syntax.js";
 import { useColumn } from "./bindFollow.js";
-import { type Binding, report } from "./binding.js";
+import type { Binding } from "./binding.js";
 import { bindLaw } from "./bindLaw.js";
+import { reportEmptySpan } from "./emptySpan.js";
 import { hasLine, linesWith, lineWith, numberFact, textFact } from "./facts.js";
 import { resolveSpecies } from "./resolveSpecies.js";
 
@@ -101,11 +101,6 @@ function bindWindow(binding: Binding, fit: Statement): FitWish["window"] {
     return null;
   }
   return { from, to, origin: originOf(binding.uri, statement) };
-}
-
-export function reportEmptySpan(binding: Binding, statement: Statement): void {
-  const args = { from: textOf(statement, "from") ?? "", to: textOf(statement, "to") ?? "" };
-  report(binding, problem("span-empty", args, originOf(binding.uri, statement)));
 }
 
 function bindEndPoint(binding: Binding, fit: Statement, head: "start" | "infinity"): EndPoint {

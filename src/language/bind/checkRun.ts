@@ -37,7 +37,9 @@ export function checkRun(
     report(binding, problem("run-lacks-temperature", say, origin, below("temperature 25.0 °C")));
   }
   if (!written.has("volume")) {
-    const needing = run.taken.find(({ given }) => !isKind(given.unit, "concentration"));
+    const needing = run.taken.find(
+      ({ given }) => !isKind(given.unit, "concentration") && !isKind(given.unit, "massConcentration"),
+    );
     if (needing !== undefined) {
       const args = { ...say, species: needing.species.key };
       report(binding, problem("run-lacks-volume", args, origin, below("volume 50.00 mL")));
@@ -52,7 +54,7 @@ export function checkMasses(binding: Binding, run: Run): void {
       species.formula === null &&
       species.molarMass === null &&
       !binding.halfDeclared.has(species.key) &&
-      isKind(given.unit, "mass")
+      (isKind(given.unit, "mass") || isKind(given.unit, "massConcentration"))
     ) {
       report(binding, problem("taken-needs-formula", { species: species.key }, line));
     }

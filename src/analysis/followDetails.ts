@@ -1,0 +1,32 @@
+import type { Run as RunFinding } from "../contract/findings.js";
+import type { Quantity } from "../quantity/quantity.js";
+import type { Follow, Run } from "../study/run.js";
+import { shownQuantity } from "./shown.js";
+
+type Details = RunFinding["follow"][number]["details"];
+
+/** What a reader needs to repeat the numbers: how the signal was read, what was taken off it and what was left out. */
+export function followDetails(run: Run, follow: Follow): Details {
+  const details: Details = [];
+  const put = (name: string, fact: { readonly value: Quantity } | null): void => {
+    if (fact !== null) details.push({ name, text: shownQuantity(fact.value).text });
+  };
+  if (follow.collected !== null) {
+    const { wet, temperature } = follow.collected.value;
+    details.push({ name: "collected", text: `${wet ? "wet" : "dried"} at ${shownQuantity(temperature).text}` });
+  }
+  put("barometer", follow.barometer);
+  put("level difference", follow.levelDifference);
+  put("blank", follow.blank);
+  put("reading at start", follow.readingAtStart);
+  put("reading at infinity", follow.readingAtInfinity);
+  put("time zero", run.data?.timeZero ?? null);
+  for (const { value } of run.data?.exclusions ?? []) {
+    const where =
+      "line" in value
+        ? `line ${value.line}`
+        : `${shownQuantity(value.from).text} to ${shownQuantity(value.to).text} of the file`;
+    details.push({ name: "left out", text: `${where}: ${value.reason}` });
+  }
+  return details;
+}
