@@ -297,6 +297,11 @@ function readPlainNumber(cursor: Cursor, label: string, token: Token, part: Part
   } else if (number.end < token.text.length) {
     wantedButFound(cursor, [part], null, token);
   } else {
+    if (number.u !== null) {
+      const bare = token.text.replace(/\(.*\)/, "");
+      const args = { text: token.text, number: bare };
+      cursor.fault = fault("number-with-uncertainty", args, token, [replacement(token, bare)]);
+    }
     keep(cursor, label, { kind: "number", value: number.value, text: token.text, span: token });
   }
 }
