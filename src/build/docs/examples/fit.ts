@@ -1,3 +1,4 @@
+import { exp } from "../../../numerics/elementary.js";
 import type { CodeExamples } from "../codeExample.js";
 import { fileWith, runWith, soundFile, soundFiles, soundRun } from "./soundRun.js";
 
@@ -8,6 +9,10 @@ const firstReadings = (count: number) => ({
     .slice(0, count + 1)
     .join("\n")}\n`,
 });
+const scatter = [3, -2, 1, -3, 2, -1, 2, -3, 1, -2, 3, -1, -2, 2, -1, 3, -3, 1, 2, -2];
+
+const withRandom = (u: string): string => runWith('"c / mol/L"\n', `"c / mol/L"\n      random ${u}\n`);
+const belowData = (line: string): string => runWith("    column t", `    ${line}\n    column t`);
 const withRate = (line: string): string => runWith("  fit order 1 in H2O2\n", `  ${line}\n`);
 
 export const fitExamples: CodeExamples = {
@@ -37,7 +42,8 @@ export const fitExamples: CodeExamples = {
     beside: "balance-unchecked",
     text: runWith("c / mol/L", "c / g/L")
       .replace("reaction 2 H2O2 -> 2 H2O + O2", "species dye\nspecies leuco is C25H31N3\nreaction dye -> leuco")
-      .replaceAll("H2O2", "dye"),
+      .replaceAll("H2O2", "dye")
+      .replace("0.100 mol/L", "0.268 mmol/L"),
     files: fileWith("c / mol/L", "c / g/L"),
     write: ["species dye", "species dye is C25H31N3"],
   },
@@ -55,7 +61,7 @@ export const fitExamples: CodeExamples = {
   "uncertainty-of-zero": {
     text: runWith('"c / mol/L"\n', '"c / mol/L"\n      random 1 %\n'),
     files: fileWith("0.0120", "0"),
-    write: ["random 1 %", "random 0.0005 mol/L"],
+    write: ["random 1 %", "random 0.005 mol/L"],
   },
   "rate-outside-readings": { text: withRate("rate at 300 s"), files: soundFiles, write: ["300 s", "60 s"] },
   "rate-few-readings": {
@@ -87,17 +93,14 @@ export const fitExamples: CodeExamples = {
   },
   "fit-very-few-half-lives": {
     text: `${soundRun}    infinity free\n`,
-    files: firstReadings(5),
+    files: { "data/a.csv": decay(7, 12, 0, 0.0001) },
     write: ["infinity free", "infinity fixed 0 mol/L"],
   },
   "fit-infinity-at-bound": {
     otherReadings: true,
     text: `${soundRun}    infinity free\n`,
-    files: {
-      "data/a.csv":
-        "t / s,c / mol/L\n0,0.1000\n20,0.0700\n40,0.0450\n60,0.0280\n80,0.0150\n100,0.0060\n120,0.0010\n140,0.0002\n",
-    },
-    rightFiles: soundFiles,
+    files: { "data/a.csv": decay(20, 14, -0.001, 0.0001) },
+    rightFiles: { "data/a.csv": decay(20, 14, 0, 0.0001) },
   },
   "fit-residuals-run": {
     otherReadings: true,
@@ -115,12 +118,63 @@ export const fitExamples: CodeExamples = {
     files: soundFiles,
     write: ["5.0 mL", "0.100 mol/L"],
   },
+  "fit-scatter-large": {
+    text: withRandom("0.0001 mol/L"),
+    files: { "data/a.csv": decay(20, 14, 0, 0.0003) },
+    write: ["0.0001 mol/L", "0.0006 mol/L"],
+  },
+  "fit-scatter-small": {
+    text: withRandom("0.005 mol/L"),
+    files: { "data/a.csv": decay(20, 14, 0, 0.0003) },
+    write: ["0.005 mol/L", "0.0006 mol/L"],
+  },
+  "fit-end-differs": {
+    text: runWith("0.100 mol/L", "0.200 mol/L"),
+    files: soundFiles,
+    write: ["0.200 mol/L", "0.100 mol/L"],
+  },
+  "fit-order-not-limiting": {
+    text: runWith("2 H2O2 -> 2 H2O + O2", "H2O2 + 2 I^- + 2 H^+ -> I2 + 2 H2O").replace(
+      "  data",
+      "  taken I^- 0.050 mol/L\n  taken H^+ 1.0 mol/L\n  data",
+    ),
+    files: soundFiles,
+    write: ["I^- 0.050", "I^- 1.0"],
+  },
+  "exclude-nothing": {
+    text: belowData('exclude line 40 because "bubble"'),
+    files: soundFiles,
+    write: ["line 40", "line 5"],
+  },
+  "time-zero-late": {
+    beside: "fit-refused",
+    text: belowData("time zero 300 s"),
+    files: soundFiles,
+    write: ["300 s", "0 s"],
+  },
+  "readings-before-zero": {
+    text: belowData("time zero 20 s").replace("0.100 mol/L", "0.075 mol/L"),
+    files: soundFiles,
+  },
+  "time-zero-far": {
+    text: runWith("  taken H2O2 0.100 mol/L\n", ""),
+    files: { "data/a.csv": soundFile.replace(/^(\d+),/gm, (_, t) => `${Number(t) + 1000},`) },
+    write: ["    column t", "    time zero 1000 s\n    column t"],
+  },
   "not-computed-yet": { text: "reaction 2 H2O2 -> 2 H2O + O2\n  enthalpy -196.4 kJ/mol\n" },
 };
 
+/** Readings of a first-order decay from 0.1 mol/L, every `step` s, that runs to `infinity` and scatters by some `spread`, mol/L. */
+function decay(count: number, step: number, infinity: number, spread: number): string {
+  const rows = scatter.slice(0, count).map((off, index) => {
+    const c = infinity + (0.1 - infinity) * exp(-0.0151 * step * index) + spread * off;
+    return `${step * index},${c.toFixed(4)}`;
+  });
+  return `t / s,c / mol/L\n${rows.join("\n")}\n`;
+}
+
 /** Twenty readings of a first-order decay with some scatter and a drift, mol/L in a second. */
 function bent(drift: number): string {
-  const scatter = [3, -2, 1, -3, 2, -1, 2, -3, 1, -2, 3, -1, -2, 2, -1, 3, -3, 1, 2, -2];
   const rows = scatter.map((step, index) => {
     let c = 0.1;
     for (let n = 0; n < index; n++) c *= 0.8;

@@ -73,6 +73,11 @@ export const languageExamples: CodeExamples = {
     text: "species ester\nrun A\n  volume 50.00 mL\n  taken ester 0.44 g\n",
     write: ["species ester", "species ester is C4H8O2"],
   },
+  "taken-part-unused": {
+    text: `${peroxide}run A\n  volume 50.00 mL\n  taken H2O2 0.100 mol/L purity 98 %\n`,
+    write: ["0.100 mol/L", "0.17 g"],
+  },
+  "number-with-uncertainty": { text: runWith("order 1 in", "order 1.0(1) in"), files: soundFiles },
   "taken-takes-no-part": { text: `${peroxide}run A\n  taken KI 0.050 mol/L\n` },
   "formula-left-over": { text: `${peroxide}run A\n  taken H2O2; 0.100 mol/L\n`, write: [";", ""] },
   "balance-unchecked": {
