@@ -59,7 +59,15 @@ export interface EditorSettings {
     /** greatest size of a data file, MB */
     readonly maximumSize: number;
   };
+  readonly codeLens: {
+    /** whether lines about the record stand above the text */
+    readonly enabled: boolean;
+  };
 }
 
 /** What holds until the client tells otherwise; the same as the command line's. */
-export const defaultSettings: EditorSettings = { preview: { updateDelay: 250 }, data: { maximumSize: 512 } };
+export const defaultSettings: EditorSettings = {
+  preview: { updateDelay: 250 },
+  data: { maximumSize: 512 },
+  codeLens: { enabled: true },
+};

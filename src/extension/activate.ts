@@ -16,6 +16,7 @@ import { registerShowLog } from "./commands/showLog.js";
 import { listForServer } from "./listForServer.js";
 import { registerPreview } from "./preview/registerPreview.js";
 import { readForServer } from "./readForServer.js";
+import { registerRecords } from "./records.js";
 import { createStatusItem } from "./statusItem.js";
 import { themeKind } from "./themeKind.js";
 
@@ -34,6 +35,7 @@ export async function activateWith(context: ExtensionContext, make: MakeClient):
     preview,
     registerShowLog(log),
     registerRestartServer(client, log),
+    registerRecords(client),
     client.onNotification(statusChanged, (told) => {
       status.take(told);
       preview.status(told);

@@ -33,6 +33,8 @@ export interface ClientAbilities {
   hintRefresh: boolean;
   /** it takes edits that name the version of the document they are for */
   versionedEdits: boolean;
+  /** it asks for the lines above the text again when told to */
+  codeLensRefresh: boolean;
 }
 
 /** The state before `initialize`; nothing is trusted until the client says so. */
@@ -52,6 +54,7 @@ export function createClientState(): ClientState {
       snippets: false,
       hintRefresh: false,
       versionedEdits: false,
+      codeLensRefresh: false,
     },
   };
 }
@@ -71,13 +74,18 @@ export function readSettings(answer: unknown): EditorSettings {
   return {
     preview: { updateDelay: delay !== null && delay >= 0 ? delay : defaultSettings.preview.updateDelay },
     data: { maximumSize: size !== null && size > 0 ? size : defaultSettings.data.maximumSize },
+    codeLens: { enabled: valueIn(answer, "codeLens", "enabled") !== false },
   };
 }
 
 function numberIn(answer: unknown, section: string, name: string): number | null {
-  const inner = isRecord(answer) ? answer[section] : undefined;
-  const value = isRecord(inner) ? inner[name] : undefined;
+  const value = valueIn(answer, section, name);
   return typeof value === "number" && Number.isFinite(value) ? value : null;
+}
+
+function valueIn(answer: unknown, section: string, name: string): unknown {
+  const inner = isRecord(answer) ? answer[section] : undefined;
+  return isRecord(inner) ? inner[name] : undefined;
 }
 
 function isRecord(value: unknown): value is Record<string, unknown> {

@@ -1,6 +1,7 @@
 import type { Connection, ServerCapabilities, TextDocuments } from "vscode-languageserver";
 import type { TextDocument } from "vscode-languageserver-textdocument";
 import type { FolderReader } from "../contract/folderReader.js";
+import type { Writer } from "../contract/writer.js";
 import type { FileAccess } from "../workspace/loadFiles.js";
 import type { Document, Workspace } from "../workspace/workspace.js";
 import type { ClientState } from "./clientState.js";
@@ -18,6 +19,8 @@ export interface ServerContext {
   readonly access: () => FileAccess;
   /** what lies in folders */
   readonly folders: FolderReader;
+  /** writes files inside the opened folders */
+  readonly writer: Writer;
   readonly document: (open: TextDocument) => Document;
   readonly loop: FindingsLoop;
   readonly shown: ShownDiagnostics;

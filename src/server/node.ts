@@ -4,6 +4,7 @@ import { createConnection, ProposedFeatures } from "vscode-languageserver/node";
 import { fencedReader } from "../host/node/fencedReader.js";
 import { nodeFolders } from "../host/node/nodeFolders.js";
 import { nodeReader } from "../host/node/nodeReader.js";
+import { nodeWriter } from "../host/node/nodeWriter.js";
 import { openThread } from "../host/node/workThread.js";
 import { inlineComputer } from "../workspace/computer.js";
 import { createBreathe } from "./breathe.js";
@@ -16,6 +17,7 @@ const script = join(__dirname, "worker.cjs");
 startServer(createConnection(ProposedFeatures.all), {
   reader: (_, fence) => fencedReader(nodeReader(), fence),
   folders: (_, fence) => nodeFolders(fence),
+  writer: () => nodeWriter(),
   computer: (log) =>
     bySize(
       inlineComputer(createBreathe()),

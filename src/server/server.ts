@@ -3,6 +3,7 @@ import { TextDocument } from "vscode-languageserver-textdocument";
 import type { FolderReader } from "../contract/folderReader.js";
 import type { Reader } from "../contract/reader.js";
 import { version } from "../contract/version.js";
+import type { Writer } from "../contract/writer.js";
 import type { FileAccess } from "../workspace/loadFiles.js";
 import { createWorkspace, type Document, type Workspace } from "../workspace/workspace.js";
 import { type ClientState, createClientState, readInitializationOptions } from "./clientState.js";
@@ -19,6 +20,8 @@ export interface ServerHost {
   reader(connection: Connection, fence: () => readonly string[] | null): Reader;
   /** lists folders; `fence` as of the reader */
   folders(connection: Connection, fence: () => readonly string[] | null): FolderReader;
+  /** writes files inside the opened folders */
+  writer(connection: Connection): Writer;
   /** where findings are worked out; asked for anew whenever what may be read has changed */
   computer(log: (line: string) => void): EndableComputer;
 }
@@ -52,6 +55,7 @@ export function startServer(connection: Connection, host: ServerHost): void {
     workspace,
     access: () => current().access,
     folders: host.folders(connection, fence),
+    writer: host.writer(connection),
     document,
     loop,
     shown: createShownDiagnostics(),
@@ -108,6 +112,7 @@ function readClient(client: ClientState, params: InitializeParams): void {
   abilities.hoverRegistration = textDocument?.hover?.dynamicRegistration === true;
   abilities.snippets = textDocument?.completion?.completionItem?.snippetSupport === true;
   abilities.hintRefresh = workspace?.inlayHint?.refreshSupport === true;
+  abilities.codeLensRefresh = workspace?.codeLens?.refreshSupport === true;
   abilities.versionedEdits = workspace?.workspaceEdit?.documentChanges === true;
 }
 

@@ -9,8 +9,10 @@ import {
   type ReadFileAnswer,
   readFile,
 } from "../contract/editorProtocol.js";
+import { type WriteFile, type WriteFileAnswer, writeFile } from "../contract/recordProtocol.js";
 import { requestFolders } from "../host/web/requestFolders.js";
 import { requestReader } from "../host/web/requestReader.js";
+import { requestWriter } from "../host/web/requestWriter.js";
 import { openWorker } from "../host/web/workWorker.js";
 import { inlineComputer } from "../workspace/computer.js";
 import { createBreathe } from "./breathe.js";
@@ -38,6 +40,11 @@ if (scope.name === workerName) {
       requestFolders((uri) => {
         const question: ListFolder = { uri };
         return connection.sendRequest<ListFolderAnswer>(listFolder, question);
+      }),
+    writer: (connection) =>
+      requestWriter(async (uri, text) => {
+        const question: WriteFile = { uri, text };
+        return (await connection.sendRequest<WriteFileAnswer>(writeFile, question)).refusal;
       }),
     computer: (log) =>
       bySize(

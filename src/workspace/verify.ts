@@ -2,6 +2,7 @@ import { method } from "../analysis/analyse.js";
 import type { Description } from "../contract/findings.js";
 import type { Problem } from "../contract/problem.js";
 import { version } from "../contract/version.js";
+import { messageOf } from "../contract/words.js";
 import { compare, type Moved } from "../record/compare.js";
 import { readRecord } from "../record/readRecord.js";
 import { recordOf, type Versions } from "../record/recordOf.js";
@@ -34,4 +35,14 @@ export function verify(description: Description, text: string | null, uri: strin
 /** Where the record of a description stands: beside it, `.raterecord` in place of `.raterun`. Path or URI. */
 export function recordBeside(description: string): string {
   return description.replace(/(\.raterun)?$/, ".raterecord");
+}
+
+/**
+ * Why a text that stands where the record belongs is not written over: it is something else, or a later record. Null
+ * where it may be; a broken record may.
+ */
+export function reasonToKeep(text: string): string | null {
+  const read = readRecord(text, "");
+  if (read.ok || !["record-foreign", "record-newer"].includes(read.problem.code)) return null;
+  return messageOf(read.problem);
 }

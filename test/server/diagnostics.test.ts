@@ -82,14 +82,17 @@ describe("diagnostics in the editor", () => {
     assert.equal(client.sent.length, before + 2);
   });
 
-  it("watch the folders of the data files in use", async () => {
+  it("watch the folders of the data files in use, and that of the description, where its record stands", async () => {
     await start();
     await client.open("a.raterun", balanced);
     await client.settled("a.raterun");
-    const watching = client.registered.find(({ method }) => method === "workspace/didChangeWatchedFiles");
-    assert.deepEqual(watching?.registerOptions, {
-      watchers: [{ globPattern: { baseUri: "file:///lab/data", pattern: "*" } }],
-    });
+    const watching = client.registered.filter(({ method }) => method === "workspace/didChangeWatchedFiles");
+    assert.deepEqual(
+      watching.map(({ registerOptions }) => registerOptions),
+      ["file:///lab", "file:///lab/data"].map((baseUri) => ({
+        watchers: [{ globPattern: { baseUri, pattern: "*" } }],
+      })),
+    );
   });
 
   it("refuse a data file outside the folder while the workspace is not trusted, and read it then", async () => {

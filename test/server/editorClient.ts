@@ -39,6 +39,8 @@ export interface ClientOptions {
   readonly maximumSize?: number;
   readonly versionedEdits?: boolean;
   readonly snippets?: boolean;
+  /** whether hints behind the lines are wanted */
+  readonly hints?: boolean;
 }
 
 /** An editor without a window, on an end of a wire that has our server at the other. */
@@ -50,6 +52,8 @@ export interface EditorClient {
   readonly statuses: StatusChanged[];
   readonly registered: Registration[];
   readonly log: string[];
+  /** how often the editor was told to ask anew */
+  readonly refreshes: { hints: number };
   open(path: string, text: string): Promise<void>;
   /** replaces the first occurrence of a stretch of text, as typing does */
   edit(path: string, words: string, by: string): Promise<void>;
@@ -91,6 +95,12 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
   startServer(createConnection(new StreamMessageReader(up), new StreamMessageWriter(down)), {
     reader: () => reader,
     folders: () => options.folders ?? foldersOf(files),
+    writer: () => ({
+      async write(uri, text) {
+        files.set(uri, text);
+        return null;
+      },
+    }),
     computer: () => computer,
   });
   const connection = createProtocolConnection(new StreamMessageReader(down), new StreamMessageWriter(up));
@@ -99,6 +109,7 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
   const statuses: StatusChanged[] = [];
   const registered: Registration[] = [];
   const log: string[] = [];
+  const refreshes = { hints: 0 };
   connection.onNotification("textDocument/publishDiagnostics", (message: PublishDiagnosticsParams) => {
     sent.push(message);
   });
@@ -108,8 +119,14 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
     registered.push(...registrations);
   });
   connection.onRequest("client/unregisterCapability", () => undefined);
-  connection.onRequest("workspace/configuration", () => [
-    { preview: { updateDelay: options.delay ?? 0 }, data: { maximumSize: options.maximumSize ?? 512 } },
+  connection.onRequest("workspace/inlayHint/refresh", () => {
+    refreshes.hints++;
+    return null;
+  });
+  connection.onRequest("workspace/configuration", ({ items }: { items: { section?: string }[] }) => [
+    items[0]?.section === "ratewright.inlayHints"
+      ? { enabled: options.hints ?? true }
+      : { preview: { updateDelay: options.delay ?? 0 }, data: { maximumSize: options.maximumSize ?? 512 } },
   ]);
   connection.listen();
   await connection.sendRequest("initialize", {
@@ -127,6 +144,7 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
         workspaceFolders: true,
         inlayHint: { refreshSupport: true },
         didChangeWatchedFiles: { dynamicRegistration: true, relativePatternSupport: true },
+        codeLens: { refreshSupport: true },
         workspaceEdit: { documentChanges: options.versionedEdits ?? true },
       },
     },
@@ -171,6 +189,7 @@ export async function startEditorClient(options: ClientOptions = {}): Promise<Ed
     statuses,
     registered,
     log,
+    refreshes,
     async open(path, text) {
       texts.set(path, { text, version: 1 });
       const textDocument = { uri: uriOf(path), languageId: "raterun", version: 1, text };

@@ -1,10 +1,8 @@
 import { resolve } from "node:path";
-import { messageOf } from "../../contract/words.js";
 import { fileUri } from "../../host/node/fileUri.js";
 import { writeText } from "../../host/node/writeText.js";
-import { readRecord } from "../../record/readRecord.js";
 import { countWords } from "../../report/diagnosticText.js";
-import { recordBeside, recordNow } from "../../workspace/verify.js";
+import { reasonToKeep, recordBeside, recordNow } from "../../workspace/verify.js";
 import type { Command } from "../command.js";
 import { type Described, describeAll, hasError } from "../describeAll.js";
 import type { Io } from "../io.js";
@@ -51,13 +49,6 @@ async function recordOne({ description }: Described, io: Io): Promise<Outcome> {
   if (refusal !== null) return failed(`${shown}: ${recordRefusals[refusal]}.`, io);
   io.out(`${shown} is written.\n`);
   return "written";
-}
-
-/** A broken record may be written anew; something else that has its name, or a later record, may not. */
-function reasonToKeep(text: string): string | null {
-  const read = readRecord(text, "");
-  if (read.ok || !["record-foreign", "record-newer"].includes(read.problem.code)) return null;
-  return messageOf(read.problem);
 }
 
 function failed(words: string, io: Io): Outcome {

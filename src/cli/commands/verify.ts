@@ -1,6 +1,6 @@
 import { resolve } from "node:path";
-import { messageOf } from "../../contract/words.js";
 import { fileUri } from "../../host/node/fileUri.js";
+import { verdictLines } from "../../workspace/verdictText.js";
 import { recordBeside, verify as verdictOf } from "../../workspace/verify.js";
 import type { Command } from "../command.js";
 import { type Described, describeAll } from "../describeAll.js";
@@ -43,8 +43,5 @@ async function verifyOne({ description }: Described, io: Io): Promise<string[]> 
   const file = await readRecordFile(uri);
   if (file === "unreadable") return [`${shown}: cannot be read.`];
   const verdict = verdictOf(description, file.text, uri);
-  if (verdict.kind === "none") return [`${path}: there is no record yet; ratewright record ${path} writes it.`];
-  if (verdict.kind === "unreadable") return [`${shown}: ${messageOf(verdict.problem)}`];
-  if (verdict.kind === "same") return [];
-  return [`${path}: not as recorded.`, ...verdict.moved.map(({ text }) => `  ${text}`)];
+  return verdictLines(verdict, path, shown, `ratewright record ${path}`);
 }

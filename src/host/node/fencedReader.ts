@@ -29,7 +29,11 @@ export async function leadsOut(uri: string, folders: readonly string[]): Promise
 
 async function realOf(uri: string): Promise<string | null> {
   const path = filePath(uri);
-  if (path === null) return null;
+  return path === null ? null : realPath(path);
+}
+
+/** A path with every link in it followed; null where nothing is there. */
+export async function realPath(path: string): Promise<string | null> {
   try {
     return await realpath(path);
   } catch {
@@ -37,7 +41,8 @@ async function realOf(uri: string): Promise<string | null> {
   }
 }
 
-function isBelow(folder: string, path: string): boolean {
+/** Whether a path lies in a folder; both absolute, links followed. */
+export function isBelow(folder: string, path: string): boolean {
   const way = relative(folder, path);
   return way !== "" && way !== ".." && !way.startsWith(`..${sep}`) && !/^([A-Za-z]:|\\\\)/.test(way);
 }

@@ -1,6 +1,7 @@
 import type { Feature } from "../context.js";
 import { clientChanges } from "./clientChanges.js";
 import { codeActions } from "./codeActions.js";
+import { codeLens } from "./codeLens.js";
 import { dataFileHover } from "./dataFileHover.js";
 import { definition } from "./definition.js";
 import { diagnostics } from "./diagnostics.js";
@@ -10,6 +11,7 @@ import { foldingRanges } from "./foldingRanges.js";
 import { formatting } from "./formatting.js";
 import { hover } from "./hover.js";
 import { preview } from "./preview.js";
+import { records } from "./records.js";
 import { references } from "./references.js";
 import { renaming } from "./renaming.js";
 import { semanticTokens } from "./semanticTokens.js";
@@ -36,4 +38,6 @@ export const features: readonly Feature[] = [
   watchedFiles,
   status,
   preview,
+  codeLens,
+  records,
 ];

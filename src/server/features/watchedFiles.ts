@@ -1,10 +1,12 @@
 import { DidChangeWatchedFilesNotification, type Disposable } from "vscode-languageserver";
 import { URI, Utils } from "vscode-uri";
 import { dataLocations } from "../../workspace/loadFiles.js";
+import { recordBeside } from "../../workspace/verify.js";
 import type { Feature, ServerContext } from "../context.js";
 
 /**
- * Watches the data files of open descriptions, by the folders they lie in: any name and any ending may be a data file.
+ * Watches the data files and records of open descriptions, by the folders they lie in: any name and any ending may be
+ * a data file.
  * One that changed, came or went is read again, and what follows from it is worked out anew.
  */
 export const watchedFiles: Feature = {
@@ -14,6 +16,8 @@ export const watchedFiles: Feature = {
     context.connection.onDidChangeWatchedFiles(({ changes }) => {
       const uris = new Set(changes.map(({ uri }) => URI.parse(uri).toString()));
       const descriptions = new Set([...uris].flatMap((uri) => context.workspace().changed(uri)));
+      // What is said of a description's record is said anew with its findings.
+      for (const { uri } of context.documents.all()) if (uris.has(recordBeside(uri))) descriptions.add(uri);
       for (const description of descriptions) context.loop.refresh(description);
     });
     const follow = (): void => {
@@ -39,10 +43,11 @@ export const watchedFiles: Feature = {
   },
 };
 
-/** Folders of all data files of open descriptions. */
+/** Folders of all open descriptions, where their records stand, and of their data files. */
 function dataFolders(context: ServerContext): Set<string> {
   const folders = new Set<string>();
   for (const open of context.documents.all()) {
+    if (!open.uri.startsWith("untitled:")) folders.add(Utils.dirname(URI.parse(open.uri)).toString());
     const { study } = context.workspace().bound(context.document(open));
     for (const place of dataLocations(study, context.access()).values()) {
       if ("uri" in place) folders.add(Utils.dirname(URI.parse(place.uri)).toString());
