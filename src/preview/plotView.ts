@@ -81,7 +81,7 @@ export function createPlotView(frame: HTMLElement, hasStrip: boolean): PlotView 
       );
       view.data(
         "numbers",
-        plot.marks.map(({ t, y, t2, y2, at, label }) => ({ ...(at ?? middle(t, y, t2, y2)), label })),
+        plot.marks.map(({ number, label }) => ({ ...number, label })),
       );
       if (hasStrip)
         view.data(
@@ -119,8 +119,4 @@ export function createPlotView(frame: HTMLElement, hasStrip: boolean): PlotView 
       canvas.remove();
     },
   };
-}
-
-function middle(t: number, y: number, t2: number, y2: number): { t: number; y: number } {
-  return { t: (t + t2) / 2, y: (y + y2) / 2 };
 }

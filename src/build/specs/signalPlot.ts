@@ -39,6 +39,7 @@ export function signalPlot(strip: boolean): unknown {
     labelFontSize: 11,
     labelFont: { expr: "font" },
     labelOverlap: true,
+    format: "f",
   };
   const scaleX = { zero: false, nice: false, padding: 12 };
   const x = (labels: boolean) => ({ ...time, scale: scaleX, axis: labels ? { ...axis, tickCount: 8 } : null });
@@ -103,7 +104,14 @@ export function signalPlot(strip: boolean): unknown {
       },
       {
         data: { name: "numbers" },
-        mark: { type: "text", dx: 9, dy: 10, fontSize: 11, font: { expr: "font" }, color: { expr: "mark" } },
+        mark: {
+          type: "text",
+          dx: { expr: "datum.dx" },
+          dy: { expr: "datum.dy" },
+          fontSize: 11,
+          font: { expr: "font" },
+          color: { expr: "mark" },
+        },
         encoding: { x: x(!strip), y, text: { field: "label" } },
       },
       {

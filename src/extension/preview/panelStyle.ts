@@ -17,7 +17,7 @@ body.vscode-high-contrast { --faint: var(--ink); --rule: var(--vscode-contrastBo
 body { margin: 0; padding: 0; background: var(--vscode-editor-background); color: var(--ink); font: 13.5px/1.5 var(--vscode-font-family); font-variant-numeric: lining-nums tabular-nums; }
 header, main, footer { max-width: 46rem; margin: 0 auto; padding: 0 1.1rem; }
 header { position: sticky; top: 0; z-index: 2; background: var(--vscode-editor-background); display: flex; flex-wrap: wrap; align-items: baseline; gap: .2rem .9rem; padding-top: .5rem; padding-bottom: .35rem; }
-header h1 { font-size: 1em; font-weight: 400; color: var(--faint); overflow-wrap: anywhere; }
+header h2 { font-size: 1em; font-weight: 400; color: var(--faint); overflow-wrap: anywhere; }
 #sign { flex: 1 1 100%; margin: 0; padding-left: .7rem; border-left: 3px double var(--ink); }
 #sign:empty, #said:empty { display: none; }
 #runs { margin-left: auto; }
@@ -42,7 +42,7 @@ tr:has(button.line[aria-current]) > * { background: var(--vscode-editor-lineHigh
 :focus-visible { outline: 1px solid var(--focus); outline-offset: 1px; }
 body.vscode-high-contrast :focus-visible { outline-width: 2px; }
 .axis { margin: 0; color: var(--ink); font-size: .92em; }
-.axis.time { text-align: right; margin-top: -.3rem; padding-right: .6rem; }
+.axis.time { text-align: right; padding-right: .6rem; }
 .plot { position: relative; min-height: 320px; touch-action: pan-y; cursor: crosshair; overflow: hidden; user-select: none; }
 .plot.points { cursor: pointer; }
 .plot canvas { display: block; }

@@ -213,6 +213,8 @@ export function createPreviewPanel(panel: WebviewPanel, { client, extension, log
       log(`The preview: ${words}`);
     });
   });
+  const icon = (kind: string): Uri => Uri.joinPath(extension, "media", "icons", `raterun-${kind}.svg`);
+  panel.iconPath = { light: icon("light"), dark: icon("dark") };
   const script = webview.asWebviewUri(Uri.joinPath(extension, "dist", "preview.js")).toString();
   webview.html = panelPage({ script });
   panel.onDidChangeViewState(() => {

@@ -1,6 +1,6 @@
 import type { WindowAnswer } from "../../contract/previewProtocol.js";
 import type { Bound } from "../../language/bind/bind.js";
-import { spanOf } from "../../language/fields.js";
+import { fieldOf, isBroken, spanOf } from "../../language/fields.js";
 import { positionAt } from "../../language/lineIndex.js";
 import type { Statement } from "../../language/syntax.js";
 import { formatNumber } from "../../quantity/formatNumber.js";
@@ -23,22 +23,27 @@ export function windowEdits(bound: Bound, runId: string, fits: readonly string[]
   const starts = new Set(wishes.map(({ origin }) => origin.start));
   const statements = [...starts].flatMap((start) => statementAt(bound.parsed.statements, start) ?? []);
   if (statements.length === 0) return null;
-  return statements.map((fit) => windowEdit(bound, fit, lineOf(span)));
+  return statements.map((fit) => windowEdit(bound, fit, timesOf(span)));
 }
 
-function windowEdit(bound: Bound, fit: Statement, line: string): NonNullable<WindowAnswer>[number] {
+function windowEdit(bound: Bound, fit: Statement, times: string): NonNullable<WindowAnswer>[number] {
   const { index, text } = bound.parsed;
   const there = fit.children.find((child) => child.line.row?.head === "window");
   if (there !== undefined) {
-    const { start, end } = spanOf(there);
-    return { ...placed(bound, start, end), text: line };
+    // The times alone, so that the line keeps its alignment; a line that is broken is written anew.
+    const whole = isBroken(there) || fieldOf(there, "from") === null || fieldOf(there, "to") === null;
+    const { start } = whole ? spanOf(there) : spanOf(there, "from");
+    const { end } = whole ? spanOf(there) : spanOf(there, "to");
+    return { ...placed(bound, start, end), text: whole ? `window ${times}` : times };
   }
   const { start } = spanOf(fit);
   const lineStart = index.starts[positionAt(index, start).line] ?? 0;
   const indent = text.slice(lineStart, start);
   const rest = /\r\n|\r|\n/.exec(text.slice(start));
   const end = rest === null ? text.length : start + rest.index;
-  return { ...placed(bound, end, end), text: `${rest?.[0] ?? "\n"}${indent}  ${line}` };
+  // The times begin below the law, where there is room.
+  const law = /^\S+\s+/.exec(text.slice(start))?.[0].length ?? 0;
+  return { ...placed(bound, end, end), text: `${rest?.[0] ?? "\n"}${indent}  ${"window".padEnd(law - 3)} ${times}` };
 }
 
 function placed({ parsed: { index } }: Bound, start: number, end: number) {
@@ -48,9 +53,9 @@ function placed({ parsed: { index } }: Bound, start: number, end: number) {
 }
 
 /** Four digits of each end: finer than a hand drags. */
-function lineOf({ from, to, unit }: WindowSpan): string {
+function timesOf({ from, to, unit }: WindowSpan): string {
   const [first, last] = [from, to].map((time) => formatNumber(Number(time.toPrecision(4)), null));
-  return `window ${first} ${unit} to ${last} ${unit}`;
+  return `${first} ${unit} to ${last} ${unit}`;
 }
 
 function statementAt(statements: readonly Statement[], start: number): Statement | null {
