@@ -74,7 +74,7 @@ function readAny(cursor: Cursor, options: readonly (readonly Part[])[], row: Sta
     left = left.filter((candidate) => candidate !== option);
     readParts(cursor, option, row);
   }
-  cursor.wanted.push(...left.map((candidate) => candidate[0]).filter(isPart));
+  if (cursor.fault === null) cursor.wanted.push(...left.map((candidate) => candidate[0]).filter(isPart));
 }
 
 /** Items with commas between; each is read as the part says and kept in order. */

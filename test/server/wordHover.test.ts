@@ -14,7 +14,8 @@ run A "µ · ₂ 𝒌"
   taken EtOAc 0.100(2) mol/L giving H^+ # µ · ₂
   taken Na2S2O3 5 mmol purity 98 %
   follow EtOAc as pH from p
-  window 1 min 30 s to 2 h
+  fit order 1 in EtOAc
+    window 1 min 30 s to 2 h
 `;
 
 const textOf = (hover: Hover | null): string => (hover === null ? "" : (hover.contents as MarkupContent).value);
@@ -52,10 +53,7 @@ describe("resting on a word", () => {
   it("tells of a quantity its value in other units of its kind, with its uncertainty", async () => {
     assert.equal(await at("25.0(1)"), "**25.00(10) °C** = 298.15(10) K");
     assert.equal(await at("50.00 mL"), "**50 mL** = 0.05 L = 50000 µL = 5e-5 m³");
-    assert.equal(
-      await at("mol/L giving"),
-      "**0.1000(20) mol·L⁻¹** = 100.0(20) mmol·L⁻¹ = 1.000(20)e5 µmol·L⁻¹ = 100.0(20) mol·m⁻³ = 0.1000(20) M",
-    );
+    assert.equal(await at("mol/L giving"), "**0.1000(20) mol·L⁻¹** = 100.0(20) mmol·L⁻¹ = 1.000(20)e5 µmol·L⁻¹");
     assert.match(await at("2 h"), /^\*\*2 h\*\* = 7200 s = 120 min/);
   });
 

@@ -23,7 +23,11 @@ export const clientChanges: Feature = {
       }
       await takeSettings(context);
     });
-    connection.onDidChangeConfiguration(() => takeSettings(context));
+    connection.onDidChangeConfiguration(async () => {
+      await takeSettings(context);
+      // Their switch is read when hints are asked for.
+      if (client.abilities.hintRefresh) await connection.languages.inlayHint.refresh();
+    });
     connection.onNotification(themeChanged, ({ theme }: ThemeChanged) => {
       client.theme = theme;
     });

@@ -2,6 +2,7 @@ import type { Feature } from "../context.js";
 import { clientChanges } from "./clientChanges.js";
 import { codeActions } from "./codeActions.js";
 import { codeLens } from "./codeLens.js";
+import { completion } from "./completion.js";
 import { dataFileHover } from "./dataFileHover.js";
 import { definition } from "./definition.js";
 import { diagnostics } from "./diagnostics.js";
@@ -10,6 +11,7 @@ import { documentSymbols } from "./documentSymbols.js";
 import { foldingRanges } from "./foldingRanges.js";
 import { formatting } from "./formatting.js";
 import { hover } from "./hover.js";
+import { inlayHints } from "./inlayHints.js";
 import { preview } from "./preview.js";
 import { records } from "./records.js";
 import { references } from "./references.js";
@@ -29,11 +31,13 @@ export const features: readonly Feature[] = [
   documentLinks,
   documentSymbols,
   foldingRanges,
+  inlayHints,
   references,
   renaming,
   semanticTokens,
   workspaceSymbols,
   definition,
+  completion,
   dataFileHover,
   watchedFiles,
   status,

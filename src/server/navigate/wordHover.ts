@@ -11,6 +11,7 @@ import { formatQuantity } from "../../quantity/formatNumber.js";
 import { combined, type Quantity } from "../../quantity/quantity.js";
 import { quantityText } from "../../quantity/quantityText.js";
 import { isFault } from "../../quantity/shifted.js";
+import type { Unit } from "../../quantity/unit.js";
 import { printedUnit } from "../../quantity/unitText.js";
 import { usualUnits } from "../../quantity/usualUnits.js";
 import { escapeMarkdown } from "../../report/escape.js";
@@ -70,14 +71,20 @@ function massText(mass: Quantity): string {
   return escapeMarkdown(quantityText(mass, "unicode"));
 }
 
+/** Units of one size, as mL and cm³, say the same number twice. */
+function sizeOf({ factor, offset }: Unit): string {
+  return `${factor} ${offset}`;
+}
+
 /** Other units shown at most. */
 const most = 4;
 
 /** The quantity as it was read and in other units of its kind; null where there are none. */
 export function quantityWords({ value, unit, sources }: Quantity): string | null {
   const u = combined(sources);
+  const sizes = new Set([sizeOf(unit)]);
   const others = usualUnits(unit.dimension).filter(({ unit: other }) => {
-    return other.factor !== unit.factor || other.offset !== unit.offset;
+    return sizes.size < sizes.add(sizeOf(other)).size;
   });
   if (unit.text === "" || others.length === 0) return null;
   const values = others.slice(0, most).map(({ unit: other }) => {
