@@ -24,7 +24,7 @@ export async function leadsOut(uri: string, folders: readonly string[]): Promise
   const target = await realOf(uri);
   if (target === null) return false;
   const real = await Promise.all(folders.map(realOf));
-  return !real.some((folder) => folder !== null && isBelow(folder, target));
+  return !real.some((folder) => folder !== null && (folder === target || isBelow(folder, target)));
 }
 
 async function realOf(uri: string): Promise<string | null> {
