@@ -20,7 +20,7 @@ function overview(): string {
     ...commands.map(({ example }) => `example: ${example}`),
     "",
     "ratewright COMMAND --help tells the options of a command; ratewright --version the version.",
-    "Exit status: 0 no error, 1 an error was found, 2 the command was not understood.",
+    "Exit status: 0 no error and nothing moved, 1 an error was found or something moved, 2 misuse.",
     "",
   ].join("\n");
 }

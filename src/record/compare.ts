@@ -3,9 +3,9 @@ import type { RunRecord } from "./recordShape.js";
 
 /**
  * Why something is otherwise than a record has it: the data files, what the description means, the way numbers are
- * computed; or a result that moved, beyond the digits the record states.
+ * computed, none of these; or it is a result that moved, beyond the digits the record states.
  */
-export type Cause = "data" | "description" | "method" | "result";
+export type Cause = "data" | "description" | "method" | "record" | "result";
 
 /** One thing that moved, in words. */
 export interface Moved {
@@ -23,12 +23,21 @@ export interface Moved {
  */
 export function compare(before: RunRecord, now: RunRecord): Moved[] {
   const facts = movedFacts(factsOf(before), factsOf(now));
-  const causes = [...movedData(before, now), ...movedMeaning(before, now), ...movedMethod(before, now)];
-  const stated = facts.filter(({ stated }) => stated).map(moved("description"));
-  const results = facts.filter(({ stated }) => !stated).map(moved("result"));
-  if (causes.length > 0 || facts.length === 0) return [...order(causes, stated), ...results];
-  const why = facts.some(({ otherUnit }) => otherUnit) ? otherUnits : unexplained;
-  return [why, ...stated, ...results];
+  const data = movedData(before, now);
+  const method = movedMethod(before, now);
+  const units = facts.some(({ otherUnit, stated }) => otherUnit && (stated || data.length === 0));
+  const description = before.meaning !== now.meaning ? [movedMeaning(before, now)] : units ? [otherUnits] : [];
+  const explained = data.length + method.length + description.length > 0 || facts.length === 0;
+  // A stated fact that moved though the description did not, a unit found in a header say, is a result like others.
+  const stated = description.length > 0 ? facts.filter((fact) => fact.stated) : [];
+  return [
+    ...data,
+    ...description,
+    ...stated.map(moved("description")),
+    ...method,
+    ...(explained ? [] : [unexplained]),
+    ...facts.filter((fact) => !stated.includes(fact)).map(moved("result")),
+  ];
 }
 
 /** The meaning is in SI: it does not see in which units a description is written, but results come out in them. */
@@ -40,16 +49,10 @@ const otherUnits: Moved = {
 
 /** What stands in the record cannot follow from the same data, description and method. */
 const unexplained: Moved = {
-  cause: "result",
+  cause: "record",
   what: "the record",
   text: "Neither data, description nor method changed: the record was changed by hand, or this machine computes otherwise.",
 };
-
-/** The stated facts stand behind the sentence that the description changed. */
-function order(causes: readonly Moved[], stated: readonly Moved[]): Moved[] {
-  const behind = causes.findLastIndex(({ cause }) => cause === "data" || cause === "description") + 1;
-  return [...causes.slice(0, behind), ...stated, ...causes.slice(behind)];
-}
 
 function movedData(before: RunRecord, now: RunRecord): Moved[] {
   const earlier = new Map(before.data.map((file) => [file.path, file]));
@@ -71,13 +74,12 @@ function movedData(before: RunRecord, now: RunRecord): Moved[] {
   return [...changed, ...added];
 }
 
-function movedMeaning(before: RunRecord, now: RunRecord): Moved[] {
-  if (before.meaning === now.meaning) return [];
+function movedMeaning(before: RunRecord, now: RunRecord): Moved {
   const versions =
     before.ratewright === now.ratewright
       ? ""
       : ` Or it is the same and version ${now.ratewright} takes it otherwise than version ${before.ratewright} did.`;
-  return [{ cause: "description", what: "the description", text: `What the description means changed.${versions}` }];
+  return { cause: "description", what: "the description", text: `What the description means changed.${versions}` };
 }
 
 function movedMethod(before: RunRecord, now: RunRecord): Moved[] {
@@ -109,7 +111,14 @@ function movedFacts(before: readonly Fact[], now: readonly Fact[]): MovedFact[] 
     const { what, stated } = fact;
     const found = later.get(what);
     if (found === undefined) {
-      return [{ what, stated, otherUnit: false, text: `${what} is no longer there; it was ${fact.text}.` }];
+      return [
+        {
+          what,
+          stated,
+          otherUnit: false,
+          text: `${what} is no longer there${fact.text === "" ? "" : `; it was ${fact.text}`}.`,
+        },
+      ];
     }
     const words = differences(fact, found);
     const otherUnit = fact.words.get("unit") !== found.words.get("unit");
@@ -117,7 +126,12 @@ function movedFacts(before: readonly Fact[], now: readonly Fact[]): MovedFact[] 
   });
   const added = now
     .filter(({ what }) => !earlier.has(what))
-    .map(({ what, stated, text }) => ({ what, stated, otherUnit: false, text: `${what} is new: ${text}.` }));
+    .map(({ what, stated, text }) => ({
+      what,
+      stated,
+      otherUnit: false,
+      text: `${what} is new${text === "" ? "" : `: ${text}`}.`,
+    }));
   return [...changed, ...added];
 }
 

@@ -23,7 +23,7 @@ export interface Fact {
 }
 
 /** Parts that repeat what the description says. */
-const statedParts = new Set(["conditions", "taken", "sources", "window"]);
+const statedParts = new Set(["conditions", "taken", "sources"]);
 /** Facts about an item as a whole that follow from data. */
 const found = new Set(["stop"]);
 
@@ -60,7 +60,19 @@ function wordFact(id: string, key: string, value: string): Fact {
   return { what, stated: !found.has(key), text: value, numbers: new Map(), words: new Map([[key, value]]) };
 }
 
+/** What the keys of a record are called in a sentence. */
 const keyWords: Readonly<Record<string, string>> = {
+  degreesOfFreedom: "degrees of freedom",
+  interval95: "95 % interval",
+  uRandom: "random part of u",
+  uCommon: "common part of u",
+  uCorrelated: "u of dependent readings",
+  reducedChiSquare: "reduced chi²",
+  aicc: "AICc",
+  condition: "condition number",
+  correlation: "correlation of neighbouring residuals",
+  residual: "residual standard deviation",
+  sha256: "SHA-256",
   timeColumn: "column of the time",
   on: "what is fitted",
   uKind: "kind of uncertainty",
@@ -73,18 +85,36 @@ function factOf(fact: Readonly<Record<string, unknown>>, stated: boolean): Fact 
   const u = typeof fact["u"] === "number" ? fact["u"] : null;
   for (const [key, value] of Object.entries(fact)) {
     if (key === "what" || key === "text") continue;
-    if (typeof value === "number") numbers.set(key, { value, within: allowance(key, value, u) });
+    const called = keyWords[key] ?? key;
+    if (typeof value === "number") numbers.set(called, { value, within: allowance(key, value, u) });
     else if (key === "rows" && Array.isArray(value)) {
       for (const [name, entry] of covarianceNumbers(value, fact["with"])) numbers.set(name, entry);
     } else if (Array.isArray(value) && value.some((entry) => typeof entry === "number")) {
       for (const [index, entry] of value.entries()) {
-        const name = `${key} ${index + 1}`;
+        const name = entryName(fact, key, index);
         if (typeof entry === "number") numbers.set(name, { value: entry, within: allowance(key, entry, u) });
         else words.set(name, String(entry));
       }
-    } else words.set(key, Array.isArray(value) ? value.join(", ") : String(value));
+    } else words.set(called, Array.isArray(value) ? value.join(", ") : String(value));
   }
   return { what: String(fact["what"]), stated, text: textOf(fact), numbers, words };
+}
+
+/** Lists that say of each entry of another list what it is. */
+const namedBy: Readonly<Record<string, readonly [words: string, list: string]>> = {
+  shares: ["share of ", "sources"],
+  statistics: ["", "tests"],
+  p: ["p of the ", "tests"],
+  weights: ["weight of ", "fits"],
+};
+
+/** One entry of a list of numbers, in words. */
+function entryName(fact: Readonly<Record<string, unknown>>, key: string, index: number): string {
+  const [words, list] = namedBy[key] ?? ["", ""];
+  const names = fact[list];
+  const name: unknown = Array.isArray(names) ? names[index] : undefined;
+  if (typeof name === "string") return words + name;
+  return key === "interval95" ? `${index === 0 ? "lower" : "upper"} end of the 95 % interval` : `${key} ${index + 1}`;
 }
 
 /** How far a number of a fact may move by rounding alone. */
@@ -112,9 +142,11 @@ function covarianceNumbers(rows: readonly unknown[], names: unknown): [string, A
   );
 }
 
-/** A quantity as it is written; of anything else its parts by name, the first words of it left out. */
+/** A quantity as it is written; of anything else its parts by name, where they are not in its words already. */
 function textOf(fact: Readonly<Record<string, unknown>>): string {
   if (typeof fact["text"] === "string") return fact["text"];
+  if ("code" in fact) return typeof fact["times"] === "number" && fact["times"] > 1 ? `${fact["times"]} times` : "";
   const parts = Object.entries(fact).filter(([key, value]) => !["what", "name"].includes(key) && value !== null);
-  return parts.map(([key, value]) => `${key} ${Array.isArray(value) ? value.join(", ") : String(value)}`).join(", ");
+  const words = (value: unknown): string => (Array.isArray(value) ? value.map(words).join(", ") : String(value));
+  return parts.map(([key, value]) => `${keyWords[key] ?? key} ${words(value)}`).join(", ");
 }

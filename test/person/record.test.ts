@@ -43,7 +43,7 @@ describe("a person with a record", () => {
       const at = line.findIndex((text) => text.includes("10.0 mL"));
       await select(session, at + 1, (line[at] ?? "").indexOf("10.0") + 1, 4);
       await type(session, "10.1");
-      await lens(session, "record stale: what the description means changed").waitFor();
+      await lens(session, "record stale: the description changed").waitFor();
       await takePictures(session, "record.stale");
       await changeTheme(session, "light");
 

@@ -62,7 +62,7 @@ describe("the record beside an open description", () => {
     await untilTitle(/up to date/);
     await client.edit(name, "0.1000(5)", "0.1200(5)");
     const stale = await untilTitle(/stale/);
-    assert.match(stale[0] ?? "", /^record stale: what the description means changed, and \d+ more$/);
+    assert.match(stale[0] ?? "", /^record stale: the description changed, \d+ results? moved$/);
     assert.equal(stale[1], "write it anew");
     const { text } = await difference();
     assert.match(
@@ -83,7 +83,7 @@ describe("the record beside an open description", () => {
     const csv = client.files.get(`${folder}/data/a.csv`) ?? "";
     client.files.set(`${folder}/data/a.csv`, `${csv.trimEnd()}\n`.replace(/\n([^\n]*)\n$/, "\n"));
     await client.fileChanged("data/a.csv");
-    assert.match((await untilTitle(/stale/))[0] ?? "", /^record stale: data\/a/);
+    assert.match((await untilTitle(/stale/))[0] ?? "", /^record stale: data\/a\.csv changed, \d+ results moved$/);
     client.files.set(`${folder}/data/a.csv`, csv);
     await client.fileChanged("data/a.csv");
     await untilTitle(/up to date/);

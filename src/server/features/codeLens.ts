@@ -57,10 +57,17 @@ function linesOf(context: ServerContext, uri: string, verdict: Verdict | string)
   }
 }
 
-/** The first thing that moved, and how many more. */
+/** What changed, and how many results moved with it. */
 function staleWords(moved: Extract<Verdict, { kind: "moved" }>["moved"]): string {
-  const [first] = moved;
-  const words =
-    first === undefined ? "" : `${first.text.slice(0, 1).toLowerCase()}${first.text.slice(1)}`.replace(/[.:].*$/s, "");
-  return moved.length <= 1 ? words : `${words}, and ${moved.length - 1} more`;
+  const files = [...new Set(moved.filter(({ cause }) => cause === "data").map(({ what }) => what))];
+  const changed = [
+    ...(files.length === 0 ? [] : [files.length === 1 ? `${files[0]} changed` : `${files.length} data files changed`]),
+    ...(moved.some(({ cause }) => cause === "description") ? ["the description changed"] : []),
+    ...(moved.some(({ cause }) => cause === "method") ? ["numbers are computed in another way"] : []),
+    ...(moved.some(({ cause }) => cause === "record") ? ["the record itself was changed"] : []),
+  ];
+  const results = moved.filter(({ cause }) => cause === "result").length;
+  return [...changed, ...(results === 0 ? [] : [`${results} ${results === 1 ? "result" : "results"} moved`])].join(
+    ", ",
+  );
 }
