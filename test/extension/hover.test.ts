@@ -1,6 +1,7 @@
 import assert from "node:assert/strict";
-import { commands, type Hover, type MarkdownString, type TextDocument } from "vscode";
-import { commandLine, openDescription } from "./descriptions.js";
+import { commands, type Hover, type MarkdownString, type TextDocument, Uri, window, workspace } from "vscode";
+import { until } from "../editor/until.js";
+import { commandLine, folder, openDescription } from "./descriptions.js";
 
 /** What the editor shows on resting at a stretch of text, as it reads: without the backslashes of Markdown. */
 async function hoverAt(document: TextDocument, words: string): Promise<string> {
@@ -27,8 +28,23 @@ describe("hovers in the real editor", () => {
     });
   }
 
-  it("are none where no column is meant", async () => {
+  it("tell of keywords, quantities and formulas what they mean, and nothing of a path", async () => {
     const document = await openDescription("peroxide.raterun");
-    assert.equal(await hoverAt(document, "temperature"), "");
+    assert.match(await hoverAt(document, "temperature"), /temperature of the reacting mixture/);
+    assert.match(await hoverAt(document, "25.0(1)"), /298\.15\(10\) K/);
+    assert.match(await hoverAt(document, "KI "), /molar mass 165\.99\d*\(\d+\) g/);
+    assert.equal(await hoverAt(document, "data/peroxide-a"), "");
+  });
+
+  it("are the same over the header cell of the column in its data file", async () => {
+    const description = await openDescription("peroxide.raterun");
+    const expected = await hoverAt(description, "column     c");
+    const data = await workspace.openTextDocument(Uri.joinPath(folder(), "data", "peroxide-a.csv"));
+    await window.showTextDocument(data);
+    // Run B has a file of its own: over the header of A's file stands A alone.
+    await until("the hover of the header", async () => (await hoverAt(data, "c(H2O2)")).length > 0);
+    const [first] = expected.split("\n\n---\n\n");
+    assert.equal(await hoverAt(data, "c(H2O2)"), first);
+    assert.equal(await hoverAt(data, "\n"), "");
   });
 });
