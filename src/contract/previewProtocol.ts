@@ -95,6 +95,12 @@ export interface PlotResidual {
   readonly order: number;
 }
 
+/** Notification from the editor: no preview shows this description any more. */
+export const previewLeft = "ratewright/previewLeft";
+export interface PreviewLeft {
+  readonly uri: string;
+}
+
 /** Request: the edit that gives fits of a run a window. */
 export const windowEdit = "ratewright/windowEdit";
 export interface WindowQuestion {

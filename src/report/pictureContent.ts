@@ -54,7 +54,7 @@ export function pictureContent(run: Run, follow: Follow): PictureContent | null 
     timeUnit: time.unit,
     signalUnit: signal.unit,
     readings,
-    thinned: indices.length < numbersIn(time.values, signal.values),
+    thinned: indices.length < Math.max(follow.used, numbersIn(time.values, signal.values)),
     fits: run.fits.flatMap((fit, index) =>
       fit.curve === undefined || fit.follow !== follow.id ? [] : [{ fit, number: index + 1, curve: fit.curve }],
     ),

@@ -24,6 +24,8 @@ export interface ServerContext {
   readonly document: (open: TextDocument) => Document;
   readonly loop: FindingsLoop;
   readonly shown: ShownDiagnostics;
+  /** URIs of the descriptions that a preview shows */
+  readonly previewed: Set<string>;
   readonly log: (line: string) => void;
   /** Forgets what was read and works everything out anew: what may be read has changed. */
   readonly renew: () => void;

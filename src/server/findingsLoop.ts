@@ -1,6 +1,7 @@
 import type { TextDocuments } from "vscode-languageserver";
 import type { TextDocument } from "vscode-languageserver-textdocument";
 import type { Description } from "../contract/findings.js";
+import type { Curves } from "../workspace/computer.js";
 import type { Document, Workspace } from "../workspace/workspace.js";
 
 /** Keeps the findings of open descriptions up to date: waits for a pause in the typing, then works. */
@@ -24,6 +25,8 @@ export interface LoopInput {
   readonly documents: TextDocuments<TextDocument>;
   readonly workspace: () => Workspace;
   readonly document: (open: TextDocument) => Document;
+  /** with which curves a description is wanted: one that is previewed is worked out once for all views */
+  readonly curves: (uri: string) => Curves;
   /** pause after the last change, ms */
   readonly delay: () => number;
 }
@@ -33,7 +36,8 @@ interface Turn {
   readonly timer: ReturnType<typeof setTimeout>;
 }
 
-export function createFindingsLoop({ documents, workspace, document, delay }: LoopInput): FindingsLoop {
+export function createFindingsLoop(input: LoopInput): FindingsLoop {
+  const { documents, workspace, document, delay } = input;
   const turns = new Map<string, Turn>();
   const findingsListeners: ((open: TextDocument, description: Description) => void)[] = [];
   const statusListeners: ((uri: string, status: LoopStatus) => void)[] = [];
@@ -54,7 +58,7 @@ export function createFindingsLoop({ documents, workspace, document, delay }: Lo
     const { version } = open;
     const begin = performance.now();
     try {
-      const description = await workspace().describe(document(open), { curves: false, signal });
+      const description = await workspace().describe(document(open), { curves: input.curves(uri), signal });
       if (description === null || signal.aborted || documents.get(uri)?.version !== version) return;
       for (const listener of findingsListeners) listener(open, description);
       tell(uri, { state: "up to date", milliseconds: Math.round(performance.now() - begin) });

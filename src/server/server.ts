@@ -4,6 +4,7 @@ import type { FolderReader } from "../contract/folderReader.js";
 import type { Reader } from "../contract/reader.js";
 import { version } from "../contract/version.js";
 import type { Writer } from "../contract/writer.js";
+import type { Curves } from "../workspace/computer.js";
 import type { FileAccess } from "../workspace/loadFiles.js";
 import { createWorkspace, type Document, type Workspace } from "../workspace/workspace.js";
 import { type ClientState, createClientState, readInitializationOptions } from "./clientState.js";
@@ -47,7 +48,9 @@ export function startServer(connection: Connection, host: ServerHost): void {
   };
   const workspace = (): Workspace => current().workspace;
   const delay = (): number => client.settings.preview.updateDelay;
-  const loop = createFindingsLoop({ documents, workspace, document, delay });
+  const previewed = new Set<string>();
+  const curves = (uri: string): Curves => (previewed.has(uri) ? "thinned" : false);
+  const loop = createFindingsLoop({ documents, workspace, document, delay, curves });
   const context: ServerContext = {
     connection,
     documents,
@@ -59,6 +62,7 @@ export function startServer(connection: Connection, host: ServerHost): void {
     document,
     loop,
     shown: createShownDiagnostics(),
+    previewed,
     log,
     renew() {
       opened?.computer.end();

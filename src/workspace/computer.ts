@@ -1,9 +1,13 @@
 import type { Description } from "../contract/findings.js";
 import { type Bound, bind } from "../language/bind/bind.js";
 import { parse } from "../language/parse.js";
+import { thinCurves } from "../report/thinCurves.js";
 import { type ColumnStore, columnStore } from "./columnStore.js";
 import { describe } from "./describe.js";
 import type { DataFileState } from "./fileContent.js";
+
+/** Whether findings hold the blocks that only pictures need: all of them, or as much as the eye can tell apart. */
+export type Curves = boolean | "thinned";
 
 /** All that the findings of a description follow from. Plain data, so that it can go to a worker. */
 export interface Job {
@@ -13,7 +17,7 @@ export interface Job {
   /** the data files by their path as written */
   readonly files: ReadonlyMap<string, DataFileState>;
   readonly sizeLimit: number;
-  readonly curves: boolean;
+  readonly curves: Curves;
 }
 
 /** Works out findings: here, or in a worker. Null when it was told to stop. */
@@ -32,8 +36,9 @@ export interface JobTools {
 export async function computeJob(job: Job, tools: JobTools): Promise<Description | null> {
   const bound: Bound = bind(parse(job.uri, job.text));
   const { path, files, sizeLimit, curves } = job;
-  const description = await describe(bound, { path, files, sizeLimit, curves, ...tools });
-  return tools.stopped() ? null : description;
+  const description = await describe(bound, { path, files, sizeLimit, curves: curves !== false, ...tools });
+  if (tools.stopped()) return null;
+  return curves === "thinned" ? thinCurves(description) : description;
 }
 
 /** Works in the same thread and gives way by `breathe`. */

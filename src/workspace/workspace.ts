@@ -3,7 +3,7 @@ import type { DataOptions } from "../data/dataOptions.js";
 import { type HeaderCell, headerCells } from "../data/headerCells.js";
 import { type Bound, bind } from "../language/bind/bind.js";
 import { parse } from "../language/parse.js";
-import type { Computer, Job } from "./computer.js";
+import type { Computer, Curves, Job } from "./computer.js";
 import type { DataFileState, FileContent } from "./fileContent.js";
 import { dataLocations, type FileAccess } from "./loadFiles.js";
 
@@ -20,7 +20,7 @@ export interface Workspace {
   /** Meaning and problems that the text alone tells; at once. */
   bound(document: Document): Bound;
   /** Findings; null when told to stop. */
-  describe(document: Document, options: { curves: boolean; signal: AbortSignal }): Promise<Description | null>;
+  describe(document: Document, options: { curves: Curves; signal: AbortSignal }): Promise<Description | null>;
   /** The header row of a data file by its URI, whatever its size; null where it has none or cannot be read. */
   headers(uri: string, options: DataOptions): Promise<readonly HeaderCell[] | null>;
   /** A file changed, came or went: what was read of it is forgotten. Gives the descriptions that use it. */
@@ -76,8 +76,10 @@ export function createWorkspace(access: FileAccess, computer: Computer): Workspa
         ),
       );
       if (signal.aborted) return null;
-      const key = `${curves} ${document.path} ${states.map(([, state]) => ("key" in state ? state.key : "")).join(" ")}`;
-      const before = entry.results.get(key);
+      const basis = `${document.path} ${states.map(([, state]) => ("key" in state ? state.key : "")).join(" ")}`;
+      const key = `${curves} ${basis}`;
+      // Findings that hold more than is asked for answer as well.
+      const before = entry.results.get(key) ?? (curves === false ? entry.results.get(`thinned ${basis}`) : undefined);
       if (before !== undefined) return before;
       const { uri, text, path } = document;
       const job: Job = { uri, text, path, files: new Map(states), sizeLimit: access.sizeLimit, curves };

@@ -6,9 +6,11 @@ import {
   type ExportFormat,
   type ExportQuestion,
   type FromPage,
+  type PreviewLeft,
   type PreviewPage,
   type PreviewQuestion,
   previewExport,
+  previewLeft,
   previewPage,
   type ToPage,
   type WindowAnswer,
@@ -114,6 +116,11 @@ export function createPreviewPanel(panel: WebviewPanel, { client, extension, log
     }
   };
 
+  const leave = (uri: string): void => {
+    const left: PreviewLeft = { uri };
+    if (client.isRunning()) void client.sendNotification(previewLeft, left);
+  };
+
   const writeWindow = async (plotId: string, from: number, to: number): Promise<void> => {
     const plot = page?.plots.find(({ id }) => id === plotId);
     if (page === null || plot === undefined || page.run === null) return;
@@ -190,6 +197,7 @@ export function createPreviewPanel(panel: WebviewPanel, { client, extension, log
 
   const api: PreviewPanel = {
     look(at) {
+      if (look !== null && look.uri !== at.uri) leave(look.uri);
       look = at;
       if (at.line !== null) post({ kind: "cursor", line: at.line });
       void ask();
@@ -224,6 +232,7 @@ export function createPreviewPanel(panel: WebviewPanel, { client, extension, log
   panel.onDidDispose(() => {
     clearTimeout(behind);
     asking?.cancel();
+    if (look !== null) leave(look.uri);
     look = null;
     ready = false;
   });

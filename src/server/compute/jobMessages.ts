@@ -1,4 +1,5 @@
 import type { Description } from "../../contract/findings.js";
+import type { Curves } from "../../workspace/computer.js";
 import type { DataFileState } from "../../workspace/fileContent.js";
 
 /** A data file of a job: one whose bytes were sent before, by its key, or all there is to know of it. */
@@ -11,7 +12,7 @@ export interface SentJob {
   readonly path: string;
   readonly files: ReadonlyMap<string, SentFile>;
   readonly sizeLimit: number;
-  readonly curves: boolean;
+  readonly curves: Curves;
 }
 
 /** What the server says to the worker. `stop[0]` other than 0 stops the job; null: the worker is ended to stop it. */

@@ -4,14 +4,17 @@ import type { Description } from "../../contract/findings.js";
 import {
   type ExportAnswer,
   type ExportQuestion,
+  type PreviewLeft,
   type PreviewPage,
   type PreviewQuestion,
   previewExport,
+  previewLeft,
   previewPage,
   type WindowAnswer,
   type WindowQuestion,
   windowEdit,
 } from "../../contract/previewProtocol.js";
+import type { Curves } from "../../workspace/computer.js";
 import { abortSignalOf } from "../abortSignal.js";
 import type { Feature, ServerContext } from "../context.js";
 import { exportOf } from "../preview/exportOf.js";
@@ -24,19 +27,22 @@ export const preview: Feature = {
   start(context) {
     const { connection, documents } = context;
     connection.onRequest(previewPage, async (question: PreviewQuestion, token): Promise<PreviewPage | null> => {
-      const found = await findingsOf(context, question.uri, token);
+      if (documents.get(question.uri) !== undefined) context.previewed.add(question.uri);
+      const found = await findingsOf(context, question.uri, "thinned", token);
       if (found === null) return null;
       const { document, description } = found;
       const bound = context.workspace().bound(context.document(document));
       return pageOf({ document, bound, description, access: context.access() }, question);
     });
+    connection.onNotification(previewLeft, ({ uri }: PreviewLeft) => void context.previewed.delete(uri));
+    documents.onDidClose(({ document }) => void context.previewed.delete(document.uri));
     connection.onRequest(windowEdit, ({ uri, version, run, fits, ...span }: WindowQuestion): WindowAnswer => {
       const document = documents.get(uri);
       if (document === undefined || document.version !== version) return null;
       return windowEdits(context.workspace().bound(context.document(document)), run, fits, span);
     });
     connection.onRequest(previewExport, async (question: ExportQuestion, token): Promise<ExportAnswer> => {
-      const found = await findingsOf(context, question.uri, token);
+      const found = await findingsOf(context, question.uri, true, token);
       return found === null ? null : exportOf(found.description, question);
     });
   },
@@ -46,13 +52,14 @@ export const preview: Feature = {
 async function findingsOf(
   context: ServerContext,
   uri: string,
+  curves: Curves,
   token: CancellationToken,
 ): Promise<{ document: TextDocument; description: Description } | null> {
   const document = context.documents.get(uri);
   if (document === undefined) return null;
   const { version } = document;
   const signal = abortSignalOf(token);
-  const description = await context.workspace().describe(context.document(document), { curves: true, signal });
+  const description = await context.workspace().describe(context.document(document), { curves, signal });
   if (description === null || context.documents.get(uri)?.version !== version) return null;
   return { document, description };
 }
