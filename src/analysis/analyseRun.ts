@@ -1,7 +1,8 @@
 import { ionsOf } from "../chemistry/handbook/dissociation.js";
-import type { Run as RunFinding } from "../contract/findings.js";
+import type { Q, Run as RunFinding } from "../contract/findings.js";
 import { problem } from "../contract/problem.js";
 import { monitors } from "../monitor/monitors.js";
+import { isKind } from "../quantity/kinds.js";
 import { noUnit } from "../quantity/unitOf.js";
 import type { Follow, Run } from "../study/run.js";
 import { cautionsOf } from "./cautions.js";
@@ -87,7 +88,7 @@ function takenOf(run: Run, amounts: Stoichiometry, { place }: RunInput): RunFind
     const initial = amounts.initial.get(taken.species.key);
     return {
       species: taken.species.key,
-      given: shownQuantity(taken.given),
+      given: givenOf(taken),
       stock: stockText(taken),
       concentration: initial === undefined ? null : shown(initial.value, standardUncertainty(initial), concentration),
       limiting: amounts.limiting !== null && isOrGives(taken, amounts.limiting),
@@ -103,9 +104,15 @@ function isOrGives({ species, ions }: Run["taken"][number], key: string): boolea
   return given.includes(key);
 }
 
+/** What the line states; a share of the mixture with what it is a share of. */
+function givenOf({ given, stock }: Run["taken"][number]): Q {
+  const q = shownQuantity(given);
+  return isKind(given.unit, "number") && stock?.kind === "share" ? { ...q, text: `${q.text} by ${stock.basis}` } : q;
+}
+
 /** `0.5000(50) mol L^-1`, `30 % by mass`. */
-function stockText({ stock }: Run["taken"][number]): string | null {
-  if (stock === null) return null;
+function stockText({ given, stock }: Run["taken"][number]): string | null {
+  if (stock === null || isKind(given.unit, "number")) return null;
   const { text } = shownQuantity(stock.value);
   return stock.kind === "share" ? `${text} by ${stock.basis}` : text;
 }

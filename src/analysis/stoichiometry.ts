@@ -36,6 +36,8 @@ export function takenConcentration(run: Run, taken: Taken): Uncertain | null {
     const molar = molarMassOf(species);
     return molar === null ? null : quotient(stated(taken, given), named(`molar mass of ${species.key}`, molar));
   }
+  // A share of the mixture itself.
+  if (isKind(given.unit, "number")) return stockOf(taken);
   if (run.volume === null) return null;
   const amount = amountTaken(taken);
   return amount === null ? null : quotient(amount, named("volume", run.volume.value));

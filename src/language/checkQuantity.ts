@@ -1,5 +1,5 @@
 import { type Fault, fault, type Mend, replacement, type Span } from "../contract/problem.js";
-import { type Basis, bases } from "../quantity/basis.js";
+import { type Basis, bases, isShare } from "../quantity/basis.js";
 import { checkDimension } from "../quantity/checkDimension.js";
 import type { Quantity } from "../quantity/quantity.js";
 import { type KindOfQuantity, type QuantityKind, quantityKinds } from "./quantityKinds.js";
@@ -32,10 +32,12 @@ export function checkQuantity(written: WrittenQuantity, text: string, kind: Quan
       shown !== undefined &&
       sharesOfMixture.has(quantity.unit.text)
     ) {
-      const mends = kind === "stock" ? bases.map((basis) => shareBy(basis, shown, span)) : [];
+      const mends = bases.map((basis) => shareBy(basis, shown, span));
       const share = `${text.slice(written.number.start, written.number.end)} ${shown}`;
       return fault("share-of-what", { share }, span, mends);
     }
+    // A share of the mixture itself, with what it is a share of.
+    if (kind === "taken" && written.basis !== null && isShare(quantity.unit)) return beyondWhole(written, text);
     const wrong = checkDimension(written.unit === null ? null : quantity.unit, { name, dimensions }, span, shown);
     if (wrong !== null) return units === undefined ? wrong : inOwnUnits(wrong, units, written);
   }
@@ -47,12 +49,15 @@ export function checkQuantity(written: WrittenQuantity, text: string, kind: Quan
   if (atLeast === "above zero" && quantity.value <= 0) {
     return fault("number-below-zero", { what: name, limit: "more than zero" }, span);
   }
-  if (ofWhole === true && quantity.value > 1) {
-    const bare = written.unit === null && quantity.value <= 100;
-    const mends = bare ? [{ text: `${text} %`, edits: [{ start: text.length, end: text.length, text: " %" }] }] : [];
-    return fault("share-beyond-whole", { share: text }, span, mends);
-  }
-  return null;
+  return ofWhole === true ? beyondWhole(written, text) : null;
+}
+
+/** A share of more than the whole; a bare number up to 100 was meant in per cent. */
+function beyondWhole({ quantity, unit }: WrittenQuantity, text: string): Fault | null {
+  if (quantity.value <= 1) return null;
+  const bare = unit === null && quantity.value <= 100;
+  const mends = bare ? [{ text: `${text} %`, edits: [{ start: text.length, end: text.length, text: " %" }] }] : [];
+  return fault("share-beyond-whole", { share: text }, { start: 0, end: text.length }, mends);
 }
 
 /** A fault of the dimension in the words of the trade. */

@@ -23,7 +23,10 @@ export interface Share {
 export interface Taken {
   readonly species: Species;
   readonly given: Quantity;
-  /** of the stock, where `given` is a volume of one: a concentration, or a share of it */
+  /**
+   * of the stock, where `given` is a volume of one: a concentration, or a share of it; where `given` is itself a share of
+   * the mixture, that
+   */
   readonly stock:
     | { readonly kind: "concentration"; readonly value: Quantity }
     | ({ readonly kind: "share" } & Share)

@@ -227,6 +227,11 @@ run X
       wishes: "  fit order 1 in H2O2\n",
     });
     near((await run(taken("3.4014 g/L"))).taken[0]?.concentration?.value, 0.1, 1e-3);
+    // 3 % by mass, 1.01 g/mL: 0.03 × 1010 g/L / 34.014 g/mol = 0.8908 mol/L
+    const share = (await run(taken("3.0 % by mass density 1.01 g/mL"))).taken[0];
+    near(share?.concentration?.value, 0.8908, 1e-4);
+    assert.equal(share?.given.text, "3 % by mass");
+    assert.ok((await grave(taken("3.0 % by mass"))).includes("stock-needs-density"));
     assert.deepEqual(await grave(taken("0.1 mol/L purity 50 %")), ["taken-part-unused"]);
     assert.deepEqual(await grave(taken("10 mL of 0.5 mol/L density 1.1 g/mL")), ["taken-part-unused"]);
     assert.deepEqual(await grave(taken("0.17 g purity 98 %")), []);

@@ -88,7 +88,7 @@ const cases: readonly Case[] = [
   {
     put: ["H2O2 0.1 mol/L", "H2O2 30 %"],
     said: ["share-of-what “%”: 30 % of what: by mass, by amount or by volume?"],
-    mend: null,
+    mend: "H2O2 30 % by mass",
   },
   {
     put: ["H2O2 0.1 mol/L", "Fe3+ 0.1 mol/L as inert"],

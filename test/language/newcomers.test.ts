@@ -263,7 +263,13 @@ const mistakes: readonly Mistake[] = [
     on: "h2o2",
     mends: ["follow H2O2"],
   },
-  { what: "a share of who knows what", put: ["0.100 mol/L", "30 %"], code: "share-of-what", on: "%", mends: [] },
+  {
+    what: "a share of who knows what",
+    put: ["0.100 mol/L", "0.3 %"],
+    code: "share-of-what",
+    on: "%",
+    mends: ["0.3 % by mass", "0.3 % by amount", "0.3 % by volume"],
+  },
   {
     what: "a stock of who knows what",
     put: ["0.100 mol/L", "0.512 mL of 30 % density 1.11 g/mL"],

@@ -101,7 +101,7 @@ export const languageMessages = {
     "error",
     "A share of a mixture could be by mass, by amount or by volume.",
     ({ share }: { share: string }) =>
-      `${share} of what: by mass, by amount or by volume? A stock says it, as in 5.0 mL of 30 % by mass density 1.11 g/mL; otherwise give a concentration, an amount or a mass.`,
+      `${share} of what: by mass, by amount or by volume? Say it, with the density where it is needed, as in 30 % by mass density 1.11 g/mL.`,
   ),
   "order-in-words": message(
     "error",

@@ -38,7 +38,8 @@ export function bindTaken(binding: Binding, lines: readonly Statement[], reactio
 }
 
 function stockOf(statement: Statement): Taken["stock"] {
-  const field = fieldOf(statement, "stock");
+  const given = fieldOf(statement, "given");
+  const field = given?.kind === "quantity" && given.basis !== null ? given : fieldOf(statement, "stock");
   if (field?.kind !== "quantity") return null;
   if (field.basis === null) return { kind: "concentration", value: field.quantity };
   return { kind: "share", value: field.quantity, basis: field.basis };
@@ -56,6 +57,7 @@ function ionsOnLine(binding: Binding, statement: Statement, reactions: readonly 
 /** A volume needs the strength of its stock; anything else has none. */
 function checkStock(binding: Binding, statement: Statement, { species, given, stock, density }: Taken): void {
   const isVolume = isKind(given.unit, "volume");
+  const isShareOfMixture = isKind(given.unit, "number");
   const origin = originOf(binding.uri, statement, "given");
   if (isVolume && stock === null) {
     report(
@@ -63,18 +65,18 @@ function checkStock(binding: Binding, statement: Statement, { species, given, st
       problem("taken-volume-of-what", { species: species.key, volume: textOf(statement, "given") ?? "" }, origin),
     );
   }
-  if (isVolume && stock !== null) {
+  if ((isVolume || isShareOfMixture) && stock !== null) {
     const molarMass =
       species.molarMass?.value ?? (species.formula === null ? null : molarMassOfFormula(species.formula));
     const pureDensity = stock.kind === "share" && stock.basis === "volume" ? density : null;
     const facts = { species: species.key, molarMass, density, pureDensity, solventMolarMass: null };
-    const field = fieldOf(statement, "stock");
+    const field = fieldOf(statement, isVolume ? "stock" : "given");
     const found = field === null ? null : stockConcentration(stock, facts, field.span);
     if (found !== null && isFault(found)) reportIn(binding, statement, 0, found);
   }
   sayUnused(binding, statement, "purity", isKind(given.unit, "mass"));
   sayUnused(binding, statement, "density", stock?.kind === "share");
-  if (!isVolume && stock !== null) {
+  if (!isVolume && fieldOf(statement, "stock") !== null) {
     const of = textOf(statement, "stock") ?? "";
     report(binding, problem("stock-without-volume", { stock: of }, originOf(binding.uri, statement, "stock")));
   }

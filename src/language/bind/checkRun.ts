@@ -4,6 +4,9 @@ import type { Run } from "../../study/run.js";
 import type { Statement } from "../syntax.js";
 import { type Binding, lineBelow, report } from "./binding.js";
 
+/** What becomes a concentration only by the volume of the mixture. */
+const needsVolume = ["amount", "mass", "volume"] as const;
+
 /** Says on the `run` line what the run lacks. A line that is there but broken is not missing. */
 export function checkRun(
   binding: Binding,
@@ -37,9 +40,7 @@ export function checkRun(
     report(binding, problem("run-lacks-temperature", say, origin, below("temperature 25.0 °C")));
   }
   if (!written.has("volume")) {
-    const needing = run.taken.find(
-      ({ given }) => !isKind(given.unit, "concentration") && !isKind(given.unit, "massConcentration"),
-    );
+    const needing = run.taken.find(({ given }) => needsVolume.some((kind) => isKind(given.unit, kind)));
     if (needing !== undefined) {
       const args = { ...say, species: needing.species.key };
       report(binding, problem("run-lacks-volume", args, origin, below("volume 50.00 mL")));
