@@ -1,5 +1,6 @@
 // Shows the tool at work on the samples: node src/build/start.mjs [--editor]
 // At a terminal, or with --editor, it ends by serving the editor until Ctrl-C.
+import { mkdirSync } from "node:fs";
 import { join } from "node:path";
 import { parseArgs } from "node:util";
 import { installPackages, root } from "./install.mjs";
@@ -32,6 +33,9 @@ try {
     console.log(`\nratewright ${verb} samples\n`);
     await node([command, verb, "samples"], [0, 1]);
   }
+  mkdirSync(join(root, "artefacts"), { recursive: true });
+  console.log("");
+  await node([command, "report", "--html", join("artefacts", "report.html"), "samples"], [0, 1]);
   if (values.editor || (process.stdin.isTTY && process.stdout.isTTY)) await serveEditor();
 } catch (error) {
   console.error(error.message);
