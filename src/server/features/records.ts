@@ -6,6 +6,7 @@ import {
   writeRecord,
 } from "../../contract/recordProtocol.js";
 import { countWords } from "../../report/diagnosticText.js";
+import { wrappedText } from "../../report/wrappedText.js";
 import { verdictLines } from "../../workspace/verdictText.js";
 import { reasonToKeep, recordBeside, recordNow } from "../../workspace/verify.js";
 import { abortSignalOf } from "../abortSignal.js";
@@ -69,7 +70,14 @@ async function difference(context: ServerContext, uri: string, signal: AbortSign
   const names = [nameOf(uri), nameOf(recordBeside(uri))] as const;
   if (typeof verdict === "string") return `${names[1]} cannot be read: ${verdict}.\n`;
   const lines = verdictLines(verdict, ...names, "the command “Ratewright: Write Record”");
-  return lines.length === 0 ? `${names[0]}: nothing moved since ${names[1]} was written.\n` : `${lines.join("\n")}\n`;
+  return lines.length === 0
+    ? `${names[0]}: nothing moved since ${names[1]} was written.\n`
+    : `${lines.flatMap(wrapped).join("\n")}\n`;
+}
+
+/** A line of a difference as a text to read has it: a long one goes on below its words. */
+function wrapped(line: string): string[] {
+  return line.startsWith("  ") ? wrappedText(line.trim(), "  ") : [line];
 }
 
 function nameOf(uri: string): string {
