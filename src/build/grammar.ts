@@ -90,7 +90,14 @@ function wordsOf(parts: readonly Part[]): string[] {
       case "optional":
         return wordsOf(part.parts);
       case "either":
+      case "any":
         return part.options.flatMap((option) => wordsOf(option));
+      case "list":
+        return wordsOf([part.of]);
+      case "orders":
+        return ["order", "in", "then", "beside", "free"];
+      case "quantity":
+        return ["within"];
       default:
         return [];
     }

@@ -21,10 +21,10 @@ export const completion: Feature = {
     context.connection.onCompletion(async (params): Promise<CompletionList> => {
       const here = openBoundAt(context, params);
       const wanted = here === null ? null : wantedAt(here.bound.parsed, here.offset);
-      // Asked for again at each letter: what is typed out is no longer offered, so that Enter is a line break.
-      const isIncomplete = true;
-      if (here === null || wanted === null) return { isIncomplete, items: [] };
-      return { isIncomplete, items: await itemsAt(context, here, here.offset, wanted) };
+      const items = here === null || wanted === null ? [] : await itemsAt(context, here, here.offset, wanted);
+      // Complete: the editor narrows the list down itself. Asked again at each letter it would show the list of the letter
+      // before for a moment, and Enter would take something that does not fit.
+      return { isIncomplete: false, items };
     });
   },
 };

@@ -49,7 +49,7 @@ function together(hints: readonly RunHint[]): LineHint {
 }
 
 function runHints(run: Run, findings: RunFindings): RunHint[] {
-  const several = findings.taken.length > 1;
+  const several = (run.reaction?.reactants.length ?? 0) > 1;
   const taken = run.taken.flatMap((one, index): RunHint[] => {
     const found = findings.taken[index];
     const facts = found === undefined ? [] : takenFacts(one, found, several);
