@@ -7,7 +7,7 @@ import type { Palette } from "./palette.js";
 import { type PictureContent, pictureContent, residualsOf, signalsOf } from "./pictureContent.js";
 import { pictureTitle, pictureWords } from "./pictureWords.js";
 import { type Box, extentOf, linearScale, px, type Scale } from "./plotFrame.js";
-import { readingParts, residualParts } from "./readingParts.js";
+import { leftOutParts, readingParts, residualParts } from "./readingParts.js";
 import { niceTicks, type Ticks } from "./ticks.js";
 
 /** How a picture is drawn. Sizes in px. */
@@ -71,6 +71,7 @@ export function runPicture(run: Run, follow: Run["follow"][number], style: Pictu
     ...(content.thinned ? readingParts(content, time, signal, palette) : []),
     ...curveParts(content, time, signal, box, palette),
     ...(content.thinned ? [] : readingParts(content, time, signal, palette)),
+    ...leftOutParts(content, time, signal, box, palette),
     ...markParts(content, time, signal, box, palette),
     ...(strip === 0 ? [] : residualParts(content, time, { ...box, top: floor - strip, bottom: floor }, palette)),
     timeAxis(time, along, floor, palette),

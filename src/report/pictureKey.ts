@@ -1,3 +1,4 @@
+import { leftOutReasons } from "./leftOutReasons.js";
 import { type PictureContent, residualsOf } from "./pictureContent.js";
 import { printedLaw } from "./printedSpecies.js";
 
@@ -9,6 +10,11 @@ export function pictureKey(content: PictureContent): string {
   const words = [thinned ? "Ribbon: the readings, from lowest to highest at each time." : "Dots: readings."];
   if (readings.some(({ used }) => !used)) {
     words.push(`${thinned ? "Paler" : "Hollow"}: outside the window, used by no fit.`);
+  }
+  const { leftOut } = follow;
+  if (leftOut !== undefined) {
+    const why = leftOutReasons(leftOut.why);
+    words.push(`Crossed: left out by the description${why === "" ? "" : `, because of ${why}`}.`);
   }
   for (const [order, { number, fit }] of fits.entries()) {
     const dash = dashWords[order % dashWords.length] ?? "";

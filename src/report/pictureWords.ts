@@ -1,6 +1,7 @@
 import type { Run } from "../contract/findings.js";
 import { formatQuantity } from "../quantity/formatNumber.js";
 import { axisWords, signalName } from "./axisText.js";
+import { leftOutReasons } from "./leftOutReasons.js";
 import type { PictureContent } from "./pictureContent.js";
 import { rateName } from "./rateName.js";
 
@@ -25,6 +26,12 @@ export function pictureWords({ follow, signalUnit, timeUnit, readings, thinned, 
   }
   const outside = readings.filter(({ used }) => !used).length;
   if (outside > 0) sentences.push(`Readings outside the window of the fit are ${thinned ? "paler" : "hollow"}.`);
+  const { leftOut } = follow;
+  if (leftOut !== undefined) {
+    const count = leftOut.lines.length === 1 ? "1 reading is" : `${leftOut.lines.length} readings are`;
+    const why = leftOutReasons(leftOut.why);
+    sentences.push(`${count} left out by the description${why === "" ? "" : `: ${why}`}.`);
+  }
   for (const { fit, number } of fits) {
     const k = fit.parameters["k"];
     sentences.push(

@@ -45,7 +45,7 @@ export function plotData(run: Run, follow: Follow, file: string | null): Plot | 
     timeUnit: content.timeUnit,
     timeFactor: Number(`1e${powers.time}`),
     file,
-    readings: readingsOf(content, time, signal),
+    readings: readingsOf(content, time, signal, kept),
     curves: content.fits.flatMap(({ number, curve }, order) =>
       curve.time.values.flatMap((t, index) => {
         const y = curve.signal.values[index];
@@ -94,12 +94,13 @@ function readingsOf(
   { follow, readings, thinned, timeUnit, signalUnit }: PictureContent,
   time: (t: number) => number,
   signal: (y: number) => number,
+  kept: (y: number) => number,
 ): PlotReading[] {
   const words = (t: number, y: number, line: number | null, why: string): string => {
     const where = line === null ? "" : `, line ${line} of the file`;
     return `${formatQuantity(y, null, signalUnit)} at ${formatQuantity(t, null, timeUnit)}${where}${why}`;
   };
-  const kept = readings.map((reading): PlotReading => {
+  const drawn = readings.map((reading): PlotReading => {
     const kind = !reading.used ? "outside" : thinned ? "outline" : "used";
     const why = reading.used ? "" : "; outside the window of the fit";
     return {
@@ -111,15 +112,15 @@ function readingsOf(
     };
   });
   const { leftOut } = follow;
-  if (leftOut === undefined) return kept;
+  if (leftOut === undefined) return drawn;
   const out = leftOut.time.values.flatMap((t, index): PlotReading[] => {
     const y = leftOut.signal.values[index];
     const line = leftOut.lines[index] ?? null;
     if (t === null || typeof y !== "number") return [];
     const why = `; left out: ${leftOut.why[index] || "no reason stated"}`;
-    return [{ t: time(t), y: signal(y), kind: "left out", line, words: words(t, y, line, why) }];
+    return [{ t: time(t), y: signal(kept(y)), kind: "left out", line, words: words(t, y, line, why) }];
   });
-  return [...kept, ...out];
+  return [...drawn, ...out];
 }
 
 function residualsIn(content: PictureContent): { time: number; residual: number; order: number }[] {

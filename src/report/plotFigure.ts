@@ -16,10 +16,9 @@ export function plotFigure(run: Run, follow: Run["follow"][number]): Html {
   const powers = plotPowers(run, follow);
   const signal = axisHtml({ ...signalName(follow, content.signalUnit), power: powers.signal });
   const time = axisHtml({ symbol: "t", of: "", unit: content.timeUnit, power: powers.time });
-  const left = follow.leftOut === undefined ? "" : " Crossed: left out by the description.";
   const words = pictureWords(content);
   const window = run.fits.some((fit) => fit.follow === follow.id);
-  return html`<figure data-figure="${follow.id}"><p class="axis signal" aria-hidden="true">${signal}</p><div class="plot" data-plot="${follow.id}" role="group" tabindex="0" aria-label="${pictureTitle(run, content)}. ${words} Arrow keys go from reading to reading; Enter opens the data file there."></div><p class="axis time" aria-hidden="true">${time}</p><p class="reading" data-reading="${follow.id}" aria-live="polite"></p>${window ? windowForm(follow.id, content.timeUnit) : nothing}<figcaption>${pictureKey(content)}${left}</figcaption><details data-part="In words, ${follow.id}"><summary>The picture in words</summary><p>${words}</p></details></figure>`;
+  return html`<figure data-figure="${follow.id}"><p class="axis signal" aria-hidden="true">${signal}</p><div class="plot" data-plot="${follow.id}" role="group" tabindex="0" aria-label="${pictureTitle(run, content)}. ${words} Arrow keys go from reading to reading; Enter opens the data file there."></div><p class="axis time" aria-hidden="true">${time}</p><p class="reading" data-reading="${follow.id}" aria-live="polite"></p>${window ? windowForm(follow.id, content.timeUnit) : nothing}<figcaption>${pictureKey(content)}</figcaption><details data-part="In words, ${follow.id}"><summary>The picture in words</summary><p>${words}</p></details></figure>`;
 }
 
 /** Two times and a button: what dragging over the picture fills in, and what the keyboard does without it. */

@@ -26,6 +26,28 @@ export function readingParts(
   ];
 }
 
+/** Readings that the description leaves out: crossed rings, on the picture's edge where they lie outside it. */
+export function leftOutParts(
+  { follow }: PictureContent,
+  time: Scale,
+  signal: Scale,
+  box: Box,
+  { ink }: Palette,
+): string[] {
+  const { leftOut } = follow;
+  const path = (leftOut?.time.values ?? []).flatMap((t, index) => {
+    const y = leftOut?.signal.values[index];
+    if (t === null || typeof y !== "number") return [];
+    const place = [
+      Math.min(box.right, Math.max(box.left, time.at(t))),
+      Math.min(box.bottom, Math.max(box.top, signal.at(y))),
+    ];
+    const [left, top] = place.map((middle) => px(middle - 2.5));
+    return [`M${left} ${px(place[1] ?? 0)}a2.5 2.5 0 1 0 5 0a2.5 2.5 0 1 0 -5 0M${left} ${top}l5 5m0 -5l-5 5`];
+  });
+  return path.length === 0 ? [] : [`<path d="${path.join("")}" fill="none" stroke="${ink}" stroke-width="1"/>`];
+}
+
 /** Widest gap between neighbours of a ribbon, px. */
 const gap = 8;
 

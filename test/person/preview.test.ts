@@ -115,7 +115,9 @@ describe("a person with the preview", () => {
       await page.keyboard.press("Control+z");
       await until("no window line", async () => !/window/.test(await editorText(session)));
       // One step back, and the text is the one on disk again.
-      await page.locator(".tabs-container .tab:not(.dirty)", { hasText: "peroxide.raterun" }).waitFor();
+      await page
+        .locator(".editor-group-container.active .tab.active:not(.dirty)", { hasText: "peroxide.raterun" })
+        .waitFor();
     });
   });
 
