@@ -20,13 +20,22 @@ export function followDetails(run: Run, follow: Follow): Details {
   put("blank", follow.blank);
   put("reading at start", follow.readingAtStart);
   put("reading at infinity", follow.readingAtInfinity);
-  put("time zero", run.data?.timeZero ?? null);
+  const zero = run.data?.timeZero ?? null;
+  if (zero !== null) details.push({ name: "time zero", text: timeText(zero.value, zero.clock) });
   for (const { value } of run.data?.exclusions ?? []) {
     const where =
       "line" in value
         ? `line ${value.line}`
-        : `${shownQuantity(value.from).text} to ${shownQuantity(value.to).text} of the file`;
+        : `${timeText(value.from, value.clock)} to ${timeText(value.to, value.clock)} of the file`;
     details.push({ name: "left out", text: `${where}: ${value.reason}` });
   }
   return details;
+}
+
+/** A time as the description writes it: as a clock shows it, or with its unit. */
+function timeText(time: Quantity, clock: boolean): string {
+  if (!clock) return shownQuantity(time).text;
+  const two = (n: number): string => String(Math.floor(n)).padStart(2, "0");
+  const { value } = time;
+  return `${two(value / 3600)}:${two((value / 60) % 60)}:${two(value % 60)}`;
 }

@@ -9,6 +9,8 @@ export function sampleData(): ReadonlyMap<string, string> {
     ["data/ester.csv", ester(103)],
     ["data/planted.csv", planted(104)],
     ["data/gas.csv", gas(105)],
+    ["data/dye.csv", dye(106, 14 * 3600 + 2 * 60 + 20, 0.196, 12)],
+    ["data/dye-b.csv", dye(107, 15 * 3600 + 20 * 60 + 50, 0.098, null)],
   ]);
 }
 
@@ -56,6 +58,22 @@ function gas(seed: number): string {
     return `${t}\t${volume.toFixed(1)}`;
   });
   return lines([mark, "gas burette 2", "", "time / s\tV / mL", ...rows]);
+}
+
+/** Dye, µmol/L, with the clock: first reading `first` s after midnight, twenty seconds after mixing; `rate` is k′ in min⁻¹. */
+function dye(seed: number, first: number, rate: number, stray: number | null): string {
+  const random = seededRandom(seed);
+  const rows = Array.from({ length: 46 }, (_, i) => {
+    const minutes = (20 + 40 * i) / 60;
+    const c = 0.35 + 19.65 * exp(-rate * minutes) + 0.06 * random.normal() + (i === stray ? 3.1 : 0);
+    return `${clock(first + 40 * i)},${c.toFixed(2)}`;
+  });
+  return lines([mark, "photometer 1", "time,c(dye) / µmol/L", ...rows]);
+}
+
+function clock(seconds: number): string {
+  const two = (n: number): string => String(Math.floor(n) % 60).padStart(2, "0");
+  return `${two(seconds / 3600)}:${two(seconds / 60)}:${two(seconds)}`;
 }
 
 function lines(all: readonly string[]): string {

@@ -126,6 +126,16 @@ run Z
     assert.equal(y.temperature?.value.value, 298.15);
   });
 
+  it("what is said of a file is not said of the next one: excluded lines, time zero, how it is read", () => {
+    const more = text.replace(
+      'data "x.csv"\n',
+      'data "x.csv"\n    exclude line 9 because "bubble"\n    time zero 3 s\n    skip 2 lines\n',
+    );
+    const { data } = run(more, "Y");
+    assert.deepEqual([data?.exclusions, data?.timeZero, data?.skip, data?.columns.length], [[], null, null, 2]);
+    assert.equal(run(more, "X").data?.exclusions.length, 1);
+  });
+
   it("what stands above the first run holds for every run", () => {
     assert.equal(run(text, "Z").temperature?.value.value, 293.15);
     assert.equal(run(text, "X").temperature?.value.value, 298.15);

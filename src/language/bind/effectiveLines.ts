@@ -42,7 +42,9 @@ function replacedBy(lines: readonly Statement[], statement: Statement, keyOf: Ke
 
 function withKeptColumns(before: Statement, after: Statement, keyOf: KeyOf): Statement {
   if (after.line.row?.head !== "data") return after;
-  return { ...after, children: mergeLines(before.children, after.children, keyOf) };
+  // What else is said of a file is said of that one: its excluded lines and its time zero are none of another.
+  const columns = before.children.filter((child) => child.line.row?.head === "column");
+  return { ...after, children: mergeLines(columns, after.children, keyOf) };
 }
 
 function removeAll(lines: Statement[], which: (statement: Statement) => boolean): void {
