@@ -4,6 +4,8 @@ import { hoverAt, leaveHover } from "./hover.js";
 import { openFile } from "./openFile.js";
 import { takePicture, takePictures } from "./picture.js";
 import type { Session } from "./session.js";
+import { changeTheme } from "./theme.js";
+import { type ThemeKind, themes } from "./themes.js";
 import { goTo, save, type } from "./typing.js";
 import { withSession } from "./withSession.js";
 
@@ -22,6 +24,16 @@ async function suggestions({ page }: Session, first: string): Promise<string[]> 
     return found.some((label) => label.startsWith(first));
   });
   return found;
+}
+
+/** The class that colours a word by itself in the active editor; null where it stands in no piece of its own. */
+async function colourOf({ page }: Session, word: string): Promise<string | null> {
+  const pieces = page.locator(".editor-group-container.active .view-line span span", { hasText: word });
+  const classes = await pieces.evaluateAll(
+    (elements, wanted) => elements.filter((one) => one.textContent?.trim() === wanted).map((one) => one.className),
+    word,
+  );
+  return classes.at(-1) ?? null;
 }
 
 /** Line of the active sample that holds these words, from 1. */
@@ -127,7 +139,14 @@ describe("a person finding their way", () => {
         .locator(".view-line", { hasText: /k\s=\s\d/ })
         .first()
         .waitFor();
-      await takePictures(session, "hints");
+      for (const kind of Object.keys(themes) as ThemeKind[]) {
+        await changeTheme(session, kind);
+        await until(`species in a colour of their own, theme ${kind}`, async () => {
+          const [species, reading] = [await colourOf(session, "NaOH"), await colourOf(session, "left")];
+          return species !== null && species !== reading;
+        });
+        await takePicture(session, `hints.${kind}`);
+      }
       for (const [words, expected] of [
         ["NaOH", /molar mass/],
         ["25.0(2)", /298\.15/],
