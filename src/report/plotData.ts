@@ -4,6 +4,7 @@ import { formatQuantity } from "../quantity/formatNumber.js";
 import { axisWords } from "./axisText.js";
 import { type PictureContent, pictureContent, residualsOf, signalsOf } from "./pictureContent.js";
 import { extentOf } from "./plotFrame.js";
+import { printedQuantity } from "./printedText.js";
 import { niceTicks } from "./ticks.js";
 
 type Follow = Run["follow"][number];
@@ -98,7 +99,9 @@ function readingsOf(
 ): PlotReading[] {
   const words = (t: number, y: number, line: number | null, why: string): string => {
     const where = line === null ? "" : `, line ${line} of the file`;
-    return `${formatQuantity(y, null, signalUnit)} at ${formatQuantity(t, null, timeUnit)}${where}${why}`;
+    const print = (value: number, unit: string): string =>
+      printedQuantity({ text: formatQuantity(value, null, unit), unit });
+    return `${print(y, signalUnit)} at ${print(t, timeUnit)}${where}${why}`;
   };
   const drawn = readings.map((reading): PlotReading => {
     const kind = !reading.used ? "outside" : thinned ? "outline" : "used";

@@ -1,10 +1,12 @@
 import assert from "node:assert/strict";
-import { readFileSync } from "node:fs";
+import { mkdirSync, readFileSync, writeFileSync } from "node:fs";
 import { createRequire } from "node:module";
 import { join } from "node:path";
 import type { Frame } from "playwright-core";
 import { projectFolder } from "../editor/projectFolder.js";
+import { temporaryFolder } from "../editor/temporaryFolder.js";
 import { until } from "../editor/until.js";
+import { decayCsv, decayRun } from "../server/decay.js";
 import { reportOf } from "./commandLine.js";
 import { openFile } from "./openFile.js";
 import { takePicture } from "./picture.js";
@@ -64,9 +66,16 @@ describe("a person with the preview", () => {
       );
       // The temperature stands in run A and holds for run B as well: 25.0 becomes 35.0.
       await goTo(session, 10, 16);
+      await until("run A again", async () => /^Run A/.test(await words(frame, "#page h3")));
+      await untilDrawn(frame);
+      await frame.locator(".plot canvas").evaluateAll((all) => {
+        for (const canvas of all) canvas.setAttribute("data-marked", "yes");
+      });
       await session.page.keyboard.press("Delete");
       await type(session, "3");
       await until("35.00(10) °C", async () => (await words(frame, "#page")).includes("35.00(10) °C"));
+      // Patched, not made anew: what was drawn in is the same.
+      assert.equal(await frame.locator(".plot canvas[data-marked]").count(), 1);
       assert.equal(await violations(frame), null);
     });
   });
@@ -226,9 +235,45 @@ describe("a person with the preview", () => {
           assert.deepEqual(found, [], kind);
         }
         assert.equal(await violations(frame), null);
+        // That it would have been told: code made of text is refused, and the listener hears of it.
+        await frame.evaluate(() => void setTimeout("document.body.dataset['made'] = 'yes'", 0));
+        await until("the refusal is heard of", async () => /script-src/.test((await violations(frame)) ?? ""));
+        assert.equal(await frame.evaluate(() => document.body.dataset["made"] ?? null), null);
       });
     });
   }
+
+  it("goes on with the next server after a restart", async () => {
+    await withSession("preview.restart", { size }, async (session) => {
+      await openFile(session, "peroxide.raterun");
+      const frame = await openPreview(session);
+      await untilDrawn(frame);
+      await runCommand(session, "Ratewright: Restart Language Server");
+      await session.page.locator(".statusbar-item", { hasText: "Ratewright: up to date" }).waitFor();
+      await goTo(session, 25, 3);
+      await until("run B", async () => /^Run B/.test(await words(frame, "#page h3")));
+      await untilSign(frame, /^$/);
+    });
+  });
+
+  it("shows an outline of many readings, worked out beside the message loop", async () => {
+    const folder = temporaryFolder("preview-big");
+    try {
+      mkdirSync(join(folder.path, "data"));
+      writeFileSync(join(folder.path, "data", "a.csv"), decayCsv(200_000, 0.01));
+      writeFileSync(join(folder.path, "a.raterun"), decayRun.replace("H2O2(aq) -> H2O(l)", "2 H2O2(aq) -> 2 H2O(l)"));
+      await withSession("preview.big", { size, theme: "dark", samples: folder.path }, async (session) => {
+        await openFile(session, "a.raterun");
+        const frame = await openPreview(session);
+        await untilDrawn(frame);
+        assert.match(await words(frame, "#page"), /all 200000 used/);
+        assert.match(await words(frame, "figcaption"), /^Ribbon/);
+        await takePicture(session, "preview.big.dark");
+      });
+    } finally {
+      folder.remove();
+    }
+  });
 });
 
 interface AxeViolation {

@@ -207,7 +207,7 @@ export function createPreviewPanel(panel: WebviewPanel, { client, extension, log
       if (state === "up to date") void ask();
       else if (state === "failed")
         sign("The last good picture; the findings could not be worked out. The log says why.");
-      else behind ??= setTimeout(() => sign("Behind the text: findings are being worked out."), patience);
+      else behind ??= setTimeout(() => sign("Behind the text"), patience);
     },
     refresh: () => void ask(),
     sign,
