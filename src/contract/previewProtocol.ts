@@ -57,8 +57,10 @@ export interface Plot {
 export interface PlotReading {
   readonly t: number;
   readonly y: number;
-  /** used by a fit; outside every window; left out by the description; one of many of which only the outline is drawn */
-  readonly kind: "used" | "outside" | "left out" | "outline";
+  /** used by a fit; outside every window; left out by the description; the same of many of which the outline is drawn */
+  readonly kind: "used" | "outside" | "left out" | "outline" | "outline outside";
+  /** which piece of an outline it belongs to: where none was made for a while the outline is broken */
+  readonly piece: number;
   /** line of the data file, from 1 */
   readonly line: number | null;
   /** the reading in words */

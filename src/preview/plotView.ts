@@ -62,6 +62,7 @@ export function createPlotView(frame: HTMLElement, hasStrip: boolean): PlotView 
     hasStrip,
     show(plot) {
       view.signal("residualTitle", plot.residualTitle);
+      if (hasStrip) view.signal("residualSize", plot.residuals.length > 300 ? 3 : 14);
       view.signal("pointSize", plot.readings.length > 300 ? 8 : plot.readings.length > 80 ? 14 : 26);
       view.data(
         "readings",

@@ -91,6 +91,9 @@ function markOf(
     : { ...ends, kind: "tangent", at: along(touch), number: { ...along(1), dx: -4, dy: 12 * aside } };
 }
 
+/** Widest gap between neighbours of an outline, as a share of all the time. */
+const widestGap = 0.0125;
+
 function readingsOf(
   { follow, readings, thinned, timeUnit, signalUnit }: PictureContent,
   time: (t: number) => number,
@@ -103,13 +106,19 @@ function readingsOf(
       printedQuantity({ text: formatQuantity(value, null, unit), unit });
     return `${print(y, signalUnit)} at ${print(t, timeUnit)}${where}${why}`;
   };
+  const gap = widestGap * ((readings.at(-1)?.time ?? 0) - (readings[0]?.time ?? 0));
+  let last = readings[0]?.time ?? 0;
+  let piece = 0;
   const drawn = readings.map((reading): PlotReading => {
-    const kind = !reading.used ? "outside" : thinned ? "outline" : "used";
+    const kind = thinned ? (reading.used ? "outline" : "outline outside") : reading.used ? "used" : "outside";
+    if (reading.time - last > gap) piece++;
+    last = reading.time;
     const why = reading.used ? "" : "; outside the window of the fit";
     return {
       t: time(reading.time),
       y: signal(reading.signal),
       kind,
+      piece,
       line: reading.line,
       words: words(reading.time, reading.signal, reading.line, why),
     };
@@ -121,7 +130,7 @@ function readingsOf(
     const line = leftOut.lines[index] ?? null;
     if (t === null || typeof y !== "number") return [];
     const why = `; left out: ${leftOut.why[index] || "no reason stated"}`;
-    return [{ t: time(t), y: signal(kept(y)), kind: "left out", line, words: words(t, y, line, why) }];
+    return [{ t: time(t), y: signal(kept(y)), kind: "left out", piece: 0, line, words: words(t, y, line, why) }];
   });
   return [...drawn, ...out];
 }

@@ -35,6 +35,7 @@ describe("data of a plot", () => {
     const values = follow(run).signal?.values as number[];
     assert.ok(plot !== null && plot.readings.length <= 602);
     assert.ok(plot.readings.every(({ kind }) => kind === "outline"));
+    assert.ok(plot.readings.every(({ piece }) => piece === 0));
     const drawn = plot.readings.map(({ y }) => y);
     assert.equal(
       Math.min(...drawn),

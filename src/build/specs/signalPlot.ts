@@ -55,12 +55,20 @@ export function signalPlot(strip: boolean): unknown {
     mark: { type: "point", size: { expr: "pointSize" }, opacity: 1, ...mark },
     encoding: { x: x(!strip), y },
   });
+  /** Many readings, each stretch of time from its lowest to its highest. */
+  const ribbon = (kind: string, opacity: number) => ({
+    data: { name: "readings" },
+    transform: [{ filter: `datum.kind === '${kind}'` }],
+    mark: { type: "line", strokeWidth: 2, strokeJoin: "round", strokeCap: "round", opacity, color: { expr: "ink" } },
+    encoding: { x: x(!strip), y, detail: { field: "piece" }, order: { field: "t" } },
+  });
   const signal = {
     width: 400,
     height: heights.signal,
     view: { stroke: null },
     layer: [
-      point("['outline']", { filled: true, color: { expr: "ink" }, opacity: 0.45, size: 6 }),
+      ribbon("outline", 0.45),
+      ribbon("outline outside", 0.2),
       {
         data: { name: "curves" },
         mark: { type: "area", opacity: { expr: "band" }, clip: true },
@@ -161,7 +169,7 @@ export function signalPlot(strip: boolean): unknown {
       },
       {
         data: { name: "residuals" },
-        mark: { type: "point", filled: true, size: 14, opacity: 1 },
+        mark: { type: "point", filled: true, size: { expr: "residualSize" }, opacity: 1 },
         encoding: {
           x: x(true),
           y: r,
@@ -187,6 +195,7 @@ export function signalPlot(strip: boolean): unknown {
       { name: "font", value: "sans-serif" },
       { name: "band", value: 0.17 },
       { name: "pointSize", value: 24 },
+      { name: "residualSize", value: 14 },
       { name: "residualTitle", value: "" },
     ],
     ...(strip ? { vconcat: [signal, residuals], spacing: 14, resolve: { scale: { x: "shared" } } } : signal),
