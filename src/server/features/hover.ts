@@ -54,7 +54,7 @@ async function columnParts(
   signal: AbortSignal,
 ): Promise<string[] | null> {
   const { version } = document;
-  const description = await context.workspace().describe(context.document(document), { curves: true, signal });
+  const description = await context.workspace().describe(context.document(document), { curves: "thinned", signal });
   // An answer about a text that is no more would point at the wrong words.
   if (description === null || context.documents.get(document.uri)?.version !== version) return null;
   const theme = context.client.theme ?? "neutral";
