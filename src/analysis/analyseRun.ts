@@ -28,6 +28,7 @@ export function analyseRun(run: Run, input: RunInput, notes: Notes): RunFinding 
     name: run.name,
     title: run.title,
     equation: run.reaction?.text ?? "",
+    ...(run.reaction === null ? {} : { equationPlace: input.place(run.reaction.origin) }),
     conditions: conditionsOf(run),
     taken: takenOf(run, amounts, input),
     conditionPlaces: conditionPlacesOf(run, input),
@@ -156,7 +157,7 @@ function followFinding(
     points: read?.points ?? 0,
     used: context === null ? 0 : context.signal.time.length,
     details: followDetails(run, follow),
-    sources: context === null ? [] : sourcesOf(context),
+    sources: context === null ? [] : sourcesOf(context, input.place),
     ...(input.curves && context !== null && read !== null ? followCurves(context, read, input.place) : {}),
   };
 }

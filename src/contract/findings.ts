@@ -62,6 +62,8 @@ export interface Run extends Item {
   name: string;
   title: string | null;
   equation: string;
+  /** the line of the equation */
+  equationPlace?: Place;
   conditions: { [name: string]: Q };
   taken: {
     species: string;
@@ -85,7 +87,8 @@ export interface Run extends Item {
     used: number;
     /** what else the description says of the signal, ready to show: `["blank", "1.20(10) mL"]`, `["left out", "line 17: bubble"]` */
     details: { name: string; text: string }[];
-    sources: { name: string; kind: "common" | "random"; u: Q }[]; // what the uncertainty is made of
+    /** what the uncertainty is made of, and the line that states it */
+    sources: { name: string; kind: "common" | "random"; u: Q; place?: Place }[];
     signal?: Block;
     time?: Block;
     concentration?: Block;

@@ -53,6 +53,18 @@ function show(next: PreviewPage, name: string): void {
   keep();
 }
 
+/** Time that what was done stays to be read, ms. */
+const readingTime = 12_000;
+let saying: ReturnType<typeof setTimeout> | undefined;
+
+function say(words: string): void {
+  element("said").textContent = words;
+  clearTimeout(saying);
+  saying = setTimeout(() => {
+    element("said").textContent = "";
+  }, readingTime);
+}
+
 async function take(message: ToPage): Promise<void> {
   switch (message.kind) {
     case "show":
@@ -62,7 +74,7 @@ async function take(message: ToPage): Promise<void> {
       element("sign").textContent = message.words;
       break;
     case "say":
-      element("said").textContent = message.words;
+      say(message.words);
       break;
     case "cursor":
       cursor = message.line;

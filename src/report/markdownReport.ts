@@ -58,7 +58,8 @@ function runPart(run: Run, diagnostics: readonly Diagnostic[]): string[] {
 }
 
 function doneRows(run: Run): string[][] {
-  const rows = run.equation === "" ? [] : [["reaction", printedEquation(run.equation), ""]];
+  const rows =
+    run.equation === "" ? [] : [["reaction", printedEquation(run.equation), `${run.equationPlace?.line ?? ""}`]];
   for (const { species, given, stock, concentration, limiting, place } of run.taken) {
     const of = stock === null ? "" : ` of ${printedSentence(stock)}`;
     const that =
@@ -76,7 +77,11 @@ function doneRows(run: Run): string[][] {
 function seenPart(run: Run, follow: Run["follow"][number]): string[] {
   const { species, monitor, column, sources, place } = follow;
   const content = pictureContent(run, follow);
-  const causes = sources.map(({ name, kind, u }) => ["uncertainty", `${name}: ${printedQuantity(u)} (${kind})`, ""]);
+  const causes = sources.map(({ name, kind, u, place: from }) => [
+    "uncertainty",
+    `${name}: ${printedQuantity(u)} (${kind})`,
+    from === undefined ? "" : `${from.line}`,
+  ]);
   return [
     ...table(
       ["", "", "line"],

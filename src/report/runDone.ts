@@ -7,7 +7,11 @@ import { printedQuantity, printedSentence } from "./printedText.js";
 /** What was done: the equation, what was taken, the conditions. */
 export function runDone(run: Run): { gist: string; body: Html } {
   const rows: Cell[][] = [];
-  if (run.equation !== "") rows.push(["reaction", printedEquation(run.equation)]);
+  if (run.equation !== "") {
+    const { equationPlace } = run;
+    const line = equationPlace === undefined ? null : lineCell({ place: equationPlace });
+    rows.push(["reaction", printedEquation(run.equation), line]);
+  }
   for (const { species, given, stock, concentration, limiting, place } of run.taken) {
     const converted =
       concentration === null || concentration.text === given.text ? "" : `, that is ${printedQuantity(concentration)}`;

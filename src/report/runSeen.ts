@@ -31,8 +31,9 @@ function followed(run: Run, follow: Follow, figure: Figure): Html {
     ["readings", readingsUsed(follow), null],
   ];
   for (const { name, text } of follow.details) rows.push([name, printedSentence(text), null]);
-  for (const { name, kind, u } of follow.sources) {
-    rows.push(["uncertainty", `${name}: ${printedQuantity(u)} (${kind})`, null]);
+  for (const { name, kind, u, place } of follow.sources) {
+    const line = place === undefined ? null : lineCell({ place });
+    rows.push(["uncertainty", `${name}: ${printedQuantity(u)} (${kind})`, line]);
   }
   return html`${factTable(`What was followed in column ${follow.column}`, rows)}${figure(run, follow)}`;
 }

@@ -50,6 +50,16 @@ const axeSource = readFileSync(
   "utf8",
 );
 
+/** What axe finds in the page of the preview. */
+async function axeFindings(frame: Frame): Promise<string[]> {
+  await frame.evaluate(axeSource);
+  return frame.evaluate(async () => {
+    const { axe } = window as unknown as { axe: { run(): Promise<{ violations: AxeViolation[] }> } };
+    const { violations: found } = await axe.run();
+    return found.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(" | ")}`);
+  });
+}
+
 describe("a person with the preview", () => {
   it("sees k with the digits of the report, follows the cursor to the other run, and the tables follow an edit", async () => {
     await withSession("preview", { size }, async (session) => {
@@ -91,6 +101,7 @@ describe("a person with the preview", () => {
       await untilSign(frame, /^The last good picture; the text has errors\. Line 15: /);
       assert.equal(await words(frame, "#page"), before);
       await takePicture(session, "preview.broken.dark");
+      assert.deepEqual(await axeFindings(frame), []);
       await session.page.keyboard.press("Backspace");
       await untilSign(frame, /^$/);
       assert.equal(await words(frame, "#page"), before);
@@ -120,6 +131,7 @@ describe("a person with the preview", () => {
       await until("fewer readings", async () => /Readings outside the window/.test(await words(frame, "#page")));
       await untilDrawn(frame);
       await takePicture(session, "preview.windowed");
+      assert.deepEqual(await axeFindings(frame), []);
       await page.locator(".editor-group-container .monaco-editor .view-lines").first().click();
       await page.keyboard.press("Control+z");
       await until("no window line", async () => !/window/.test(await editorText(session)));
@@ -222,15 +234,10 @@ describe("a person with the preview", () => {
         await openFile(session, host === "node" ? "peroxide.raterun" : "planted.raterun");
         const frame = await openPreview(session);
         await untilDrawn(frame);
-        await frame.evaluate(axeSource);
         for (const kind of Object.keys(themes) as ThemeKind[]) {
           await changeTheme(session, kind);
           await until(`theme ${kind} in the page`, () => frame.locator(`body.${pageClass[kind]}`).count());
-          const found = await frame.evaluate(async () => {
-            const { axe } = window as unknown as { axe: { run(): Promise<{ violations: AxeViolation[] }> } };
-            const { violations } = await axe.run();
-            return violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(" | ")}`);
-          });
+          const found = await axeFindings(frame);
           await takePicture(session, `preview.${host}.${kind}`);
           assert.deepEqual(found, [], kind);
         }

@@ -32,9 +32,9 @@ export function panelPage({ script }: PanelPage): string {
 <style nonce="${nonce}">${panelStyle}</style>
 </head>
 <body>
-<header><h1 class="unseen">Rates of reaction</h1><h2 id="name"></h2><p id="sign" role="status"></p><label id="runs" hidden><span class="unseen">Run shown</span> <select></select></label></header>
+<header><h1 class="unseen">Rates of reaction</h1><h2 id="name"></h2><p id="sign" role="status"></p><label id="runs" hidden><span class="unseen">Run shown</span> <select></select></label><p id="said" role="status"></p></header>
 <main id="page"></main>
-<footer><div id="exports" role="group" aria-label="Export"><span>Export:</span> ${buttons.join(" ")}</div><p id="said" role="status"></p></footer>
+<footer><div id="exports" role="group" aria-label="Export"><span>Export:</span> ${buttons.join(" ")}</div></footer>
 <script nonce="${nonce}" src="${script}"></script>
 </body>
 </html>`;

@@ -19,6 +19,7 @@ header, main, footer { max-width: 46rem; margin: 0 auto; padding: 0 1.1rem; }
 header { position: sticky; top: 0; z-index: 2; background: var(--vscode-editor-background); display: flex; flex-wrap: wrap; align-items: baseline; gap: .2rem .9rem; padding-top: .5rem; padding-bottom: .35rem; }
 header h2 { font-size: 1em; font-weight: 400; color: var(--faint); overflow-wrap: anywhere; }
 #sign { flex: 1 1 14rem; margin: 0; padding-left: .7rem; border-left: 3px double var(--ink); }
+#said { flex: 1 1 100%; margin: 0; }
 #sign:empty, #said:empty { display: none; }
 #runs { margin-left: auto; }
 select, input { font: inherit; color: var(--vscode-input-foreground); background: var(--vscode-input-background); border: 1px solid var(--vscode-input-border, var(--vscode-contrastBorder, var(--faint))); padding: .1rem .3rem; }

@@ -103,8 +103,9 @@ export function createPreviewPanel(panel: WebviewPanel, { client, extension, log
       }
     } catch (error) {
       if (!cancel.token.isCancellationRequested) {
-        sign("The last good picture; the language server does not answer. The log says why.");
-        log(`The preview has no answer: ${error instanceof Error ? error.message : String(error)}`);
+        const words = error instanceof Error ? error.message : String(error);
+        sign(`The last good picture; it cannot be brought up to date. ${words}`);
+        log(`The preview has no answer: ${words}`);
       }
     } finally {
       cancel.dispose();

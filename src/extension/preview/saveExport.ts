@@ -8,7 +8,11 @@ export interface ExportFile {
 
 /** Asks where a file goes, beside its description unless told, and writes it. Where it went; null where the person thought better of it. */
 export async function saveExport(description: string, { name, content }: ExportFile): Promise<string | null> {
-  const beside = Uri.joinPath(Uri.parse(description, true), "..", name);
+  const address = Uri.parse(description, true);
+  // A text that was never saved lies nowhere.
+  const [folder] = workspace.workspaceFolders ?? [];
+  const unsaved = folder === undefined ? Uri.file(name) : Uri.joinPath(folder.uri, name);
+  const beside = address.scheme === "untitled" ? unsaved : Uri.joinPath(address, "..", name);
   const chosen = await window.showSaveDialog({ defaultUri: beside, title: `Export ${name}` });
   if (chosen === undefined) return null;
   const bytes = typeof content === "string" ? new TextEncoder().encode(content) : content;
