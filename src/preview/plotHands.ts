@@ -7,7 +7,7 @@ import type { PlotView } from "./plotView.js";
 const dragFrom = 5;
 
 /** What a hand can do with a plot: rest on a reading, open its row, step along by keys, drag over a span of time. */
-export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot): void {
+export function plotHands(frame: HTMLElement, drawn: { readonly view: PlotView; readonly plot: Plot }): void {
   const span = document.createElement("div");
   span.className = "span";
   span.hidden = true;
@@ -24,7 +24,7 @@ export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot):
     if (line !== null && line !== undefined) line.textContent = reading === null ? "" : reading.words;
   };
   const open = (reading: PlotReading | null | undefined): void => {
-    const { file } = plot();
+    const { file } = drawn.plot;
     if (reading?.line === undefined || reading.line === null || file === null) return;
     editor.postMessage({ kind: "open reading", file, line: reading.line });
   };
@@ -33,22 +33,22 @@ export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot):
 
   frame.addEventListener("pointerdown", (event) => {
     const place = placeOf(event);
-    if (event.button !== 0 || !inside(view.places(), place)) return;
+    if (event.button !== 0 || !inside(drawn.view.places(), place)) return;
     pressed = place[0];
     frame.setPointerCapture(event.pointerId);
   });
   frame.addEventListener("pointermove", (event) => {
     const place = placeOf(event);
-    const places = view.places();
+    const places = drawn.view.places();
     if (pressed === null) {
-      const near = readingNear(plot().readings, places, place);
-      frame.classList.toggle("points", near !== null && plot().file !== null);
-      view.choose(near);
+      const near = readingNear(drawn.plot.readings, places, place);
+      frame.classList.toggle("points", near !== null && drawn.plot.file !== null);
+      drawn.view.choose(near);
       say(near);
       return;
     }
     if (span.hidden && Math.abs(place[0] - pressed) < dragFrom) return;
-    if (plot().fits.length === 0) return;
+    if (drawn.plot.fits.length === 0) return;
     const ends = [pressed, place[0]].map((x) => Math.min(places.right, Math.max(places.left, x)));
     span.hidden = false;
     span.style.left = `${Math.min(...ends)}px`;
@@ -57,7 +57,7 @@ export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot):
     span.style.height = `${places.bottom - places.top}px`;
     fillWindow(
       frame,
-      plot(),
+      drawn.plot,
       ends.map((x) => places.time(x)),
     );
   });
@@ -65,7 +65,7 @@ export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot):
     if (pressed === null) return;
     pressed = null;
     if (span.hidden) {
-      open(readingNear(plot().readings, view.places(), placeOf(event)));
+      open(readingNear(drawn.plot.readings, drawn.view.places(), placeOf(event)));
       return;
     }
     windowForm(frame)?.querySelector("button")?.focus({ preventScroll: true });
@@ -75,15 +75,15 @@ export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot):
     span.hidden = true;
   });
   frame.addEventListener("pointerleave", () => {
-    if (pressed === null && chosen < 0) view.choose(null);
+    if (pressed === null && chosen < 0) drawn.view.choose(null);
   });
   frame.addEventListener("keydown", (event) => {
-    const readings = [...plot().readings].sort((a, b) => a.t - b.t);
+    const readings = [...drawn.plot.readings].sort((a, b) => a.t - b.t);
     const step = { ArrowRight: 1, ArrowLeft: -1, Home: -readings.length, End: readings.length }[event.key];
     if (step !== undefined) {
       chosen = Math.min(readings.length - 1, Math.max(0, chosen + step));
       const reading = readings[chosen] ?? null;
-      view.choose(reading);
+      drawn.view.choose(reading);
       say(reading);
       event.preventDefault();
     } else if (event.key === "Enter") {
@@ -92,16 +92,17 @@ export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot):
     } else if (event.key === "Escape") {
       chosen = -1;
       span.hidden = true;
-      view.choose(null);
+      drawn.view.choose(null);
       say(null);
     }
   });
   frame.addEventListener("blur", () => {
     chosen = -1;
   });
-  windowForm(frame)?.addEventListener("submit", (event) => {
+  // Heard on the figure: the form comes and goes with the fits.
+  frame.parentElement?.addEventListener("submit", (event) => {
     event.preventDefault();
-    const form = event.currentTarget;
+    const form = event.target;
     if (!(form instanceof HTMLFormElement)) return;
     const [from, to] = ["from", "to"].map((name) => {
       const text = form.querySelector<HTMLInputElement>(`input[name=${name}]`)?.value.trim() ?? "";
@@ -113,7 +114,7 @@ export function plotHands(frame: HTMLElement, view: PlotView, plot: () => Plot):
       return;
     }
     span.hidden = true;
-    editor.postMessage({ kind: "write window", plot: plot().id, from, to });
+    editor.postMessage({ kind: "write window", plot: drawn.plot.id, from, to });
   });
 }
 

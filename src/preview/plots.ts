@@ -3,7 +3,9 @@ import { plotHands } from "./plotHands.js";
 import { createPlotView, type PlotView } from "./plotView.js";
 
 interface Drawn {
+  /** another one where the strip of residuals came or went */
   view: PlotView;
+  /** what is drawn now */
   plot: Plot;
 }
 
@@ -29,12 +31,16 @@ export function createPlots(): Plots {
         if (known === undefined) {
           const begun: Drawn = { view: createPlotView(frame, plot.residuals.length > 0), plot };
           drawn.set(frame, begun);
-          plotHands(frame, begun.view, () => begun.plot);
+          plotHands(frame, begun);
           begun.view.show(plot);
           continue;
         }
         if (JSON.stringify(known.plot) === JSON.stringify(plot)) continue;
         known.plot = plot;
+        if (known.view.hasStrip !== plot.residuals.length > 0) {
+          known.view.end();
+          known.view = createPlotView(frame, plot.residuals.length > 0);
+        }
         known.view.show(plot);
       }
     },

@@ -142,6 +142,38 @@ describe("a person with the preview", () => {
     });
   });
 
+  it("draws the residuals when a fit comes, and takes a window by keys alone", async () => {
+    await withSession("preview.keys", { size, theme: "high-contrast" }, async (session) => {
+      await openFile(session, "peroxide.raterun");
+      const { page } = session;
+      await goTo(session, 22, 3);
+      await page.keyboard.press("Control+Shift+k");
+      const frame = await openPreview(session);
+      await untilDrawn(frame);
+      const height = async (): Promise<number> => (await frame.locator(".plot canvas").boundingBox())?.height ?? 0;
+      const low = await height();
+      assert.equal(await frame.locator("form.window").count(), 0);
+      await goTo(session, 21, 1);
+      await page.keyboard.press("Control+z");
+      await until("the strip of residuals", async () => (await height()) > low + 50);
+      await untilDrawn(frame);
+      await frame.locator("form.window input").first().focus();
+      await page.keyboard.type("900");
+      await page.keyboard.press("Tab");
+      await page.keyboard.type("100");
+      await page.keyboard.press("Enter");
+      await until("the refusal", async () =>
+        /needs two times, the first before the last/.test(await words(frame, ".reading")),
+      );
+      await page.keyboard.press("End");
+      await page.keyboard.type("0");
+      await page.keyboard.press("Enter");
+      await until("the window line", async () => /^ {4}window {5}900 s to 1000 s$/m.test(await editorText(session)));
+      await takePicture(session, "preview.keys");
+      assert.equal(await violations(frame), null);
+    });
+  });
+
   it("opens the data file at the row of a point, by the mouse and by keys, and the description at a line", async () => {
     await withSession("preview.ways", { size }, async (session) => {
       await openFile(session, "peroxide.raterun");
