@@ -114,6 +114,7 @@ export function plotHands(frame: HTMLElement, drawn: { readonly view: PlotView; 
       return;
     }
     span.hidden = true;
+    say(null);
     editor.postMessage({ kind: "write window", plot: drawn.plot.id, from, to });
   });
 }

@@ -27,5 +27,6 @@ export function printedSentence(text: string): string {
       return `\u00a0×\u00a010${toSuperscript(`${sign === "-" ? "-" : ""}${digits}`)}`;
     })
     .replace(/(?<=[A-Za-z])\^(-?\d+)(?![\d.+])/g, (_, exponent: string) => toSuperscript(exponent))
-    .replace(/(?<![\w)⁻])-(?=\d)/g, "\u2212");
+    .replace(/(?<![\w)⁻])-(?=\d)/g, "\u2212")
+    .replace(/\bdegC\b/g, "°C");
 }

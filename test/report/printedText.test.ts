@@ -25,6 +25,11 @@ describe("signs of print", () => {
     );
   });
 
+  it("a sentence has degrees as they are printed", () => {
+    assert.equal(printedSentence("wet at 22.0(2) degC"), "wet at 22.0(2) °C");
+    assert.equal(printedSentence("column degCelsius"), "column degCelsius");
+  });
+
   it("species: formulas lowered and charges raised, names as they are", () => {
     assert.equal(printedSpecies("Fe(CN)6^3-"), "Fe(CN)₆³⁻");
     assert.equal(printedSpecies("CH3COO^-"), "CH₃COO⁻");

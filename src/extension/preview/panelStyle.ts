@@ -40,8 +40,8 @@ button.line[aria-current] { color: var(--ink); text-decoration: underline; text-
 tr.leads { cursor: pointer; }
 tr.leads:hover > * { background: var(--vscode-list-hoverBackground); }
 tr:has(button.line[aria-current]) > * { background: var(--vscode-editor-lineHighlightBackground); }
-:focus-visible { outline: 1px solid var(--focus); outline-offset: 1px; }
-body.vscode-high-contrast :focus-visible { outline-width: 2px; }
+body :is(a, button, input, select, summary, .plot, .wide):focus-visible { outline: 1px solid var(--focus); outline-offset: 1px; }
+body.vscode-high-contrast :is(a, button, input, select, summary, .plot, .wide):focus-visible { outline-width: 2px; }
 .axis { margin: 0; color: var(--ink); font-size: .92em; }
 .axis.time { text-align: right; padding-right: .6rem; }
 .plot { position: relative; min-height: 320px; touch-action: pan-y; cursor: crosshair; overflow: hidden; user-select: none; }
