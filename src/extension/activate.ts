@@ -11,6 +11,7 @@ import {
   themeChanged,
   trustGranted,
 } from "../contract/editorProtocol.js";
+import { registerOpenSample } from "./commands/openSample.js";
 import { registerRestartServer } from "./commands/restartServer.js";
 import { registerShowLog } from "./commands/showLog.js";
 import { listForServer } from "./listForServer.js";
@@ -34,6 +35,7 @@ export async function activateWith(context: ExtensionContext, make: MakeClient):
     status,
     preview,
     registerShowLog(log),
+    registerOpenSample(context.extensionUri),
     registerRestartServer(client, log),
     registerRecords(client),
     client.onNotification(statusChanged, (told) => {

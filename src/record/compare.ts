@@ -26,7 +26,15 @@ export function compare(before: RunRecord, now: RunRecord): Moved[] {
   const data = movedData(before, now);
   const method = movedMethod(before, now);
   const units = facts.some(({ otherUnit, stated }) => otherUnit && (stated || data.length === 0));
-  const description = before.meaning !== now.meaning ? [movedMeaning(before, now)] : units ? [otherUnits] : [];
+  const mistakes = data.length + method.length === 0 && onlyDiagnostics(before, now, facts);
+  const description =
+    before.meaning !== now.meaning
+      ? [movedMeaning(before, now)]
+      : units
+        ? [otherUnits]
+        : mistakes
+          ? [otherMistakes]
+          : [];
   const explained = data.length + method.length + description.length > 0 || facts.length === 0;
   // A stated fact that moved though the description did not, a unit found in a header say, is a result like others.
   const stated = description.length > 0 ? facts.filter((fact) => fact.stated) : [];
@@ -46,6 +54,18 @@ const otherUnits: Moved = {
   what: "the description",
   text: "The description means the same but is written in other units, and results come out in those.",
 };
+
+/** A line that says nothing, a word misspelt, is no part of the meaning; what is said of it stands in the record. */
+const otherMistakes: Moved = {
+  cause: "description",
+  what: "the description",
+  text: "The description means the same, but other mistakes stand in it.",
+};
+
+function onlyDiagnostics(before: RunRecord, now: RunRecord, facts: readonly MovedFact[]): boolean {
+  const said = new Set([...before.diagnostics, ...now.diagnostics].map(({ what }) => what));
+  return facts.length > 0 && facts.every(({ what }) => said.has(what));
+}
 
 /** What stands in the record cannot follow from the same data, description and method. */
 const unexplained: Moved = {

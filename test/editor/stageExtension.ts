@@ -4,7 +4,7 @@ import { projectFolder } from "./projectFolder.js";
 import { temporaryFolder } from "./temporaryFolder.js";
 
 /** Entries of the project's top folder that are no part of the extension as it is shipped. */
-const notShipped = new Set(["node_modules", "src", "test", "samples", "artefacts"]);
+const notShipped = new Set(["node_modules", "src", "test", "artefacts"]);
 
 /**
  * Copies the built extension, as it is shipped, to a folder of its own. The editor takes whatever lies below the folder

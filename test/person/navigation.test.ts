@@ -56,7 +56,7 @@ describe("a person finding their way", () => {
       await takePictures(session, "completion.lines");
       await page.keyboard.press("Escape");
       await type(session, 'ta "');
-      assert.deepEqual(await suggestions(session, "data"), ["data"]);
+      assert.deepEqual(await suggestions(session, "data"), ["data", "pictures"]);
       await page.keyboard.press("Enter");
       await type(session, "/");
       assert.ok((await suggestions(session, "ester.csv")).includes("peroxide-a.csv"));

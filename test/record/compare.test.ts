@@ -67,6 +67,17 @@ describe("comparing records", () => {
     );
   });
 
+  it("a line that nobody knows: said as a mistake in the description, not as a record changed by hand", async () => {
+    const found = await moves("ester", { text: (text) => `${text}nosuchword 1\n` });
+    assert.deepEqual(
+      found.map(({ cause, text }) => [cause, text]),
+      [
+        ["description", "The description means the same, but other mistakes stand in it."],
+        ["result", "description: error word-unknown is new."],
+      ],
+    );
+  });
+
   it("the method: said, with both versions", async () => {
     const record = readBack(await sampleRecord("ester"));
     assert.deepEqual(compare({ ...record, method: "0" }, record), [

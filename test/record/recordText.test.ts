@@ -6,7 +6,7 @@ import { recordText } from "../../src/record/recordText.js";
 import { versions } from "../../src/workspace/verify.js";
 import { readBack, sampleFindings, sampleRecord } from "./sampleRecord.js";
 
-const samples = ["ester", "gas", "peroxide", "planted"] as const;
+const samples = ["dye", "ester", "gas", "peroxide", "planted"] as const;
 
 describe("the text of a record", () => {
   it("is the same twice, whatever the path before the name, and ends its lines in LF", async () => {

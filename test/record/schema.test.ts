@@ -13,7 +13,7 @@ describe("the schema of records", () => {
   });
 
   it("holds for the record of every sample", async () => {
-    for (const name of ["ester", "gas", "peroxide", "planted"]) {
+    for (const name of ["dye", "ester", "gas", "peroxide", "planted"]) {
       assert.ok(validate(JSON.parse(await sampleRecord(name))), `${name}: ${JSON.stringify(validate.errors)}`);
     }
   });
