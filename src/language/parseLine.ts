@@ -1,6 +1,7 @@
 import { type Fault, fault, replacement, type Span } from "../contract/problem.js";
+import type { Cursor } from "./cursor.js";
 import { lexLine, type Token } from "./lexer.js";
-import { type Cursor, fail, readParts } from "./readParts.js";
+import { fail, readParts } from "./readParts.js";
 import { type StatementRow, statementByHead } from "./statements.js";
 import type { LineStatement, ParsedLine } from "./syntax.js";
 import { triedMends } from "./triedMends.js";

@@ -5,6 +5,7 @@ import { readQuantity } from "../quantity/readQuantity.js";
 import { readUnit } from "../quantity/readUnit.js";
 import { isFault, shifted } from "../quantity/shifted.js";
 import { checkQuantity } from "./checkQuantity.js";
+import { type Cursor, keep, slice, spanOf, textOf } from "./cursor.js";
 import { describeParts, firstWords } from "./describePart.js";
 import type { Token } from "./lexer.js";
 import { isName } from "./name.js";
@@ -13,19 +14,6 @@ import { type StatementRow, statementByHead } from "./statements.js";
 import type { Field, OrderTerm } from "./syntax.js";
 import { endOfWords } from "./unitWords.js";
 import { isDate, otherDates } from "./writtenDate.js";
-
-/** Where the reading of a line stands. */
-export interface Cursor {
-  readonly text: string;
-  readonly tokens: readonly Token[];
-  at: number;
-  readonly fields: Map<string, Field>;
-  fault: Fault | null;
-  /** parts that could come at `at` but were not there */
-  wanted: Part[];
-  /** the words read last, for messages */
-  before: string;
-}
 
 /** Reads the parts one after the other; stops at the first that does not fit and leaves the fault in the cursor. */
 export function readParts(cursor: Cursor, parts: readonly Part[], row: StatementRow): void {
@@ -382,23 +370,6 @@ const numberWords = ["zero", "one", "two", "three", "four", "five", "six", "seve
 /** Says of a word that is left over what could have stood in its place. */
 export function fail(cursor: Cursor, next: Token, row: StatementRow): void {
   if (nearest(next.text, firstWords(cursor.wanted)).length > 0) wantedButFound(cursor, [], row, undefined);
-}
-
-function keep(cursor: Cursor, label: string, field: Field): void {
-  cursor.fields.set(label, field);
-}
-
-function slice(cursor: Cursor, first: Token, end: number): { text: string; span: Span } {
-  const last = cursor.tokens[end - 1] ?? first;
-  return { text: cursor.text.slice(first.start, last.end), span: { start: first.start, end: last.end } };
-}
-
-function spanOf(cursor: Cursor, first: Token): Span {
-  return { start: first.start, end: (cursor.tokens[cursor.at - 1] ?? first).end };
-}
-
-function textOf(cursor: Cursor, from: number, to: number): string {
-  return slice(cursor, cursor.tokens[from] as Token, to).text;
 }
 
 function moved(span: Span, offset: number): Span {

@@ -2,8 +2,8 @@ import assert from "node:assert/strict";
 import { cpSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
-import { runCommandLine } from "../../src/cli/run.js";
 import type { Findings } from "../../src/contract/findings.js";
+import { type CommandLineRun, commandLineIn } from "./commandLineIn.js";
 
 let folder = "";
 
@@ -18,19 +18,8 @@ before(() => {
 after(() => rmSync(folder, { recursive: true, force: true }));
 
 /** Runs the command line in a folder below the temporary one: status, standard output, standard error. */
-async function run(words: readonly string[], below = ""): Promise<{ status: number; out: string; err: string }> {
-  let out = "";
-  let err = "";
-  const io = {
-    cwd: join(folder, below),
-    out: (text: string) => {
-      out += text;
-    },
-    err: (text: string) => {
-      err += text;
-    },
-  };
-  return { status: await runCommandLine(words, io), out, err };
+function run(words: readonly string[], below = ""): Promise<CommandLineRun> {
+  return commandLineIn(join(folder, below), words);
 }
 
 describe("ratewright check", () => {

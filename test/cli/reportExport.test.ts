@@ -2,8 +2,8 @@ import assert from "node:assert/strict";
 import { mkdir, mkdtemp, readdir, readFile, rm, writeFile } from "node:fs/promises";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
-import { runCommandLine } from "../../src/cli/run.js";
 import { elementsOf } from "../report/wellFormed.js";
+import { commandLineIn } from "./commandLineIn.js";
 
 /** An invented run: a signal that falls by 5 % a second, 12 readings, one left out. */
 const description = `ratewright 1
@@ -32,19 +32,7 @@ describe("ratewright report --markdown, --svg, --csv", () => {
   });
   afterEach(() => rm(folder, { recursive: true, force: true }));
 
-  async function ratewright(...words: string[]): Promise<{ status: number; out: string; err: string }> {
-    const written = { out: "", err: "" };
-    const io = {
-      cwd: folder,
-      out: (text: string) => {
-        written.out += text;
-      },
-      err: (text: string) => {
-        written.err += text;
-      },
-    };
-    return { status: await runCommandLine(words, io), ...written };
-  }
+  const ratewright = (...words: string[]) => commandLineIn(folder, words);
 
   it("prints the report as Markdown: tables in order, nothing of the title is markup", async () => {
     const { status, out } = await ratewright("report", "--markdown", "one.raterun");

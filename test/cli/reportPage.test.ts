@@ -2,10 +2,10 @@ import assert from "node:assert/strict";
 import { chmod, mkdir, mkdtemp, readdir, readFile, rm, writeFile } from "node:fs/promises";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
-import { runCommandLine } from "../../src/cli/run.js";
 import type { Description, Findings } from "../../src/contract/findings.js";
 import { columnHover } from "../../src/report/hover.js";
 import { elementsOf } from "../report/wellFormed.js";
+import { commandLineIn } from "./commandLineIn.js";
 
 /** An invented run: 6.0 mmol/L left of 10 after 10 s and so on. */
 const description = `ratewright 1
@@ -33,19 +33,7 @@ describe("ratewright report --html", () => {
   });
   afterEach(() => rm(folder, { recursive: true, force: true }));
 
-  async function ratewright(...words: string[]): Promise<{ status: number; out: string; err: string }> {
-    const written = { out: "", err: "" };
-    const io = {
-      cwd: folder,
-      out: (text: string) => {
-        written.out += text;
-      },
-      err: (text: string) => {
-        written.err += text;
-      },
-    };
-    return { status: await runCommandLine(words, io), ...written };
-  }
+  const ratewright = (...words: string[]) => commandLineIn(folder, words);
 
   it("writes one page with pictures and says where", async () => {
     const { status, out } = await ratewright("report", "--html", "page.html", "one.raterun");
